@@ -1,0 +1,79 @@
+import type { CellFigures, Overall, WorkloadFacts } from '../bench/figures';
+import type { SettingQuantity } from '../bench/words';
+import type { EmbargoField, PartKind, Provenance } from '../stores/words';
+
+/** One setting of a profile, with the value of the stock profile beside it where stock has one. */
+export interface SettingFact {
+	menuPath: string;
+	setting: string;
+	value: string;
+	unit: string;
+	quantity: SettingQuantity;
+	note: string;
+	/** Value of the same setting in the parent and in stock; null where they leave it alone. */
+	parentValue: string | null;
+	stockValue: string | null;
+}
+
+/** A derived fact of a profile, ready to print: clock, first-word latency, power factor … */
+export interface DerivedFact {
+	name: string;
+	value: number;
+	unit: string;
+	/** The formula in words, for the note under it. */
+	how: string;
+}
+
+export interface ProfileFacts {
+	slug: string;
+	name: string;
+	/** Null for stock. */
+	parent: string | null;
+	notes: string;
+	/** In menu order, the parent's settings included. */
+	settings: SettingFact[];
+	derived: DerivedFact[];
+}
+
+export interface KitLine {
+	part: string;
+	partName: string;
+	kind: PartKind;
+	sample: string;
+	provenance: Provenance;
+	/** The latest price seen; null where none was recorded. */
+	price: { amountMinor: number; currency: string; observedOn: string } | null;
+}
+
+export interface CampaignData {
+	slug: string;
+	name: string;
+	rig: { slug: string; name: string; revision: number; firmware: string; driver: string; os: string };
+	kit: KitLine[];
+	/** In the campaign's order; stock among them when it was measured. */
+	profiles: ProfileFacts[];
+	workloads: WorkloadFacts[];
+	/** The profile the others are held against, usually stock. */
+	baseline: string;
+	cells: CellFigures[];
+	/** By profile slug. */
+	overall: Record<string, Overall>;
+}
+
+/** A duty that comes with a sample: what must stand under the article, and until when it must wait. */
+export interface SampleDuty {
+	sample: string;
+	partName: string;
+	provenance: Provenance;
+	/** The text agreed with the partner; null for a bought sample or where none was agreed. */
+	disclosure: string | null;
+	embargoes: { field: EmbargoField; until: string }[];
+}
+
+/** Everything an article's directives may name: plain JSON, made on the server, used by the one renderer everywhere. */
+export interface ArticleData {
+	campaigns: CampaignData[];
+	duties: SampleDuty[];
+	/** The publication's zone for the dates it prints, such as Europe/Oslo. */
+	zone: string;
+}

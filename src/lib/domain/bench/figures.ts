@@ -1,0 +1,87 @@
+import type { Direction, Headline, WorkloadClass } from './words';
+
+/** What a set of readings says of itself. Unit: the workload's; percent where the name says so. */
+export interface Summary {
+	/** Readings counted: those not excluded, of runs not voided. */
+	n: number;
+	mean: number;
+	median: number;
+	min: number;
+	max: number;
+	/** Sample standard deviation, n − 1 below; null for one reading. */
+	sd: number | null;
+	/** Coefficient of variation; null for one reading or a mean that is not positive. */
+	cvPercent: number | null;
+	/** Student t interval of the mean; null for one reading. */
+	ci95: [number, number] | null;
+	/** Indices, into the readings given, of those that stand far from the others (flag only). */
+	flagged: number[];
+	/** The average the workload's protocol puts in print. */
+	headline: number;
+}
+
+export const verdicts = ['better', 'worse', 'no-difference', 'not-enough'] as const;
+export type Verdict = (typeof verdicts)[number];
+
+export const verdictWords: Record<Verdict, string> = {
+	better: 'better',
+	worse: 'worse',
+	'no-difference': 'no difference that matters',
+	'not-enough': 'not enough runs to say'
+};
+
+/** A cell against its baseline, turned so that above 1 is better. */
+export interface Comparison {
+	ratio: number;
+	/** 95 % interval of the ratio; null where the readings allow none. */
+	ci95: [number, number] | null;
+	/** (ratio − 1) × 100. */
+	gainPercent: number;
+	gainCi95: [number, number] | null;
+	verdict: Verdict;
+}
+
+/** The geometric mean of a profile's ratios. */
+export interface Overall {
+	ratio: number;
+	gainPercent: number;
+	/** Workloads that went into it. */
+	workloads: string[];
+	/** Workloads of the campaign that could not, for want of readings on a side. */
+	missing: string[];
+}
+
+export interface CellFigures {
+	profile: string;
+	workload: string;
+	/** Readings the plan asks for. */
+	needed: number;
+	/** Null while the cell is empty. */
+	summary: Summary | null;
+	/** Null for the baseline itself, or where a side is empty. */
+	comparison: Comparison | null;
+	signedBy: string | null;
+	/** ISO time. */
+	signedAt: string | null;
+	testers: string[];
+	/** First and last start of its runs, ISO. */
+	from: string | null;
+	to: string | null;
+	ambientC: number | null;
+}
+
+export interface WorkloadFacts {
+	slug: string;
+	name: string;
+	programVersion: string;
+	settings: string;
+	quantity: string;
+	unit: string;
+	better: Direction;
+	class: WorkloadClass;
+	headline: Headline;
+	leastDifferencePercent: number;
+	warmUps: number;
+	repeats: number;
+	coolDownS: number;
+}

@@ -1,7 +1,12 @@
 import { z } from 'zod';
 
 const url = (protocols: string[]) =>
-	z.string().refine((value) => URL.canParse(value) && protocols.includes(new URL(value).protocol), `is not a ${protocols.join(' or ')} address`);
+	z
+		.string()
+		.refine(
+			(value) => URL.canParse(value) && protocols.includes(new URL(value).protocol),
+			`is not a ${protocols.join(' or ')} address`
+		);
 
 const schema = z.object({
 	NODE_ENV: z.string().default('production'),
@@ -32,7 +37,9 @@ export type Env = z.infer<typeof schema>;
  * @throws Error with one line that names the first wrong variable.
  */
 export function readEnv(source: Record<string, string | undefined>): Env {
-	const given = Object.fromEntries(Object.entries(source).filter(([, value]) => value !== undefined && value !== ''));
+	const given = Object.fromEntries(
+		Object.entries(source).filter(([, value]) => value !== undefined && value !== '')
+	);
 	const parsed = schema.safeParse(given);
 	if (parsed.success) return parsed.data;
 	const issue = parsed.error.issues[0];

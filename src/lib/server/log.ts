@@ -6,7 +6,17 @@ export const log = pino({
 	base: undefined,
 	timestamp: pino.stdTimeFunctions.isoTime,
 	redact: {
-		paths: ['password', 'token', 'authorization', 'cookie', '*.password', '*.token', '*.authorization', '*.cookie', 'headers["set-cookie"]'],
+		paths: [
+			'password',
+			'token',
+			'authorization',
+			'cookie',
+			'*.password',
+			'*.token',
+			'*.authorization',
+			'*.cookie',
+			'headers["set-cookie"]'
+		],
 		censor: '[cut]'
 	}
 });

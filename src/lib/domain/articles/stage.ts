@@ -1,7 +1,25 @@
-export const stages = ['drafting', 'in-review', 'changes-asked', 'approved', 'scheduled', 'published', 'withdrawn'] as const;
+export const stages = [
+	'drafting',
+	'in-review',
+	'changes-asked',
+	'approved',
+	'scheduled',
+	'published',
+	'withdrawn'
+] as const;
 export type Stage = (typeof stages)[number];
 
-export const moves = ['submit', 'ask-changes', 'approve', 'schedule', 'unschedule', 'publish', 'edit', 'revise', 'withdraw'] as const;
+export const moves = [
+	'submit',
+	'ask-changes',
+	'approve',
+	'schedule',
+	'unschedule',
+	'publish',
+	'edit',
+	'revise',
+	'withdraw'
+] as const;
 export type Move = (typeof moves)[number];
 
 /**
@@ -13,7 +31,12 @@ export const transitions: Record<Stage, Partial<Record<Move, Stage>>> = {
 	drafting: { edit: 'drafting', submit: 'in-review' },
 	'in-review': { edit: 'in-review', 'ask-changes': 'changes-asked', approve: 'approved' },
 	'changes-asked': { edit: 'changes-asked', submit: 'in-review' },
-	approved: { edit: 'in-review', 'ask-changes': 'changes-asked', schedule: 'scheduled', publish: 'published' },
+	approved: {
+		edit: 'in-review',
+		'ask-changes': 'changes-asked',
+		schedule: 'scheduled',
+		publish: 'published'
+	},
 	scheduled: { edit: 'in-review', schedule: 'scheduled', unschedule: 'approved', publish: 'published' },
 	published: { revise: 'drafting', withdraw: 'withdrawn' },
 	withdrawn: { revise: 'drafting' }

@@ -1,12 +1,22 @@
 import type { ExtractTablesWithRelations } from 'drizzle-orm';
 import type { MySqlTransaction, MySqlTransactionConfig } from 'drizzle-orm/mysql-core';
-import { drizzle, type MySql2Database, type MySql2PreparedQueryHKT, type MySql2QueryResultHKT } from 'drizzle-orm/mysql2';
+import {
+	drizzle,
+	type MySql2Database,
+	type MySql2PreparedQueryHKT,
+	type MySql2QueryResultHKT
+} from 'drizzle-orm/mysql2';
 import { createPool, type Pool } from 'mysql2/promise';
 import * as schema from './schema';
 
 export type Schema = typeof schema;
 export type Connection = MySql2Database<Schema>;
-export type Transaction = MySqlTransaction<MySql2QueryResultHKT, MySql2PreparedQueryHKT, Schema, ExtractTablesWithRelations<Schema>>;
+export type Transaction = MySqlTransaction<
+	MySql2QueryResultHKT,
+	MySql2PreparedQueryHKT,
+	Schema,
+	ExtractTablesWithRelations<Schema>
+>;
 /** A query takes either: it works inside and outside a transaction. */
 export type Db = Connection | Transaction;
 
@@ -17,7 +27,13 @@ export interface Database {
 
 /** Opens a pool. Times go over the wire in UTC. */
 export function openDatabase(url: string, connectionLimit = 10): Database {
-	const pool = createPool({ uri: url.replace(/^mariadb:/, 'mysql:'), timezone: 'Z', supportBigNumbers: true, connectionLimit, charset: 'utf8mb4_unicode_ci' });
+	const pool = createPool({
+		uri: url.replace(/^mariadb:/, 'mysql:'),
+		timezone: 'Z',
+		supportBigNumbers: true,
+		connectionLimit,
+		charset: 'utf8mb4_unicode_ci'
+	});
 	return { pool, db: drizzle(pool, { schema, mode: 'default' }) };
 }
 
@@ -38,7 +54,11 @@ export const isDuplicate = (error: unknown) => errno(error) === 1062;
  * Runs work in one transaction, again when the server asks for it (deadlock, lock wait, changed row), at most five times.
  * Inside a transaction already, it runs in a savepoint and leaves the retry to the outermost.
  */
-export async function inTransaction<T>(db: Db, work: (tx: Transaction) => Promise<T>, config?: MySqlTransactionConfig): Promise<T> {
+export async function inTransaction<T>(
+	db: Db,
+	work: (tx: Transaction) => Promise<T>,
+	config?: MySqlTransactionConfig
+): Promise<T> {
 	for (let attempt = 1; ; attempt++) {
 		try {
 			return await db.transaction(work, config);

@@ -39,19 +39,27 @@ function signedIn(event: RequestEvent | ServerLoadEvent, need: Act): Context {
 const couldEver = (actor: Actor, need: Act) => may(actor, need) || may(actor, need, { authorId: actor.id });
 
 /** A page's load for signed-in people: sends the visitor to sign in, refuses the wrong role. */
-export const guarded = <E extends ServerLoadEvent | RequestEvent, R>(need: Act, handler: (event: E, context: Context) => R) =>
-	mark(need, (event: E): R => handler(event, signedIn(event, need)));
+export const guarded = <E extends ServerLoadEvent | RequestEvent, R>(
+	need: Act,
+	handler: (event: E, context: Context) => R
+) => mark(need, (event: E): R => handler(event, signedIn(event, need)));
 
 /** A load, action or endpoint open to everyone. */
-export const open = <E extends ServerLoadEvent | RequestEvent, R>(handler: (event: E, context: OpenContext) => R) =>
-	mark('public', (event: E): R => handler(event, openContext(event)));
+export const open = <E extends ServerLoadEvent | RequestEvent, R>(
+	handler: (event: E, context: OpenContext) => R
+) => mark('public', (event: E): R => handler(event, openContext(event)));
 
 /** An API handler: answers problem+json where a page would redirect. */
-export const guardedApi = <E extends RequestEvent>(need: Act, handler: (event: E, context: Context) => Promise<Response>) =>
+export const guardedApi = <E extends RequestEvent>(
+	need: Act,
+	handler: (event: E, context: Context) => Promise<Response>
+) =>
 	mark(need, async (event: E): Promise<Response> => {
 		const context = openContext(event);
-		if (!context.actor) return problem(401, 'Not signed in', 'Send a personal token: Authorization: Bearer …');
-		if (!couldEver(context.actor, need)) return problem(403, 'Not allowed', 'Your roles, or the scopes of this token, do not include this.');
+		if (!context.actor)
+			return problem(401, 'Not signed in', 'Send a personal token: Authorization: Bearer …');
+		if (!couldEver(context.actor, need))
+			return problem(403, 'Not allowed', 'Your roles, or the scopes of this token, do not include this.');
 		return handler(event, context as Context);
 	});
 

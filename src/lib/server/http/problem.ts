@@ -14,7 +14,12 @@ export const statusOf = (reason: Reason): number => statuses[reason].status;
 export const titleOf = (reason: Reason): string => statuses[reason].title;
 
 /** An RFC 9457 problem document as a response. */
-export function problem(status: number, title: string, detail: string, more: Record<string, unknown> = {}): Response {
+export function problem(
+	status: number,
+	title: string,
+	detail: string,
+	more: Record<string, unknown> = {}
+): Response {
 	return new Response(JSON.stringify({ type: 'about:blank', title, status, detail, ...more }), {
 		status,
 		headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' }

@@ -9,6 +9,11 @@ export async function post(db: Db, now: Date, outgoing: OutgoingMail[]): Promise
 	await enqueue(
 		db,
 		now,
-		written.map(({ id, messageId }) => ({ kind: 'send-mail', payload: { mailId: id }, runAt: now, dedupeKey: `send-mail:${messageId}` }))
+		written.map(({ id, messageId }) => ({
+			kind: 'send-mail',
+			payload: { mailId: id },
+			runAt: now,
+			dedupeKey: `send-mail:${messageId}`
+		}))
 	);
 }

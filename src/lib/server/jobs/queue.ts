@@ -17,5 +17,13 @@ export async function enqueue(db: Db, now: Date, requests: JobRequest[]): Promis
 	await db
 		.insert(job)
 		.ignore()
-		.values(requests.map(({ kind, payload, runAt, dedupeKey }) => ({ kind, payload, runAt, dedupeKey: dedupeKey ?? null, createdAt: now })));
+		.values(
+			requests.map(({ kind, payload, runAt, dedupeKey }) => ({
+				kind,
+				payload,
+				runAt,
+				dedupeKey: dedupeKey ?? null,
+				createdAt: now
+			}))
+		);
 }

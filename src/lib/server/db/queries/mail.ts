@@ -12,8 +12,23 @@ export interface OutgoingMail {
 }
 
 /** Writes mails to the outbox and returns the ids of all of them, new or there before. */
-export async function write(db: Db, now: Date, mails: OutgoingMail[]): Promise<{ id: number; messageId: string }[]> {
+export async function write(
+	db: Db,
+	now: Date,
+	mails: OutgoingMail[]
+): Promise<{ id: number; messageId: string }[]> {
 	if (mails.length === 0) return [];
-	await db.insert(mail).ignore().values(mails.map((m) => ({ ...m, createdAt: now })));
-	return db.select({ id: mail.id, messageId: mail.messageId }).from(mail).where(inArray(mail.messageId, mails.map((m) => m.messageId)));
+	await db
+		.insert(mail)
+		.ignore()
+		.values(mails.map((m) => ({ ...m, createdAt: now })));
+	return db
+		.select({ id: mail.id, messageId: mail.messageId })
+		.from(mail)
+		.where(
+			inArray(
+				mail.messageId,
+				mails.map((m) => m.messageId)
+			)
+		);
 }

@@ -1,5 +1,19 @@
 import { sql } from 'drizzle-orm';
-import { bigint, boolean, check, foreignKey, index, int, json, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+	bigint,
+	boolean,
+	check,
+	foreignKey,
+	index,
+	int,
+	json,
+	mysqlEnum,
+	mysqlTable,
+	primaryKey,
+	text,
+	uniqueIndex,
+	varchar
+} from 'drizzle-orm/mysql-core';
 import { stages } from '../../../domain/articles/stage';
 import { at, id, mediumtext, personId, sha256, slug, version } from '../columns';
 import { campaign } from './bench';
@@ -18,7 +32,9 @@ export const article = mysqlTable(
 		/** The template it began from, which also names what kind of article it is. */
 		template: varchar('template', { length: 60 }).notNull(),
 		stage: mysqlEnum('stage', stages).notNull(),
-		authorId: personId('author_id').notNull().references(() => user.id),
+		authorId: personId('author_id')
+			.notNull()
+			.references(() => user.id),
 		/** Number of the newest revision. */
 		head: int('head').notNull().default(0),
 		slotAt: at('slot_at'),
@@ -38,9 +54,15 @@ export const article = mysqlTable(
 		index('article_stage').on(t.stage, t.slotAt),
 		index('article_author').on(t.authorId),
 		index('article_published').on(t.liveEditionId, t.firstPublishedAt),
-		check('article_slot', sql`${t.stage} <> 'scheduled' or (${t.slotAt} is not null and ${t.approvedEditionId} is not null)`),
+		check(
+			'article_slot',
+			sql`${t.stage} <> 'scheduled' or (${t.slotAt} is not null and ${t.approvedEditionId} is not null)`
+		),
 		check('article_approved', sql`${t.stage} <> 'approved' or ${t.approvedEditionId} is not null`),
-		check('article_published', sql`${t.stage} <> 'published' or (${t.liveEditionId} is not null and ${t.firstPublishedAt} is not null)`),
+		check(
+			'article_published',
+			sql`${t.stage} <> 'published' or (${t.liveEditionId} is not null and ${t.firstPublishedAt} is not null)`
+		),
 		check('article_withdrawn', sql`(${t.withdrawnAt} is null) = (${t.withdrawReason} is null)`)
 	]
 );
@@ -48,11 +70,18 @@ export const article = mysqlTable(
 export const articleCampaign = mysqlTable(
 	'article_campaign',
 	{
-		articleId: int('article_id').notNull().references(() => article.id),
-		campaignId: int('campaign_id').notNull().references(() => campaign.id),
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
+		campaignId: int('campaign_id')
+			.notNull()
+			.references(() => campaign.id),
 		position: int('position').notNull()
 	},
-	(t) => [primaryKey({ columns: [t.articleId, t.campaignId] }), index('article_campaign_campaign').on(t.campaignId)]
+	(t) => [
+		primaryKey({ columns: [t.articleId, t.campaignId] }),
+		index('article_campaign_campaign').on(t.campaignId)
+	]
 );
 
 /** Each save. */
@@ -60,12 +89,16 @@ export const revision = mysqlTable(
 	'revision',
 	{
 		id: id(),
-		articleId: int('article_id').notNull().references(() => article.id),
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
 		number: int('number').notNull(),
 		title: varchar('title', { length: 200 }).notNull(),
 		standfirst: varchar('standfirst', { length: 500 }).notNull(),
 		source: mediumtext('source').notNull(),
-		savedBy: personId('saved_by').notNull().references(() => user.id),
+		savedBy: personId('saved_by')
+			.notNull()
+			.references(() => user.id),
 		savedAt: at('saved_at').notNull(),
 		note: varchar('note', { length: 200 }).notNull().default('')
 	},
@@ -76,13 +109,17 @@ export const comment = mysqlTable(
 	'comment',
 	{
 		id: id(),
-		articleId: int('article_id').notNull().references(() => article.id),
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
 		revisionNumber: int('revision_number').notNull(),
 		/** The passage it hangs on, as it read then; empty for the article as a whole. */
 		quote: text('quote').notNull(),
 		body: text('body').notNull(),
 		blocking: boolean('blocking').notNull().default(false),
-		authorId: personId('author_id').notNull().references(() => user.id),
+		authorId: personId('author_id')
+			.notNull()
+			.references(() => user.id),
 		parentId: int('parent_id'),
 		createdAt: at('created_at').notNull(),
 		resolvedAt: at('resolved_at'),
@@ -100,9 +137,13 @@ export const edition = mysqlTable(
 	'edition',
 	{
 		id: id(),
-		articleId: int('article_id').notNull().references(() => article.id),
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
 		number: int('number').notNull(),
-		revisionId: int('revision_id').notNull().references(() => revision.id),
+		revisionId: int('revision_id')
+			.notNull()
+			.references(() => revision.id),
 		title: varchar('title', { length: 200 }).notNull(),
 		standfirst: varchar('standfirst', { length: 500 }).notNull(),
 		source: mediumtext('source').notNull(),
@@ -116,19 +157,26 @@ export const edition = mysqlTable(
 		testerNames: json('tester_names').$type<string[]>().notNull(),
 		/** SHA-256 over source, data, page and plates. */
 		hash: sha256('hash').notNull(),
-		approvedBy: personId('approved_by').notNull().references(() => user.id),
+		approvedBy: personId('approved_by')
+			.notNull()
+			.references(() => user.id),
 		approvedAt: at('approved_at').notNull(),
 		/** When this edition went out; null while it waits. */
 		publishedAt: at('published_at')
 	},
-	(t) => [uniqueIndex('edition_number').on(t.articleId, t.number), index('edition_published').on(t.publishedAt)]
+	(t) => [
+		uniqueIndex('edition_number').on(t.articleId, t.number),
+		index('edition_published').on(t.publishedAt)
+	]
 );
 
 /** A chart or table of an edition, drawn once. */
 export const plate = mysqlTable(
 	'plate',
 	{
-		editionId: int('edition_id').notNull().references(() => edition.id),
+		editionId: int('edition_id')
+			.notNull()
+			.references(() => edition.id),
 		key: varchar('key', { length: 60 }).notNull(),
 		kind: varchar('kind', { length: 30 }).notNull(),
 		title: varchar('title', { length: 200 }).notNull(),
@@ -142,8 +190,12 @@ export const plate = mysqlTable(
 export const editionPart = mysqlTable(
 	'edition_part',
 	{
-		editionId: int('edition_id').notNull().references(() => edition.id),
-		partId: int('part_id').notNull().references(() => part.id)
+		editionId: int('edition_id')
+			.notNull()
+			.references(() => edition.id),
+		partId: int('part_id')
+			.notNull()
+			.references(() => part.id)
 	},
 	(t) => [primaryKey({ columns: [t.editionId, t.partId] }), index('edition_part_part').on(t.partId)]
 );
@@ -153,7 +205,9 @@ export const editionResult = mysqlTable(
 	'edition_result',
 	{
 		id: bigint('id', { mode: 'number', unsigned: true }).autoincrement().primaryKey(),
-		editionId: int('edition_id').notNull().references(() => edition.id),
+		editionId: int('edition_id')
+			.notNull()
+			.references(() => edition.id),
 		campaignSlug: varchar('campaign_slug', { length: 80 }).notNull(),
 		rigName: varchar('rig_name', { length: 160 }).notNull(),
 		rigRevision: int('rig_revision').notNull(),
@@ -166,7 +220,10 @@ export const editionResult = mysqlTable(
 		/** The cell's summary and comparison as JSON, at full precision. */
 		figures: json('figures').$type<unknown>().notNull()
 	},
-	(t) => [index('edition_result_edition').on(t.editionId), index('edition_result_workload').on(t.workloadSlug)]
+	(t) => [
+		index('edition_result_edition').on(t.editionId),
+		index('edition_result_workload').on(t.workloadSlug)
+	]
 );
 
 /** What we put right after print: dated, worded, listed; never removed. */
@@ -174,11 +231,15 @@ export const correction = mysqlTable(
 	'correction',
 	{
 		id: id(),
-		articleId: int('article_id').notNull().references(() => article.id),
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
 		editionId: int('edition_id').references(() => edition.id),
 		kind: mysqlEnum('kind', correctionKinds).notNull(),
 		body: text('body').notNull(),
-		madeBy: personId('made_by').notNull().references(() => user.id),
+		madeBy: personId('made_by')
+			.notNull()
+			.references(() => user.id),
 		madeAt: at('made_at').notNull()
 	},
 	(t) => [index('correction_article').on(t.articleId), index('correction_at').on(t.madeAt)]

@@ -1,6 +1,26 @@
 import { sql } from 'drizzle-orm';
-import { bigint, check, decimal, double, foreignKey, index, int, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
-import { directions, headlines, runSources, settingQuantities, workloadClasses } from '../../../domain/bench/words';
+import {
+	bigint,
+	check,
+	decimal,
+	double,
+	foreignKey,
+	index,
+	int,
+	mysqlEnum,
+	mysqlTable,
+	primaryKey,
+	text,
+	uniqueIndex,
+	varchar
+} from 'drizzle-orm/mysql-core';
+import {
+	directions,
+	headlines,
+	runSources,
+	settingQuantities,
+	workloadClasses
+} from '../../../domain/bench/words';
 import { at, id, personId, slug, version } from '../columns';
 import { user } from './people';
 import { sample } from './stores';
@@ -23,7 +43,11 @@ export const workload = mysqlTable(
 		repeats: int('repeats').notNull().default(5),
 		coolDownS: int('cool_down_s').notNull().default(0),
 		/** Least difference that matters, in percent. */
-		leastDifferencePercent: decimal('least_difference_percent', { precision: 6, scale: 3, mode: 'number' }).notNull(),
+		leastDifferencePercent: decimal('least_difference_percent', {
+			precision: 6,
+			scale: 3,
+			mode: 'number'
+		}).notNull(),
 		headline: mysqlEnum('headline', headlines).notNull().default('mean'),
 		createdAt: at('created_at').notNull(),
 		version: version()
@@ -31,8 +55,14 @@ export const workload = mysqlTable(
 	(t) => [
 		uniqueIndex('workload_slug').on(t.slug),
 		index('workload_class').on(t.class, t.name),
-		check('workload_protocol', sql`${t.warmUps} >= 0 and ${t.repeats} between 1 and 1000 and ${t.coolDownS} >= 0`),
-		check('workload_least_difference', sql`${t.leastDifferencePercent} > 0 and ${t.leastDifferencePercent} < 100`)
+		check(
+			'workload_protocol',
+			sql`${t.warmUps} >= 0 and ${t.repeats} between 1 and 1000 and ${t.coolDownS} >= 0`
+		),
+		check(
+			'workload_least_difference',
+			sql`${t.leastDifferencePercent} > 0 and ${t.leastDifferencePercent} < 100`
+		)
 	]
 );
 
@@ -53,14 +83,18 @@ export const rigRevision = mysqlTable(
 	'rig_revision',
 	{
 		id: id(),
-		rigId: int('rig_id').notNull().references(() => rig.id),
+		rigId: int('rig_id')
+			.notNull()
+			.references(() => rig.id),
 		number: int('number').notNull(),
 		firmware: varchar('firmware', { length: 160 }).notNull().default(''),
 		driver: varchar('driver', { length: 160 }).notNull().default(''),
 		os: varchar('os', { length: 160 }).notNull().default(''),
 		/** What changed against the revision before, in words. */
 		change: text('change').notNull(),
-		createdBy: personId('created_by').notNull().references(() => user.id),
+		createdBy: personId('created_by')
+			.notNull()
+			.references(() => user.id),
 		createdAt: at('created_at').notNull()
 	},
 	(t) => [uniqueIndex('rig_revision_number').on(t.rigId, t.number)]
@@ -69,8 +103,12 @@ export const rigRevision = mysqlTable(
 export const rigSample = mysqlTable(
 	'rig_sample',
 	{
-		rigRevisionId: int('rig_revision_id').notNull().references(() => rigRevision.id),
-		sampleId: int('sample_id').notNull().references(() => sample.id),
+		rigRevisionId: int('rig_revision_id')
+			.notNull()
+			.references(() => rigRevision.id),
+		sampleId: int('sample_id')
+			.notNull()
+			.references(() => sample.id),
 		position: int('position').notNull()
 	},
 	(t) => [primaryKey({ columns: [t.rigRevisionId, t.sampleId] }), index('rig_sample_sample').on(t.sampleId)]
@@ -81,7 +119,9 @@ export const profile = mysqlTable(
 	'profile',
 	{
 		id: id(),
-		rigId: int('rig_id').notNull().references(() => rig.id),
+		rigId: int('rig_id')
+			.notNull()
+			.references(() => rig.id),
 		slug: slug(),
 		name: varchar('name', { length: 160 }).notNull(),
 		parentId: int('parent_id'),
@@ -89,14 +129,20 @@ export const profile = mysqlTable(
 		createdAt: at('created_at').notNull(),
 		version: version(),
 		/** Unique where set: a rig has one root. */
-		rootOf: int('root_of').generatedAlwaysAs(sql`(case when parent_id is null then rig_id else null end)`, { mode: 'virtual' })
+		rootOf: int('root_of').generatedAlwaysAs(sql`(case when parent_id is null then rig_id else null end)`, {
+			mode: 'virtual'
+		})
 	},
 	(t) => [
 		uniqueIndex('profile_slug').on(t.rigId, t.slug),
 		uniqueIndex('profile_root').on(t.rootOf),
 		index('profile_parent').on(t.parentId),
 		uniqueIndex('profile_in_rig').on(t.id, t.rigId),
-		foreignKey({ name: 'profile_parent_same_rig', columns: [t.parentId, t.rigId], foreignColumns: [t.id, t.rigId] })
+		foreignKey({
+			name: 'profile_parent_same_rig',
+			columns: [t.parentId, t.rigId],
+			foreignColumns: [t.id, t.rigId]
+		})
 	]
 );
 
@@ -104,7 +150,9 @@ export const profileSetting = mysqlTable(
 	'profile_setting',
 	{
 		id: id(),
-		profileId: int('profile_id').notNull().references(() => profile.id),
+		profileId: int('profile_id')
+			.notNull()
+			.references(() => profile.id),
 		position: int('position').notNull(),
 		/** Menus from the outermost in, separated by ' > '. */
 		menuPath: varchar('menu_path', { length: 300 }).notNull(),
@@ -123,32 +171,51 @@ export const campaign = mysqlTable(
 		id: id(),
 		slug: slug(),
 		name: varchar('name', { length: 160 }).notNull(),
-		rigRevisionId: int('rig_revision_id').notNull().references(() => rigRevision.id),
+		rigRevisionId: int('rig_revision_id')
+			.notNull()
+			.references(() => rigRevision.id),
 		purpose: text('purpose').notNull(),
 		dueAt: at('due_at'),
-		createdBy: personId('created_by').notNull().references(() => user.id),
+		createdBy: personId('created_by')
+			.notNull()
+			.references(() => user.id),
 		createdAt: at('created_at').notNull(),
 		archivedAt: at('archived_at'),
 		version: version()
 	},
-	(t) => [uniqueIndex('campaign_slug').on(t.slug), index('campaign_list').on(t.archivedAt, t.createdAt), index('campaign_rig').on(t.rigRevisionId)]
+	(t) => [
+		uniqueIndex('campaign_slug').on(t.slug),
+		index('campaign_list').on(t.archivedAt, t.createdAt),
+		index('campaign_rig').on(t.rigRevisionId)
+	]
 );
 
 export const campaignProfile = mysqlTable(
 	'campaign_profile',
 	{
-		campaignId: int('campaign_id').notNull().references(() => campaign.id),
-		profileId: int('profile_id').notNull().references(() => profile.id),
+		campaignId: int('campaign_id')
+			.notNull()
+			.references(() => campaign.id),
+		profileId: int('profile_id')
+			.notNull()
+			.references(() => profile.id),
 		position: int('position').notNull()
 	},
-	(t) => [primaryKey({ columns: [t.campaignId, t.profileId] }), index('campaign_profile_profile').on(t.profileId)]
+	(t) => [
+		primaryKey({ columns: [t.campaignId, t.profileId] }),
+		index('campaign_profile_profile').on(t.profileId)
+	]
 );
 
 export const campaignWorkload = mysqlTable(
 	'campaign_workload',
 	{
-		campaignId: int('campaign_id').notNull().references(() => campaign.id),
-		workloadId: int('workload_id').notNull().references(() => workload.id),
+		campaignId: int('campaign_id')
+			.notNull()
+			.references(() => campaign.id),
+		workloadId: int('workload_id')
+			.notNull()
+			.references(() => workload.id),
 		position: int('position').notNull(),
 		/** Readings each cell of this column needs. */
 		repeats: int('repeats').notNull()
@@ -168,7 +235,9 @@ export const cellSignature = mysqlTable(
 		campaignId: int('campaign_id').notNull(),
 		profileId: int('profile_id').notNull(),
 		workloadId: int('workload_id').notNull(),
-		signedBy: personId('signed_by').notNull().references(() => user.id),
+		signedBy: personId('signed_by')
+			.notNull()
+			.references(() => user.id),
 		signedAt: at('signed_at').notNull(),
 		removedAt: at('removed_at'),
 		removedReason: varchar('removed_reason', { length: 300 }),
@@ -181,8 +250,16 @@ export const cellSignature = mysqlTable(
 	(t) => [
 		uniqueIndex('cell_signature_standing').on(t.standing),
 		index('cell_signature_cell').on(t.campaignId, t.profileId, t.workloadId),
-		foreignKey({ name: 'cell_signature_profile', columns: [t.campaignId, t.profileId], foreignColumns: [campaignProfile.campaignId, campaignProfile.profileId] }),
-		foreignKey({ name: 'cell_signature_workload', columns: [t.campaignId, t.workloadId], foreignColumns: [campaignWorkload.campaignId, campaignWorkload.workloadId] }),
+		foreignKey({
+			name: 'cell_signature_profile',
+			columns: [t.campaignId, t.profileId],
+			foreignColumns: [campaignProfile.campaignId, campaignProfile.profileId]
+		}),
+		foreignKey({
+			name: 'cell_signature_workload',
+			columns: [t.campaignId, t.workloadId],
+			foreignColumns: [campaignWorkload.campaignId, campaignWorkload.workloadId]
+		}),
 		check('cell_signature_removal', sql`(${t.removedAt} is null) = (${t.removedReason} is null)`)
 	]
 );
@@ -195,7 +272,9 @@ export const run = mysqlTable(
 		campaignId: int('campaign_id').notNull(),
 		profileId: int('profile_id').notNull(),
 		workloadId: int('workload_id').notNull(),
-		testerId: personId('tester_id').notNull().references(() => user.id),
+		testerId: personId('tester_id')
+			.notNull()
+			.references(() => user.id),
 		source: mysqlEnum('source', runSources).notNull(),
 		/** Given by the sender, so that the same run sent twice is taken once. */
 		clientKey: varchar('client_key', { length: 80 }),
@@ -212,8 +291,16 @@ export const run = mysqlTable(
 		index('run_workload').on(t.workloadId),
 		index('run_tester').on(t.testerId, t.createdAt),
 		uniqueIndex('run_client_key').on(t.testerId, t.clientKey),
-		foreignKey({ name: 'run_profile', columns: [t.campaignId, t.profileId], foreignColumns: [campaignProfile.campaignId, campaignProfile.profileId] }),
-		foreignKey({ name: 'run_workload_in_campaign', columns: [t.campaignId, t.workloadId], foreignColumns: [campaignWorkload.campaignId, campaignWorkload.workloadId] }),
+		foreignKey({
+			name: 'run_profile',
+			columns: [t.campaignId, t.profileId],
+			foreignColumns: [campaignProfile.campaignId, campaignProfile.profileId]
+		}),
+		foreignKey({
+			name: 'run_workload_in_campaign',
+			columns: [t.campaignId, t.workloadId],
+			foreignColumns: [campaignWorkload.campaignId, campaignWorkload.workloadId]
+		}),
 		check('run_void_has_reason', sql`(${t.voidedAt} is null) = (${t.voidReason} is null)`),
 		check('run_ambient', sql`${t.ambientC} is null or ${t.ambientC} between -60 and 100`)
 	]
@@ -224,7 +311,9 @@ export const reading = mysqlTable(
 	'reading',
 	{
 		id: bigint('id', { mode: 'number', unsigned: true }).autoincrement().primaryKey(),
-		runId: bigint('run_id', { mode: 'number', unsigned: true }).notNull().references(() => run.id),
+		runId: bigint('run_id', { mode: 'number', unsigned: true })
+			.notNull()
+			.references(() => run.id),
 		position: int('position').notNull(),
 		value: double('value').notNull(),
 		clientKey: varchar('client_key', { length: 80 }),

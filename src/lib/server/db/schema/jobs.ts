@@ -1,4 +1,14 @@
-import { bigint, index, int, json, mysqlEnum, mysqlTable, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+	bigint,
+	index,
+	int,
+	json,
+	mysqlEnum,
+	mysqlTable,
+	text,
+	uniqueIndex,
+	varchar
+} from 'drizzle-orm/mysql-core';
 import { at, mediumtext } from '../columns';
 
 export const jobStates = ['waiting', 'done', 'dead'] as const;
@@ -21,7 +31,11 @@ export const job = mysqlTable(
 		createdAt: at('created_at').notNull(),
 		finishedAt: at('finished_at')
 	},
-	(t) => [uniqueIndex('job_dedupe').on(t.dedupeKey), index('job_due').on(t.state, t.runAt), index('job_kind').on(t.kind, t.id)]
+	(t) => [
+		uniqueIndex('job_dedupe').on(t.dedupeKey),
+		index('job_due').on(t.state, t.runAt),
+		index('job_kind').on(t.kind, t.id)
+	]
 );
 
 /** The e-mail outbox: written in the transaction of what it tells, sent by a job. */

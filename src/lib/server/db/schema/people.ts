@@ -1,4 +1,16 @@
-import { bigint, boolean, index, int, json, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+	bigint,
+	boolean,
+	index,
+	int,
+	json,
+	mysqlEnum,
+	mysqlTable,
+	primaryKey,
+	text,
+	uniqueIndex,
+	varchar
+} from 'drizzle-orm/mysql-core';
 import { roles, type Role, type Scope } from '../../../domain/people/roles';
 import { at, id, mediumtext, personId, sha256, version } from '../columns';
 
@@ -23,7 +35,9 @@ export const user = mysqlTable(
 export const userRole = mysqlTable(
 	'user_role',
 	{
-		userId: personId('user_id').notNull().references(() => user.id),
+		userId: personId('user_id')
+			.notNull()
+			.references(() => user.id),
 		role: mysqlEnum('role', roles).notNull()
 	},
 	(t) => [primaryKey({ columns: [t.userId, t.role] }), index('user_role_role').on(t.role)]
@@ -33,7 +47,9 @@ export const userRole = mysqlTable(
 export const account = mysqlTable(
 	'account',
 	{
-		userId: personId('user_id').notNull().references(() => user.id, { onDelete: 'cascade' }),
+		userId: personId('user_id')
+			.notNull()
+			.references(() => user.id, { onDelete: 'cascade' }),
 		type: varchar('type', { length: 40 }).notNull(),
 		provider: varchar('provider', { length: 80 }).notNull(),
 		providerAccountId: varchar('provider_account_id', { length: 190 }).notNull(),
@@ -52,7 +68,9 @@ export const session = mysqlTable(
 	'session',
 	{
 		sessionToken: varchar('session_token', { length: 190 }).primaryKey(),
-		userId: personId('user_id').notNull().references(() => user.id, { onDelete: 'cascade' }),
+		userId: personId('user_id')
+			.notNull()
+			.references(() => user.id, { onDelete: 'cascade' }),
 		expires: at('expires').notNull()
 	},
 	(t) => [index('session_user').on(t.userId)]
@@ -76,7 +94,9 @@ export const invitation = mysqlTable(
 		name: varchar('name', { length: 160 }).notNull(),
 		roles: json('roles').$type<Role[]>().notNull(),
 		tokenHash: sha256('token_hash').notNull(),
-		invitedBy: personId('invited_by').notNull().references(() => user.id),
+		invitedBy: personId('invited_by')
+			.notNull()
+			.references(() => user.id),
 		createdAt: at('created_at').notNull(),
 		expiresAt: at('expires_at').notNull(),
 		acceptedAt: at('accepted_at'),
@@ -89,7 +109,9 @@ export const apiToken = mysqlTable(
 	'api_token',
 	{
 		id: id(),
-		userId: personId('user_id').notNull().references(() => user.id),
+		userId: personId('user_id')
+			.notNull()
+			.references(() => user.id),
 		name: varchar('name', { length: 120 }).notNull(),
 		tokenHash: sha256('token_hash').notNull(),
 		scopes: json('scopes').$type<Scope[]>().notNull(),
@@ -104,7 +126,9 @@ export const apiToken = mysqlTable(
 export const idempotencyKey = mysqlTable(
 	'idempotency_key',
 	{
-		userId: personId('user_id').notNull().references(() => user.id),
+		userId: personId('user_id')
+			.notNull()
+			.references(() => user.id),
 		key: varchar('key', { length: 190 }).notNull(),
 		method: varchar('method', { length: 10 }).notNull(),
 		path: varchar('path', { length: 500 }).notNull(),
@@ -132,7 +156,11 @@ export const auditEvent = mysqlTable(
 		after: json('after').$type<unknown>(),
 		reason: text('reason')
 	},
-	(t) => [index('audit_subject').on(t.subjectKind, t.subjectId, t.id), index('audit_at').on(t.at), index('audit_actor').on(t.actorId, t.id)]
+	(t) => [
+		index('audit_subject').on(t.subjectKind, t.subjectId, t.id),
+		index('audit_at').on(t.at),
+		index('audit_actor').on(t.actorId, t.id)
+	]
 );
 
 export const setting = mysqlTable('setting', {

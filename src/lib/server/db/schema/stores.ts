@@ -1,5 +1,18 @@
 import { sql } from 'drizzle-orm';
-import { bigint, check, date, index, int, json, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+	bigint,
+	check,
+	date,
+	index,
+	int,
+	json,
+	mysqlEnum,
+	mysqlTable,
+	primaryKey,
+	text,
+	uniqueIndex,
+	varchar
+} from 'drizzle-orm/mysql-core';
 import { embargoFields, loanStages, partKinds, provenances } from '../../../domain/stores/words';
 import { at, currency, id, personId, slug, version } from '../columns';
 import { user } from './people';
@@ -31,7 +44,9 @@ export const partPrice = mysqlTable(
 	'part_price',
 	{
 		id: id(),
-		partId: int('part_id').notNull().references(() => part.id),
+		partId: int('part_id')
+			.notNull()
+			.references(() => part.id),
 		amountMinor: bigint('amount_minor', { mode: 'number' }).notNull(),
 		currency: currency().notNull(),
 		observedOn: date('observed_on', { mode: 'string' }).notNull(),
@@ -50,7 +65,9 @@ export const sample = mysqlTable(
 	{
 		id: id(),
 		slug: slug(),
-		partId: int('part_id').notNull().references(() => part.id),
+		partId: int('part_id')
+			.notNull()
+			.references(() => part.id),
 		serial: varchar('serial', { length: 120 }).notNull().default(''),
 		provenance: mysqlEnum('provenance', provenances).notNull(),
 		condition: varchar('condition', { length: 300 }).notNull().default(''),
@@ -80,7 +97,9 @@ export const loan = mysqlTable(
 	'loan',
 	{
 		id: id(),
-		partnerId: int('partner_id').notNull().references(() => partner.id),
+		partnerId: int('partner_id')
+			.notNull()
+			.references(() => partner.id),
 		stage: mysqlEnum('stage', loanStages).notNull(),
 		askedOn: date('asked_on', { mode: 'string' }),
 		receivedOn: date('received_on', { mode: 'string' }),
@@ -91,7 +110,9 @@ export const loan = mysqlTable(
 		disclosure: text('disclosure').notNull(),
 		valueMinor: bigint('value_minor', { mode: 'number' }),
 		currency: currency(),
-		createdBy: personId('created_by').notNull().references(() => user.id),
+		createdBy: personId('created_by')
+			.notNull()
+			.references(() => user.id),
 		createdAt: at('created_at').notNull(),
 		version: version()
 	},
@@ -99,15 +120,22 @@ export const loan = mysqlTable(
 		index('loan_partner').on(t.partnerId),
 		index('loan_due').on(t.stage, t.dueOn),
 		check('loan_value_has_currency', sql`(${t.valueMinor} is null) = (${t.currency} is null)`),
-		check('loan_due_after_receipt', sql`${t.dueOn} is null or ${t.receivedOn} is null or ${t.dueOn} >= ${t.receivedOn}`)
+		check(
+			'loan_due_after_receipt',
+			sql`${t.dueOn} is null or ${t.receivedOn} is null or ${t.dueOn} >= ${t.receivedOn}`
+		)
 	]
 );
 
 export const loanSample = mysqlTable(
 	'loan_sample',
 	{
-		loanId: int('loan_id').notNull().references(() => loan.id),
-		sampleId: int('sample_id').notNull().references(() => sample.id)
+		loanId: int('loan_id')
+			.notNull()
+			.references(() => loan.id),
+		sampleId: int('sample_id')
+			.notNull()
+			.references(() => sample.id)
 	},
 	(t) => [primaryKey({ columns: [t.loanId, t.sampleId] }), index('loan_sample_sample').on(t.sampleId)]
 );
@@ -116,7 +144,9 @@ export const embargo = mysqlTable(
 	'embargo',
 	{
 		id: id(),
-		sampleId: int('sample_id').notNull().references(() => sample.id),
+		sampleId: int('sample_id')
+			.notNull()
+			.references(() => sample.id),
 		loanId: int('loan_id').references(() => loan.id),
 		field: mysqlEnum('field', embargoFields).notNull(),
 		until: at('until').notNull(),
@@ -137,7 +167,9 @@ export const embargo = mysqlTable(
 export const loanReminder = mysqlTable(
 	'loan_reminder',
 	{
-		loanId: int('loan_id').notNull().references(() => loan.id),
+		loanId: int('loan_id')
+			.notNull()
+			.references(() => loan.id),
 		/** Which reminder, such as before-14, due, late-7. */
 		kind: varchar('kind', { length: 30 }).notNull(),
 		dueOn: date('due_on', { mode: 'string' }).notNull(),

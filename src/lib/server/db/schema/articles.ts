@@ -45,6 +45,9 @@ export const article = mysqlTable(
 		firstPublishedAt: at('first_published_at'),
 		withdrawnAt: at('withdrawn_at'),
 		withdrawReason: text('withdraw_reason'),
+		/** What readers will be told when the next edition of a printed article goes out; kept here until then. */
+		nextCorrectionKind: mysqlEnum('next_correction_kind', correctionKinds),
+		nextCorrectionBody: text('next_correction_body'),
 		createdAt: at('created_at').notNull(),
 		updatedAt: at('updated_at').notNull(),
 		version: version()
@@ -63,7 +66,11 @@ export const article = mysqlTable(
 			'article_published',
 			sql`${t.stage} <> 'published' or (${t.liveEditionId} is not null and ${t.firstPublishedAt} is not null)`
 		),
-		check('article_withdrawn', sql`(${t.withdrawnAt} is null) = (${t.withdrawReason} is null)`)
+		check('article_withdrawn', sql`(${t.withdrawnAt} is null) = (${t.withdrawReason} is null)`),
+		check(
+			'article_next_correction',
+			sql`(${t.nextCorrectionKind} is null) = (${t.nextCorrectionBody} is null)`
+		)
 	]
 );
 

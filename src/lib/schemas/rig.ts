@@ -1,0 +1,44 @@
+import { z } from 'zod';
+import { line, optionalSlug, paragraphs, reference, versionSeen } from './fields';
+
+const name = line(160).min(1, 'A rig needs a name.');
+
+const revisionFields = {
+	/** Slugs or ids, in the order the parts list prints them. */
+	samples: z
+		.array(reference('Choose a sample.'))
+		.min(1, 'Choose the samples that the rig is made of.')
+		.max(60, 'A rig has at most 60 samples.')
+		.refine((refs) => new Set(refs).size === refs.length, 'A sample is in a rig once.'),
+	firmware: line(160).default(''),
+	driver: line(160).default(''),
+	os: line(160).default('')
+};
+
+/** A rig with its first revision. Its profile tree starts with stock. */
+export const rigInput = z.object({ name, slug: optionalSlug, ...revisionFields });
+export type RigInput = z.output<typeof rigInput>;
+export type RigTyped = z.input<typeof rigInput>;
+
+/** The next revision of a rig: what it is now, and what changed, in words. */
+export const rigRevise = z.object({
+	version: versionSeen,
+	...revisionFields,
+	change: paragraphs(2000).min(1, 'Say what changed: readers of old results will ask.')
+});
+export type RigRevise = z.output<typeof rigRevise>;
+export type RigReviseTyped = z.input<typeof rigRevise>;
+
+/** A correction of the newest revision while nothing was measured on it. */
+export const rigCorrect = z.object({ version: versionSeen, name, ...revisionFields });
+export type RigCorrect = z.output<typeof rigCorrect>;
+export type RigCorrectTyped = z.input<typeof rigCorrect>;
+
+export const blankRig = (): RigTyped => ({
+	name: '',
+	slug: '',
+	samples: [],
+	firmware: '',
+	driver: '',
+	os: ''
+});

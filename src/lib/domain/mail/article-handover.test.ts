@@ -55,7 +55,7 @@ describe('hand-over mails', () => {
 	it('tells the liaison title and link alone', () => {
 		for (const letter of [letters.publishedForLiaison, letters.withdrawnForLiaison]) {
 			expect(letter.textBody).toContain(facts.publicHref);
-			expect(letter.textBody).not.toContain('/desk');
+			expect(letter.textBody).not.toContain('/desk/articles');
 			expect(letter.textBody).not.toContain('readings');
 		}
 	});

@@ -1,5 +1,5 @@
 import { mean, sampleVariance } from 'simple-statistics';
-import type { Comparison, Verdict } from '../figures';
+import type { Comparison, Summary, Verdict } from '../figures';
 import type { Direction } from '../words';
 import { studentQuantile, twoSidedP } from './interval';
 
@@ -62,6 +62,31 @@ function judge(
 	return 'not-enough';
 }
 
+const sideOf = ({ n, mean: average, sd }: Summary): Side => ({
+	mean: average,
+	varianceOfMean: sd === null ? null : sd ** 2 / n,
+	df: n - 1
+});
+
+function compareSides(
+	ours: Side,
+	theirs: Side,
+	better: Direction,
+	leastDifferencePercent: number
+): Comparison {
+	if (!(ours.mean > 0 && theirs.mean > 0)) throw new RangeError('A ratio needs means above zero.');
+	const [top, bottom] = better === 'higher' ? [ours, theirs] : [theirs, ours];
+	const ratio = top.mean / bottom.mean;
+	const ci95 = fieller(top, bottom, 0.95);
+	return {
+		ratio,
+		ci95,
+		gainPercent: (ratio - 1) * 100,
+		gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100],
+		verdict: judge(ci95, fieller(top, bottom, 0.9), leastDifferencePercent / 100)
+	};
+}
+
 /**
  * A cell against its baseline: the ratio of means, turned so that above 1 is better, with Fieller's
  * 95 % interval and a verdict. *Better* or *worse*: the 95 % interval lies wholly beyond the band of what
@@ -75,20 +100,19 @@ export function compareCells(
 	better: Direction,
 	leastDifferencePercent: number
 ): Comparison {
-	const ours = side(subject);
-	const theirs = side(baseline);
-	if (!(ours.mean > 0 && theirs.mean > 0)) throw new RangeError('A ratio needs means above zero.');
-	const [top, bottom] = better === 'higher' ? [ours, theirs] : [theirs, ours];
-	const ratio = top.mean / bottom.mean;
-	const ci95 = fieller(top, bottom, 0.95);
-	return {
-		ratio,
-		ci95,
-		gainPercent: (ratio - 1) * 100,
-		gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100],
-		verdict: judge(ci95, fieller(top, bottom, 0.9), leastDifferencePercent / 100)
-	};
+	return compareSides(side(subject), side(baseline), better, leastDifferencePercent);
 }
+
+/**
+ * The same comparison from summaries, for two profiles of which neither is the campaign's baseline.
+ * RangeError for a mean that is not above zero.
+ */
+export const compareSummaries = (
+	subject: Summary,
+	baseline: Summary,
+	better: Direction,
+	leastDifferencePercent: number
+): Comparison => compareSides(sideOf(subject), sideOf(baseline), better, leastDifferencePercent);
 
 export interface WelchTest {
 	/** Mean of the first minus mean of the second, in the unit of the readings. */

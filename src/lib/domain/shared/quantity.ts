@@ -127,9 +127,3 @@ export const printedPercent = (percent: number, decimals = 1): string =>
 
 /** A ratio, three decimals. @example printedRatio(1.0752429725) === '1.075' */
 export const printedRatio = (ratio: number): string => printed(ratio, { decimals: 3 });
-
-/** An amount of money from minor units and its ISO 4217 code. @example printedMoney(68900, 'USD') === 'US$689.00' */
-export function printedMoney(amountMinor: number, currency: string): string {
-	const format = new Intl.NumberFormat('en-GB', { style: 'currency', currency });
-	return format.format(amountMinor / 10 ** (format.resolvedOptions().maximumFractionDigits ?? 2));
-}

@@ -284,7 +284,8 @@ export const run = mysqlTable(
 		createdAt: at('created_at').notNull(),
 		voidedAt: at('voided_at'),
 		voidedBy: personId('voided_by').references(() => user.id),
-		voidReason: varchar('void_reason', { length: 500 })
+		voidReason: varchar('void_reason', { length: 500 }),
+		version: version()
 	},
 	(t) => [
 		index('run_cell').on(t.campaignId, t.profileId, t.workloadId, t.id),

@@ -1,0 +1,1 @@
+ALTER TABLE `run` ADD `version` int DEFAULT 1 NOT NULL;

@@ -1,5 +1,6 @@
 import { sequence } from '@sveltejs/kit/hooks';
 import { authHandle } from '$lib/server/auth/auth';
 import { identify } from '$lib/server/auth/identify';
+import { apiProblems } from '$lib/server/http/api-problems';
 
-export const handle = sequence(authHandle, identify);
+export const handle = sequence(authHandle, identify, apiProblems);

@@ -6,7 +6,7 @@ import { database } from '../app';
 import { clock } from '../clock';
 import type { Context, OpenContext } from '../context';
 import { env } from '../env';
-import { problem, statusOf } from './problem';
+import { notSignedIn, problem, statusOf } from './problem';
 
 /** The act a handler needs, or that it is open to all; read by the test that walks every route. */
 export type Need = Act | 'public';
@@ -56,8 +56,7 @@ export const guardedApi = <E extends RequestEvent>(
 ) =>
 	mark(need, async (event: E): Promise<Response> => {
 		const context = openContext(event);
-		if (!context.actor)
-			return problem(401, 'Not signed in', 'Send a personal token: Authorization: Bearer …');
+		if (!context.actor) return notSignedIn();
 		if (!couldEver(context.actor, need))
 			return problem(403, 'Not allowed', 'Your roles, or the scopes of this token, do not include this.');
 		return handler(event, context as Context);

@@ -32,3 +32,14 @@ export const problemFrom = (refusal: Refusal): Response =>
 		...(refusal.fields ? { errors: refusal.fields } : {}),
 		...(refusal.detail === undefined ? {} : { context: refusal.detail })
 	});
+
+/** 401 for a script, which must send a token. */
+export function notSignedIn(): Response {
+	const response = problem(
+		401,
+		'Not signed in',
+		'Send a personal token that has not run out: Authorization: Bearer calipress_…'
+	);
+	response.headers.set('www-authenticate', 'Bearer');
+	return response;
+}

@@ -1,0 +1,145 @@
+import { z } from 'zod';
+import { policy, type Act } from '../../domain/people/policy';
+import { scopes } from '../../domain/people/roles';
+import { jsonLimitBytes } from './body';
+
+/** One operation of the API, told by the schemas that check it. */
+export interface Described {
+	method: 'get' | 'post' | 'put' | 'patch' | 'delete';
+	/** As in the address, parameters in braces: `/api/v1/campaigns/{campaign}/runs`. */
+	path: string;
+	act: Act | 'public';
+	summary: string;
+	/** What the API reads from JSON. */
+	body?: z.ZodType;
+	/** An object schema of the query string. */
+	query?: z.ZodObject;
+	response: z.ZodType;
+	/** Of a success; 200 when left out. */
+	status?: number;
+}
+
+/** Declares an operation; a plain value, so that the description is data. */
+export const describe = (operation: Described): Described => operation;
+
+type Json = Record<string, unknown>;
+
+const jsonSchema = (schema: z.ZodType, io: 'input' | 'output'): Json => {
+	const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
+		io,
+		target: 'draft-2020-12',
+		unrepresentable: 'any'
+	});
+	return rest;
+};
+
+const content = (schema: Json, type = 'application/json') => ({ [type]: { schema } });
+const problemRef = (description: string) => ({
+	description,
+	content: content({ $ref: '#/components/schemas/Problem' }, 'application/problem+json')
+});
+
+const pathParameters = (path: string) =>
+	[...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => ({
+		name,
+		in: 'path',
+		required: true,
+		description: 'The slug, or the number, of the row.',
+		schema: { type: 'string' }
+	}));
+
+function queryParameters(query: z.ZodObject | undefined) {
+	if (!query) return [];
+	const { properties = {}, required = [] } = jsonSchema(query, 'input') as {
+		properties?: Record<string, Json>;
+		required?: string[];
+	};
+	return Object.entries(properties).map(([name, schema]) => ({
+		name,
+		in: 'query',
+		required: required.includes(name),
+		schema
+	}));
+}
+
+const idempotencyHeader = {
+	name: 'Idempotency-Key',
+	in: 'header',
+	required: false,
+	description: 'The same key with the same body has its effect once; kept for 24 hours.',
+	schema: { type: 'string', maxLength: 190 }
+};
+
+function responsesOf({ method, act, body, query, path, response, status = 200 }: Described) {
+	const writes = body !== undefined || method !== 'get';
+	return {
+		[status]: { description: 'Done.', content: content(jsonSchema(response, 'output')) },
+		...(act === 'public'
+			? {}
+			: { 401: problemRef('No valid token.'), 403: problemRef('Roles or scopes do not include it.') }),
+		...(path.includes('{') ? { 404: problemRef('There is no such row.') } : {}),
+		...(writes
+			? { 400: problemRef('Not JSON.'), 409: problemRef('Conflict.'), 413: problemRef('Too large.') }
+			: {}),
+		...(writes || query ? { 422: problemRef('Not accepted; `errors` says why, by field.') } : {})
+	};
+}
+
+const scopeOf = (act: Act) => ('scope' in policy[act] ? policy[act].scope : undefined);
+
+function operationOf(described: Described) {
+	const { method, path, act, summary, body, query } = described;
+	const scope = act === 'public' ? undefined : scopeOf(act);
+	return {
+		operationId: `${method} ${path.replace('/api/v1', '')}`.replace(/\W+(\w?)/g, (_, next: string) =>
+			next.toUpperCase()
+		),
+		summary,
+		...(scope ? { description: `Needs the scope \`${scope}\`.` } : {}),
+		security: act === 'public' ? [] : [{ token: [] }],
+		parameters: [
+			...pathParameters(path),
+			...queryParameters(query),
+			...(method === 'post' ? [idempotencyHeader] : [])
+		],
+		...(body ? { requestBody: { required: true, content: content(jsonSchema(body, 'input')) } } : {}),
+		responses: responsesOf(described)
+	};
+}
+
+const problemSchema = {
+	type: 'object',
+	description: 'RFC 9457.',
+	required: ['type', 'title', 'status', 'detail'],
+	properties: {
+		type: { type: 'string' },
+		title: { type: 'string' },
+		status: { type: 'integer' },
+		detail: { type: 'string' },
+		errors: { type: 'object', additionalProperties: { type: 'array', items: { type: 'string' } } }
+	}
+};
+
+/** The OpenAPI 3.1 document of what is described, made from the schemas that check it. */
+export function openApi(operations: Described[], origin: string) {
+	const paths: Record<string, Json> = {};
+	for (const operation of operations) {
+		(paths[operation.path] ??= {})[operation.method] = operationOf(operation);
+	}
+	return {
+		openapi: '3.1.0',
+		info: {
+			title: 'Calipress',
+			version: '1',
+			description: `The bench, for scripts. Errors are problem documents (RFC 9457). A JSON body has at most ${jsonLimitBytes / 1e6} MB. Scopes: ${scopes.join(', ')}.`
+		},
+		servers: [{ url: origin }],
+		paths,
+		components: {
+			schemas: { Problem: problemSchema },
+			securitySchemes: {
+				token: { type: 'http', scheme: 'bearer', description: 'A personal token, made on your own page.' }
+			}
+		}
+	};
+}

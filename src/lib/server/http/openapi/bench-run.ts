@@ -1,0 +1,3 @@
+import type { Described } from '../openapi';
+
+export const benchRun: Described[] = [];

@@ -11,7 +11,7 @@ import {
 } from 'drizzle-orm/mysql-core';
 import { at, mediumtext } from '../columns';
 
-export const jobStates = ['waiting', 'done', 'dead'] as const;
+export const jobStates = ['waiting', 'done', 'dead', 'dropped'] as const;
 
 export const job = mysqlTable(
 	'job',

@@ -1,0 +1,1 @@
+ALTER TABLE `job` MODIFY COLUMN `state` enum('waiting','done','dead','dropped') NOT NULL DEFAULT 'waiting';

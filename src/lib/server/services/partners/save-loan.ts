@@ -25,7 +25,7 @@ export async function askForLoan(ctx: Context, partnerSlug: string, input: LoanI
 	return inTransaction(ctx.db, async (tx) => {
 		const partner = await partners.bySlug(tx, partnerSlug);
 		if (!partner) return refuse('not_found', 'There is no such partner.');
-		const found = await samples.bySlugs(tx, input.samples);
+		const found = await samples.byRefs(tx, input.samples);
 		const missing = input.samples.filter((slug) => !found.some((sample) => sample.slug === slug));
 		if (missing.length > 0) return refuse('invalid', `There is no sample ${missing.join(', ')}.`, { fields: { samples: [`There is no sample ${missing.join(', ')}.`] } });
 		const { terms, disclosure, askedOn, dueOn } = input;

@@ -30,14 +30,18 @@ const plain = (name: string): string => name.trim().toLowerCase().slice(0, 120);
 export function nearest(typed: string, names: readonly string[], most = 3): string[] {
 	const wanted = plain(typed);
 	if (wanted === '') return [];
+	const steps = (name: string): number => {
+		const candidate = plain(name);
+		const enough = Math.max(2, Math.ceil(Math.max(wanted.length, candidate.length) * 0.4));
+		if (candidate.includes(wanted) || (candidate.length > 2 && wanted.includes(candidate))) return 1;
+		if (Math.abs(candidate.length - wanted.length) > enough) return Infinity;
+		const found = distance(wanted, candidate);
+		return found <= enough ? found : Infinity;
+	};
 	return names
-		.map((name) => {
-			const candidate = plain(name);
-			const contained = candidate.includes(wanted) || (candidate.length > 2 && wanted.includes(candidate));
-			return { name, steps: contained ? 1 : distance(wanted, candidate) };
-		})
-		.filter(({ name, steps }) => steps <= Math.max(2, Math.ceil(Math.max(wanted.length, name.length) * 0.4)))
+		.map((name) => ({ name, steps: steps(name) }))
+		.filter((item) => item.steps < Infinity)
 		.sort((a, b) => a.steps - b.steps)
 		.slice(0, most)
-		.map(({ name }) => name);
+		.map((item) => item.name);
 }

@@ -36,7 +36,10 @@ export const loanInput = z
 		value: amount,
 		currency
 	})
-	.refine((loan) => (loan.value === '') === (loan.currency === ''), { path: ['currency'], message: 'A value needs its currency, and a currency its value.' });
+	.refine((loan) => (loan.value === '') === (loan.currency === ''), {
+		path: ['currency'],
+		message: 'A value needs its currency, and a currency its value.'
+	});
 export type LoanInput = z.output<typeof loanInput>;
 
 export const loanEdit = z
@@ -48,7 +51,10 @@ export const loanEdit = z
 		value: amount,
 		currency
 	})
-	.refine((loan) => (loan.value === '') === (loan.currency === ''), { path: ['currency'], message: 'A value needs its currency, and a currency its value.' });
+	.refine((loan) => (loan.value === '') === (loan.currency === ''), {
+		path: ['currency'],
+		message: 'A value needs its currency, and a currency its value.'
+	});
 export type LoanEdit = z.output<typeof loanEdit>;
 
 export const loanMoveInput = z.object({

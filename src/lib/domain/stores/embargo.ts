@@ -13,10 +13,19 @@ export interface EmbargoTerm {
  * Every way out asks this one function.
  * @example holds({ field: 'results', until, liftedAt: null }, new Date(until.getTime() - 1)) // true
  */
-export const holds = (embargo: EmbargoTerm, at: Date): boolean => embargo.liftedAt === null && at.getTime() < embargo.until.getTime();
+export const holds = (embargo: EmbargoTerm, at: Date): boolean =>
+	embargo.liftedAt === null && at.getTime() < embargo.until.getTime();
 
 /** The embargoes that still hold at a moment, the longest first; `field` 'everything' covers the others. */
-export const holding = <E extends EmbargoTerm>(embargoes: readonly E[], at: Date, field?: EmbargoField): E[] =>
+export const holding = <E extends EmbargoTerm>(
+	embargoes: readonly E[],
+	at: Date,
+	field?: EmbargoField
+): E[] =>
 	embargoes
-		.filter((embargo) => holds(embargo, at) && (field === undefined || embargo.field === field || embargo.field === 'everything'))
+		.filter(
+			(embargo) =>
+				holds(embargo, at) &&
+				(field === undefined || embargo.field === field || embargo.field === 'everything')
+		)
 		.sort((a, b) => b.until.getTime() - a.until.getTime());

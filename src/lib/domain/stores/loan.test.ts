@@ -4,11 +4,14 @@ import { loanStages } from './words';
 
 describe('the way of a loan', () => {
 	it('goes from asking to returning in the order of the trade', () => {
-		const way = (['promise', 'send', 'receive', 'send-back', 'return'] as const).reduce((stage, move) => {
-			const next = afterMove(stage, move);
-			if (!next) throw new Error(`${move} is not open at ${stage}`);
-			return next;
-		}, loanStages[0] as (typeof loanStages)[number]);
+		const way = (['promise', 'send', 'receive', 'send-back', 'return'] as const).reduce(
+			(stage, move) => {
+				const next = afterMove(stage, move);
+				if (!next) throw new Error(`${move} is not open at ${stage}`);
+				return next;
+			},
+			loanStages[0] as (typeof loanStages)[number]
+		);
 		expect(way).toBe('returned');
 	});
 
@@ -17,7 +20,8 @@ describe('the way of a loan', () => {
 	});
 
 	it('cannot be returned before it was here', () => {
-		for (const stage of ['asked-for', 'promised', 'in-transit'] as const) expect(afterMove(stage, 'return')).toBeNull();
+		for (const stage of ['asked-for', 'promised', 'in-transit'] as const)
+			expect(afterMove(stage, 'return')).toBeNull();
 		expect(loanMoves).toHaveLength(7);
 	});
 });

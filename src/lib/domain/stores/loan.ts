@@ -37,10 +37,12 @@ export const loanStageWords: Record<LoanStage, string> = {
 };
 
 /** The stage a move leads to, or null where the move is not open. @example afterMove('here', 'send-back') // 'going-back' */
-export const afterMove = (stage: LoanStage, move: LoanMove): LoanStage | null => loanTransitions[stage][move] ?? null;
+export const afterMove = (stage: LoanStage, move: LoanMove): LoanStage | null =>
+	loanTransitions[stage][move] ?? null;
 
 /** The moves open at a stage, in the table's order. */
-export const openMoves = (stage: LoanStage): LoanMove[] => loanMoves.filter((move) => move in loanTransitions[stage]);
+export const openMoves = (stage: LoanStage): LoanMove[] =>
+	loanMoves.filter((move) => move in loanTransitions[stage]);
 
 /** Stages in which the sample is, or may soon be, in our hands and has to go back. */
 export const owedStages: readonly LoanStage[] = ['here', 'going-back'];

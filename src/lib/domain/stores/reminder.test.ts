@@ -21,8 +21,14 @@ describe('the reminder a loan calls for', () => {
 	});
 
 	it('counts calendar days over the nights when clocks change', () => {
-		expect(dueReminder('2027-03-30', new Date('2027-03-27T12:00:00Z'), 'Europe/Oslo')).toEqual({ kind: 'before-3', daysLeft: 3 });
-		expect(dueReminder('2027-10-26', new Date('2027-10-23T12:00:00Z'), 'Europe/Oslo')).toEqual({ kind: 'before-3', daysLeft: 3 });
+		expect(dueReminder('2027-03-30', new Date('2027-03-27T12:00:00Z'), 'Europe/Oslo')).toEqual({
+			kind: 'before-3',
+			daysLeft: 3
+		});
+		expect(dueReminder('2027-10-26', new Date('2027-10-23T12:00:00Z'), 'Europe/Oslo')).toEqual({
+			kind: 'before-3',
+			daysLeft: 3
+		});
 	});
 
 	it('refuses what is no date', () => {

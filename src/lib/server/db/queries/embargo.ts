@@ -5,7 +5,18 @@ import { embargo, part, sample } from '../schema';
 /** Embargoes that came with a loan, with the sample each is on. */
 export const ofLoan = (db: Db, loanId: number) =>
 	db
-		.select({ id: embargo.id, field: embargo.field, until: embargo.until, note: embargo.note, liftedAt: embargo.liftedAt, liftReason: embargo.liftReason, sampleId: embargo.sampleId, sampleSlug: sample.slug, maker: part.maker, model: part.model })
+		.select({
+			id: embargo.id,
+			field: embargo.field,
+			until: embargo.until,
+			note: embargo.note,
+			liftedAt: embargo.liftedAt,
+			liftReason: embargo.liftReason,
+			sampleId: embargo.sampleId,
+			sampleSlug: sample.slug,
+			maker: part.maker,
+			model: part.model
+		})
 		.from(embargo)
 		.innerJoin(sample, eq(sample.id, embargo.sampleId))
 		.innerJoin(part, eq(part.id, sample.partId))
@@ -14,9 +25,12 @@ export const ofLoan = (db: Db, loanId: number) =>
 
 /** Embargoes on several samples, lifted ones included. */
 export const ofSamples = (db: Db, sampleIds: number[]) =>
-	sampleIds.length === 0 ? Promise.resolve([]) : db.select().from(embargo).where(inArray(embargo.sampleId, sampleIds)).orderBy(asc(embargo.until));
+	sampleIds.length === 0
+		? Promise.resolve([])
+		: db.select().from(embargo).where(inArray(embargo.sampleId, sampleIds)).orderBy(asc(embargo.until));
 
-export const lock = async (db: Db, id: number) => (await db.select().from(embargo).where(eq(embargo.id, id)).for('update'))[0];
+export const lock = async (db: Db, id: number) =>
+	(await db.select().from(embargo).where(eq(embargo.id, id)).for('update'))[0];
 
 export async function insert(db: Db, row: typeof embargo.$inferInsert): Promise<number> {
 	const [created] = await db.insert(embargo).values(row).$returningId();

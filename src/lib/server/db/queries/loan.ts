@@ -12,12 +12,24 @@ export interface LoanFilter {
 }
 
 const matching = ({ partnerId, stages }: Pick<LoanFilter, 'partnerId' | 'stages'>): SQL | undefined =>
-	and(partnerId === undefined ? undefined : eq(loan.partnerId, partnerId), stages?.length ? inArray(loan.stage, stages) : undefined);
+	and(
+		partnerId === undefined ? undefined : eq(loan.partnerId, partnerId),
+		stages?.length ? inArray(loan.stage, stages) : undefined
+	);
 
 /** Loans with their partner, the soonest due first. */
 export const list = (db: Db, filter: LoanFilter) =>
 	db
-		.select({ id: loan.id, stage: loan.stage, askedOn: loan.askedOn, receivedOn: loan.receivedOn, dueOn: loan.dueOn, closedOn: loan.closedOn, partnerName: partner.name, partnerSlug: partner.slug })
+		.select({
+			id: loan.id,
+			stage: loan.stage,
+			askedOn: loan.askedOn,
+			receivedOn: loan.receivedOn,
+			dueOn: loan.dueOn,
+			closedOn: loan.closedOn,
+			partnerName: partner.name,
+			partnerSlug: partner.slug
+		})
 		.from(loan)
 		.innerJoin(partner, eq(partner.id, loan.partnerId))
 		.where(matching(filter))
@@ -30,7 +42,17 @@ export const samplesOf = (db: Db, loanIds: number[]) =>
 	loanIds.length === 0
 		? Promise.resolve([])
 		: db
-				.select({ loanId: loanSample.loanId, sampleId: sample.id, slug: sample.slug, serial: sample.serial, condition: sample.condition, place: sample.place, maker: part.maker, model: part.model, partSlug: part.slug })
+				.select({
+					loanId: loanSample.loanId,
+					sampleId: sample.id,
+					slug: sample.slug,
+					serial: sample.serial,
+					condition: sample.condition,
+					place: sample.place,
+					maker: part.maker,
+					model: part.model,
+					partSlug: part.slug
+				})
 				.from(loanSample)
 				.innerJoin(sample, eq(sample.id, loanSample.sampleId))
 				.innerJoin(part, eq(part.id, sample.partId))
@@ -40,7 +62,13 @@ export const samplesOf = (db: Db, loanIds: number[]) =>
 export const byId = async (db: Db, id: number) =>
 	(
 		await db
-			.select({ loan, partnerName: partner.name, partnerSlug: partner.slug, contactName: partner.contactName, contactEmail: partner.contactEmail })
+			.select({
+				loan,
+				partnerName: partner.name,
+				partnerSlug: partner.slug,
+				contactName: partner.contactName,
+				contactEmail: partner.contactEmail
+			})
 			.from(loan)
 			.innerJoin(partner, eq(partner.id, loan.partnerId))
 			.where(eq(loan.id, id))
@@ -48,7 +76,8 @@ export const byId = async (db: Db, id: number) =>
 	)[0];
 
 /** The loan row, locked until the transaction ends. */
-export const lock = async (db: Db, id: number) => (await db.select().from(loan).where(eq(loan.id, id)).for('update'))[0];
+export const lock = async (db: Db, id: number) =>
+	(await db.select().from(loan).where(eq(loan.id, id)).for('update'))[0];
 
 export async function insert(db: Db, row: typeof loan.$inferInsert, sampleIds: number[]): Promise<number> {
 	const [created] = await db.insert(loan).values(row).$returningId();
@@ -58,7 +87,12 @@ export async function insert(db: Db, row: typeof loan.$inferInsert, sampleIds: n
 }
 
 /** Writes an edit over the version it saw; false when somebody else was faster. */
-export async function update(db: Db, id: number, version: number, change: Partial<typeof loan.$inferInsert>): Promise<boolean> {
+export async function update(
+	db: Db,
+	id: number,
+	version: number,
+	change: Partial<typeof loan.$inferInsert>
+): Promise<boolean> {
 	const [result] = await db
 		.update(loan)
 		.set({ ...change, version: version + 1 })
@@ -76,12 +110,20 @@ export const dueBy = (db: Db, date: string) =>
 		.orderBy(asc(loan.dueOn));
 
 /** Marks reminders as given; of those asked for, returns only the ones that were not given before. */
-export async function claimReminders(db: Db, wanted: { loanId: number; kind: string; dueOn: string; sentAt: Date }[]) {
+export async function claimReminders(
+	db: Db,
+	wanted: { loanId: number; kind: string; dueOn: string; sentAt: Date }[]
+) {
 	if (wanted.length === 0) return [];
 	const given = await db
 		.select({ loanId: loanReminder.loanId, kind: loanReminder.kind, dueOn: loanReminder.dueOn })
 		.from(loanReminder)
-		.where(inArray(loanReminder.loanId, wanted.map((w) => w.loanId)))
+		.where(
+			inArray(
+				loanReminder.loanId,
+				wanted.map((w) => w.loanId)
+			)
+		)
 		.for('update');
 	const seen = new Set(given.map((g) => `${g.loanId}/${g.kind}/${g.dueOn}`));
 	const fresh = wanted.filter((w) => !seen.has(`${w.loanId}/${w.kind}/${w.dueOn}`));

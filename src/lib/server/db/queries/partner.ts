@@ -11,7 +11,8 @@ export interface PartnerFilter {
 	offset: number;
 }
 
-const matching = (text: string): SQL | undefined => (text ? or(like(partner.name, `%${text}%`), like(partner.contactName, `%${text}%`)) : undefined);
+const matching = (text: string): SQL | undefined =>
+	text ? or(like(partner.name, `%${text}%`), like(partner.contactName, `%${text}%`)) : undefined;
 const owed = sql`sum(case when ${inArray(loan.stage, [...owedStages])} then 1 else 0 end)`;
 
 /** Partners by name, with how many loans are open and how many of them overdue. */
@@ -25,7 +26,10 @@ export const list = (db: Db, { text, today, limit, offset }: PartnerFilter) =>
 			contactEmail: partner.contactEmail,
 			loans: count(loan.id),
 			owed: sql<number>`coalesce(${owed}, 0)`.mapWith(Number),
-			overdue: sql<number>`coalesce(sum(case when ${and(inArray(loan.stage, [...owedStages]), lt(loan.dueOn, today))} then 1 else 0 end), 0)`.mapWith(Number)
+			overdue:
+				sql<number>`coalesce(sum(case when ${and(inArray(loan.stage, [...owedStages]), lt(loan.dueOn, today))} then 1 else 0 end), 0)`.mapWith(
+					Number
+				)
 		})
 		.from(partner)
 		.leftJoin(loan, eq(loan.partnerId, partner.id))
@@ -38,7 +42,8 @@ export const list = (db: Db, { text, today, limit, offset }: PartnerFilter) =>
 export const countMatching = async (db: Db, text: string): Promise<number> =>
 	(await db.select({ n: count() }).from(partner).where(matching(text)))[0]?.n ?? 0;
 
-export const bySlug = async (db: Db, slug: string) => (await db.select().from(partner).where(eq(partner.slug, slug)).limit(1))[0];
+export const bySlug = async (db: Db, slug: string) =>
+	(await db.select().from(partner).where(eq(partner.slug, slug)).limit(1))[0];
 
 export async function insert(db: Db, row: typeof partner.$inferInsert): Promise<number> {
 	const [created] = await db.insert(partner).values(row).$returningId();
@@ -47,7 +52,12 @@ export async function insert(db: Db, row: typeof partner.$inferInsert): Promise<
 }
 
 /** Writes an edit over the version it saw; false when somebody else was faster. */
-export async function update(db: Db, id: number, version: number, change: Partial<typeof partner.$inferInsert>): Promise<boolean> {
+export async function update(
+	db: Db,
+	id: number,
+	version: number,
+	change: Partial<typeof partner.$inferInsert>
+): Promise<boolean> {
 	const [result] = await db
 		.update(partner)
 		.set({ ...change, version: version + 1 })

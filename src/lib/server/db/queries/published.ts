@@ -1,6 +1,16 @@
 import { and, asc, count, desc, eq, inArray, isNotNull, max, type SQL } from 'drizzle-orm';
 import type { Db } from '../client';
-import { article, correction, edition, editionPart, editionResult, part, partPrice, plate, workload } from '../schema';
+import {
+	article,
+	correction,
+	edition,
+	editionPart,
+	editionResult,
+	part,
+	partPrice,
+	plate,
+	workload
+} from '../schema';
 
 /** Every query here sees live editions alone: joined on `live_edition_id`, never drafts, never what only waits. */
 const live = eq(article.liveEditionId, edition.id);
@@ -18,7 +28,10 @@ const card = {
 };
 
 /** Published articles, the newest first. */
-export const articles = (db: Db, { limit, offset, template }: { limit: number; offset: number; template?: string }) =>
+export const articles = (
+	db: Db,
+	{ limit, offset, template }: { limit: number; offset: number; template?: string }
+) =>
 	db
 		.select(card)
 		.from(article)
@@ -40,7 +53,16 @@ export const countArticles = async (db: Db, template?: string): Promise<number> 
 export const bySlug = async (db: Db, slug: string) =>
 	(
 		await db
-			.select({ ...card, id: article.id, stage: article.stage, withdrawnAt: article.withdrawnAt, withdrawReason: article.withdrawReason, editionId: edition.id, page: edition.page, hash: edition.hash })
+			.select({
+				...card,
+				id: article.id,
+				stage: article.stage,
+				withdrawnAt: article.withdrawnAt,
+				withdrawReason: article.withdrawReason,
+				editionId: edition.id,
+				page: edition.page,
+				hash: edition.hash
+			})
 			.from(article)
 			.innerJoin(edition, live)
 			.where(eq(article.slug, slug))
@@ -58,7 +80,14 @@ export const editionsOf = (db: Db, articleId: number) =>
 /** Corrections of one article, or of all, the newest first. */
 export const corrections = (db: Db, where: { articleId?: number; limit: number }) =>
 	db
-		.select({ id: correction.id, kind: correction.kind, body: correction.body, madeAt: correction.madeAt, slug: article.slug, title: article.title })
+		.select({
+			id: correction.id,
+			kind: correction.kind,
+			body: correction.body,
+			madeAt: correction.madeAt,
+			slug: article.slug,
+			title: article.title
+		})
 		.from(correction)
 		.innerJoin(article, eq(article.id, correction.articleId))
 		.where(where.articleId === undefined ? undefined : eq(correction.articleId, where.articleId))
@@ -69,7 +98,13 @@ export const corrections = (db: Db, where: { articleId?: number; limit: number }
 export const plateOf = async (db: Db, slug: string, key: string) =>
 	(
 		await db
-			.select({ svg: plate.svg, csv: plate.csv, title: plate.title, stage: article.stage, hash: edition.hash })
+			.select({
+				svg: plate.svg,
+				csv: plate.csv,
+				title: plate.title,
+				stage: article.stage,
+				hash: edition.hash
+			})
 			.from(article)
 			.innerJoin(edition, live)
 			.innerJoin(plate, eq(plate.editionId, edition.id))
@@ -82,7 +117,14 @@ const published: SQL | undefined = eq(article.stage, 'published');
 /** Parts that live editions have results of, with how many articles. */
 export const parts = (db: Db) =>
 	db
-		.select({ slug: part.slug, kind: part.kind, maker: part.maker, model: part.model, articles: count(article.id), latest: max(article.firstPublishedAt) })
+		.select({
+			slug: part.slug,
+			kind: part.kind,
+			maker: part.maker,
+			model: part.model,
+			articles: count(article.id),
+			latest: max(article.firstPublishedAt)
+		})
 		.from(part)
 		.innerJoin(editionPart, eq(editionPart.partId, part.id))
 		.innerJoin(edition, eq(edition.id, editionPart.editionId))
@@ -95,7 +137,14 @@ export const parts = (db: Db) =>
 export const partBySlug = async (db: Db, slug: string) =>
 	(
 		await db
-			.selectDistinct({ id: part.id, slug: part.slug, kind: part.kind, maker: part.maker, model: part.model, specification: part.specification })
+			.selectDistinct({
+				id: part.id,
+				slug: part.slug,
+				kind: part.kind,
+				maker: part.maker,
+				model: part.model,
+				specification: part.specification
+			})
 			.from(part)
 			.innerJoin(editionPart, eq(editionPart.partId, part.id))
 			.innerJoin(edition, eq(edition.id, editionPart.editionId))
@@ -105,10 +154,24 @@ export const partBySlug = async (db: Db, slug: string) =>
 	)[0];
 
 export const pricesOf = (db: Db, partId: number) =>
-	db.select({ amountMinor: partPrice.amountMinor, currency: partPrice.currency, observedOn: partPrice.observedOn }).from(partPrice).where(eq(partPrice.partId, partId)).orderBy(desc(partPrice.observedOn), desc(partPrice.id));
+	db
+		.select({
+			amountMinor: partPrice.amountMinor,
+			currency: partPrice.currency,
+			observedOn: partPrice.observedOn
+		})
+		.from(partPrice)
+		.where(eq(partPrice.partId, partId))
+		.orderBy(desc(partPrice.observedOn), desc(partPrice.id));
 
 export const articlesOfPart = (db: Db, partId: number) =>
-	db.select(card).from(article).innerJoin(edition, live).innerJoin(editionPart, eq(editionPart.editionId, edition.id)).where(and(eq(editionPart.partId, partId), published)).orderBy(desc(article.firstPublishedAt));
+	db
+		.select(card)
+		.from(article)
+		.innerJoin(edition, live)
+		.innerJoin(editionPart, eq(editionPart.editionId, edition.id))
+		.where(and(eq(editionPart.partId, partId), published))
+		.orderBy(desc(article.firstPublishedAt));
 
 const resultColumns = {
 	articleSlug: article.slug,
@@ -158,10 +221,24 @@ export async function methods(db: Db) {
 		.groupBy(editionResult.workloadSlug);
 	if (used.length === 0) return [];
 	return db
-		.select({ slug: workload.slug, name: workload.name, class: workload.class, quantity: workload.quantity, unit: workload.unit, better: workload.better, programVersion: workload.programVersion })
+		.select({
+			slug: workload.slug,
+			name: workload.name,
+			class: workload.class,
+			quantity: workload.quantity,
+			unit: workload.unit,
+			better: workload.better,
+			programVersion: workload.programVersion
+		})
 		.from(workload)
-		.where(inArray(workload.slug, used.map((u) => u.slug)))
+		.where(
+			inArray(
+				workload.slug,
+				used.map((u) => u.slug)
+			)
+		)
 		.orderBy(asc(workload.class), asc(workload.name));
 }
 
-export const workloadBySlug = async (db: Db, slug: string) => (await db.select().from(workload).where(eq(workload.slug, slug)).limit(1))[0];
+export const workloadBySlug = async (db: Db, slug: string) =>
+	(await db.select().from(workload).where(eq(workload.slug, slug)).limit(1))[0];

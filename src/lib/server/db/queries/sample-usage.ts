@@ -7,7 +7,16 @@ export const articlesOf = (db: Db, sampleIds: number[]) =>
 	sampleIds.length === 0
 		? Promise.resolve([])
 		: db
-				.selectDistinct({ sampleId: rigSample.sampleId, articleId: article.id, slug: article.slug, title: article.title, stage: article.stage, slotAt: article.slotAt, firstPublishedAt: article.firstPublishedAt, authorName: user.name })
+				.selectDistinct({
+					sampleId: rigSample.sampleId,
+					articleId: article.id,
+					slug: article.slug,
+					title: article.title,
+					stage: article.stage,
+					slotAt: article.slotAt,
+					firstPublishedAt: article.firstPublishedAt,
+					authorName: user.name
+				})
 				.from(rigSample)
 				.innerJoin(campaign, eq(campaign.rigRevisionId, rigSample.rigRevisionId))
 				.innerJoin(articleCampaign, eq(articleCampaign.campaignId, campaign.id))

@@ -9,7 +9,10 @@ import * as partners from '../../db/queries/partner';
 const pageSize = 50;
 
 /** Partners by name, a page at a time, with open and overdue loans. `zone` decides what day today is. */
-export async function listPartners(ctx: Context, { text, page, zone }: { text: string; page: number; zone: string }) {
+export async function listPartners(
+	ctx: Context,
+	{ text, page, zone }: { text: string; page: number; zone: string }
+) {
 	if (!may(ctx.actor, 'partner.read')) return refuse('forbidden', 'Partners are the liaison’s.');
 	const today = DateTime.fromJSDate(ctx.now, { zone }).toISODate() ?? '';
 	const [rows, total] = await Promise.all([
@@ -23,12 +26,27 @@ export async function listPartners(ctx: Context, { text, page, zone }: { text: s
 export async function listLoans(ctx: Context, stages: LoanStage[], partnerId?: number) {
 	if (!may(ctx.actor, 'loan.read')) return refuse('forbidden', 'Loans are the liaison’s.');
 	const rows = await loans.list(ctx.db, { stages, partnerId, limit: 200, offset: 0 });
-	const samples = await loans.samplesOf(ctx.db, rows.map((row) => row.id));
-	return done(rows.map((row) => ({ ...row, samples: samples.filter((s) => s.loanId === row.id).map((s) => ({ slug: s.slug, name: `${s.maker} ${s.model}` })) })));
+	const samples = await loans.samplesOf(
+		ctx.db,
+		rows.map((row) => row.id)
+	);
+	return done(
+		rows.map((row) => ({
+			...row,
+			samples: samples
+				.filter((s) => s.loanId === row.id)
+				.map((s) => ({ slug: s.slug, name: `${s.maker} ${s.model}` }))
+		}))
+	);
 }
 
 /** A partner with every loan it made. */
-export async function readPartner(ctx: Context, slug: string): Promise<Outcome<{ partner: NonNullable<Awaited<ReturnType<typeof partners.bySlug>>>; loans: ListedLoan[] }>> {
+export async function readPartner(
+	ctx: Context,
+	slug: string
+): Promise<
+	Outcome<{ partner: NonNullable<Awaited<ReturnType<typeof partners.bySlug>>>; loans: ListedLoan[] }>
+> {
 	if (!may(ctx.actor, 'partner.read')) return refuse('forbidden', 'Partners are the liaison’s.');
 	const partner = await partners.bySlug(ctx.db, slug);
 	if (!partner) return refuse('not_found', 'There is no such partner.');

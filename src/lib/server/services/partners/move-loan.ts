@@ -10,22 +10,49 @@ import * as audit from '../../db/queries/audit';
 import * as loans from '../../db/queries/loan';
 
 /** Takes a loan one step on, on the day it happened. `zone` decides what day today is. */
-export async function moveLoan(ctx: Context, id: number, input: LoanMoveInput, zone: string): Promise<Outcome<{ stage: LoanStage }, 'forbidden' | 'not_found' | 'invalid' | 'conflict'>> {
+export async function moveLoan(
+	ctx: Context,
+	id: number,
+	input: LoanMoveInput,
+	zone: string
+): Promise<Outcome<{ stage: LoanStage }, 'forbidden' | 'not_found' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'loan.edit')) return refuse('forbidden', 'Only a liaison moves loans.');
 	return inTransaction(ctx.db, async (tx) => {
 		const before = await loans.lock(tx, id);
 		if (!before) return refuse('not_found', 'There is no such loan.');
 		const stage = afterMove(before.stage, input.move);
-		if (!stage) return refuse('conflict', `“${loanMoveWords[input.move]}” does not follow: the loan is ${loanStageWords[before.stage]}. Nothing was changed.`);
+		if (!stage)
+			return refuse(
+				'conflict',
+				`“${loanMoveWords[input.move]}” does not follow: the loan is ${loanStageWords[before.stage]}. Nothing was changed.`
+			);
 		const on = input.on ?? DateTime.fromJSDate(ctx.now, { zone }).toISODate();
-		const dates = stage === 'here' ? { receivedOn: on } : closedStages.includes(stage) ? { closedOn: on } : {};
+		const dates =
+			stage === 'here' ? { receivedOn: on } : closedStages.includes(stage) ? { closedOn: on } : {};
 		if (dates.receivedOn && before.dueOn && dates.receivedOn > before.dueOn) {
-			return refuse('invalid', 'It would come after the day it is due back. Move the due date first.', { fields: { on: ['This is after the day it is due back.'] } });
+			return refuse('invalid', 'It would come after the day it is due back. Move the due date first.', {
+				fields: { on: ['This is after the day it is due back.'] }
+			});
 		}
 		if (!(await loans.update(tx, id, input.version, { stage, ...dates }))) {
-			return refuse('conflict', 'Somebody else moved this loan meanwhile. Look at where it stands now; nothing was changed.', { detail: { version: before.version } });
+			return refuse(
+				'conflict',
+				'Somebody else moved this loan meanwhile. Look at where it stands now; nothing was changed.',
+				{ detail: { version: before.version } }
+			);
 		}
-		await audit.append(tx, [{ at: ctx.now, actorId: ctx.actor.id, act: `loan.${input.move}`, subjectKind: 'loan', subjectId: id, before: { stage: before.stage }, after: { stage, on }, reason: input.note || null }]);
+		await audit.append(tx, [
+			{
+				at: ctx.now,
+				actorId: ctx.actor.id,
+				act: `loan.${input.move}`,
+				subjectKind: 'loan',
+				subjectId: id,
+				before: { stage: before.stage },
+				after: { stage, on },
+				reason: input.note || null
+			}
+		]);
 		return done({ stage });
 	});
 }

@@ -14,10 +14,22 @@ export async function readLoan(ctx: Context, id: number) {
 	if (!found) return refuse('not_found', 'There is no such loan.');
 	const samples = await loans.samplesOf(ctx.db, [id]);
 	const [articles, terms, history] = await Promise.all([
-		usage.articlesOf(ctx.db, samples.map((s) => s.sampleId)),
+		usage.articlesOf(
+			ctx.db,
+			samples.map((s) => s.sampleId)
+		),
 		embargoes.ofLoan(ctx.db, id),
 		audit.ofSubject(ctx.db, 'loan', id)
 	]);
-	const once = [...new Map(articles.map(({ sampleId: _, ...article }) => [article.articleId, article])).values()];
-	return done({ ...found, samples, embargoes: terms, history, articles: once, moves: openMoves(found.loan.stage) });
+	const once = [
+		...new Map(articles.map(({ sampleId: _, ...article }) => [article.articleId, article])).values()
+	];
+	return done({
+		...found,
+		samples,
+		embargoes: terms,
+		history,
+		articles: once,
+		moves: openMoves(found.loan.stage)
+	});
 }

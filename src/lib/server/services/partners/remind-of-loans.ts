@@ -31,20 +31,45 @@ export async function remindOfLoans(ctx: SystemContext): Promise<number> {
 	if (wanted.length === 0) return 0;
 
 	return inTransaction(ctx.db, async (tx) => {
-		const fresh = await loans.claimReminders(tx, wanted.map(({ loan, dueOn, reminder }) => ({ loanId: loan.id, dueOn, kind: reminder.kind, sentAt: ctx.now })));
-		const claimed = wanted.filter(({ loan, reminder }) => fresh.some((f) => f.loanId === loan.id && f.kind === reminder.kind));
-		const [liaisons, samples] = await Promise.all([recipients.withRole(tx, 'liaison'), loans.samplesOf(tx, claimed.map(({ loan }) => loan.id))]);
+		const fresh = await loans.claimReminders(
+			tx,
+			wanted.map(({ loan, dueOn, reminder }) => ({
+				loanId: loan.id,
+				dueOn,
+				kind: reminder.kind,
+				sentAt: ctx.now
+			}))
+		);
+		const claimed = wanted.filter(({ loan, reminder }) =>
+			fresh.some((f) => f.loanId === loan.id && f.kind === reminder.kind)
+		);
+		const [liaisons, samples] = await Promise.all([
+			recipients.withRole(tx, 'liaison'),
+			loans.samplesOf(
+				tx,
+				claimed.map(({ loan }) => loan.id)
+			)
+		]);
 		const mails = claimed.flatMap(({ loan, dueOn, reminder }) => {
-			const things = samples.filter((s) => s.loanId === loan.id).map((s) => `${s.maker} ${s.model}`).join(', ');
+			const things = samples
+				.filter((s) => s.loanId === loan.id)
+				.map((s) => `${s.maker} ${s.model}`)
+				.join(', ');
 			const day = DateTime.fromISO(dueOn, { zone }).toFormat('d LLLL yyyy');
 			const content = letter({
 				subject: `${things} ${when(reminder)}`,
-				paragraphs: [`${things}, lent by ${loan.partnerName}, ${when(reminder)} (${day}). The loan is ${loanStageWords[loan.stage]}.`],
+				paragraphs: [
+					`${things}, lent by ${loan.partnerName}, ${when(reminder)} (${day}). The loan is ${loanStageWords[loan.stage]}.`
+				],
 				link: { label: 'Open the loan', href: `${ctx.origin}/partners/loans/${loan.id}` },
 				publication: name,
 				because: 'You look after the loans.'
 			});
-			return liaisons.map((person) => ({ ...content, recipient: person.email, messageId: `loan-${loan.id}-${dueOn}-${reminder.kind}-${person.id}@calipress` }));
+			return liaisons.map((person) => ({
+				...content,
+				recipient: person.email,
+				messageId: `loan-${loan.id}-${dueOn}-${reminder.kind}-${person.id}@calipress`
+			}));
 		});
 		await post(tx, ctx.now, mails);
 		return claimed.length;

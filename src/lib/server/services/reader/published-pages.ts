@@ -5,7 +5,10 @@ import * as published from '../../db/queries/published';
 export const articlesOnPage = 24;
 
 /** Published articles, the newest first, a page at a time. */
-export async function listArticles(ctx: OpenContext, { page, template }: { page: number; template?: string }) {
+export async function listArticles(
+	ctx: OpenContext,
+	{ page, template }: { page: number; template?: string }
+) {
 	const [rows, total] = await Promise.all([
 		published.articles(ctx.db, { limit: articlesOnPage, offset: (page - 1) * articlesOnPage, template }),
 		published.countArticles(ctx.db, template)
@@ -51,8 +54,12 @@ export const listMethods = (ctx: OpenContext) => published.methods(ctx.db);
 
 /** How a workload is run, with what was printed of it. */
 export async function readMethod(ctx: OpenContext, slug: string) {
-	const [workload, results] = await Promise.all([published.workloadBySlug(ctx.db, slug), published.resultsOfWorkload(ctx.db, slug)]);
-	if (!workload || results.length === 0) return refuse('not_found', 'We have published nothing measured this way.');
+	const [workload, results] = await Promise.all([
+		published.workloadBySlug(ctx.db, slug),
+		published.resultsOfWorkload(ctx.db, slug)
+	]);
+	if (!workload || results.length === 0)
+		return refuse('not_found', 'We have published nothing measured this way.');
 	return done({ workload, results });
 }
 

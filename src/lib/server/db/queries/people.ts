@@ -169,3 +169,10 @@ export async function update(
 /** Sets a password's hash. */
 export const setPassword = (db: Db, id: string, passwordHash: string) =>
 	db.update(user).set({ passwordHash }).where(eq(user.id, id));
+
+/** Lets a person in again, whatever version they are at. */
+export const reinstate = (db: Db, id: string) =>
+	db
+		.update(user)
+		.set({ leftAt: null, version: sql`${user.version} + 1` })
+		.where(eq(user.id, id));

@@ -1,0 +1,113 @@
+import { z } from 'zod';
+import { campaignStates } from '../domain/bench/campaign-state';
+import { line, number, optionalSlug, paragraphs, reference, versionSeen } from './fields';
+import { listing } from './listing';
+
+const name = line(160).min(1, 'A campaign needs a name.');
+const purpose = paragraphs(5000).default('');
+
+/** A day in the publication's zone; empty for none. */
+const day = z
+	.string('Write a date such as 2026-11-20.')
+	.trim()
+	.default('')
+	.refine((text) => text === '' || z.iso.date().safeParse(text).success, 'Write a date such as 2026-11-20.');
+
+const repeats = number({ min: 1, max: 1000, decimals: 0 });
+const most = 60;
+
+const profiles = z
+	.array(reference('Choose a profile.'))
+	.max(most, `A campaign has at most ${most} profiles.`)
+	.refine((refs) => new Set(refs).size === refs.length, 'A profile is in a campaign once.');
+
+/** One line of the choice of workloads; a line without a workload is one left unticked. */
+const chosenWorkload = z
+	.object({
+		workload: z.union([z.string(), z.int()]).transform(String).default(''),
+		/** Readings each of its cells needs; empty takes the workload's own protocol. */
+		repeats: z.union([z.string(), z.number()]).default('')
+	})
+	.superRefine((row, ctx) => {
+		if (row.workload === '' || row.repeats === '') return;
+		const message = repeats.safeParse(row.repeats).error?.issues[0]?.message;
+		if (message) ctx.addIssue({ code: 'custom', message, path: ['repeats'] });
+	});
+
+const workloads = z
+	.array(chosenWorkload)
+	.max(1000, 'That is too long a list.')
+	.transform((rows) =>
+		rows
+			.filter((row) => row.workload !== '')
+			.map((row) => ({
+				workload: row.workload,
+				repeats: row.repeats === '' ? null : repeats.parse(row.repeats)
+			}))
+	)
+	.refine((rows) => rows.length <= most, `A campaign has at most ${most} workloads.`)
+	.refine(
+		(rows) => new Set(rows.map((row) => row.workload)).size === rows.length,
+		'A workload is in a campaign once.'
+	);
+
+/** A plan: one rig as it is now, profiles of it, and workloads with the readings each cell needs. */
+export const campaignInput = z.object({
+	name,
+	slug: optionalSlug,
+	rig: reference('Choose a rig.'),
+	profiles: profiles.min(1, 'Choose at least one profile.'),
+	workloads: workloads.refine((rows) => rows.length > 0, 'Choose at least one workload.'),
+	purpose,
+	dueOn: day
+});
+export type CampaignInput = z.output<typeof campaignInput>;
+export type CampaignTyped = z.input<typeof campaignInput>;
+
+/** What may be said differently later. */
+export const campaignEdit = z.object({ name, purpose, dueOn: day, version: versionSeen });
+export type CampaignEdit = z.output<typeof campaignEdit>;
+export type CampaignEditTyped = z.input<typeof campaignEdit>;
+
+/** Rows and columns added to a plan under way. */
+export const campaignExtend = z.object({
+	profiles: profiles.default([]),
+	workloads: workloads.default([]),
+	version: versionSeen
+});
+export type CampaignExtend = z.output<typeof campaignExtend>;
+export type CampaignExtendTyped = z.input<typeof campaignExtend>;
+
+/** A row or column taken out again, or a column that needs more or fewer readings. */
+export const campaignTrim = z.object({
+	kind: z.enum(['profile', 'workload']),
+	ref: reference('Choose what to remove.'),
+	version: versionSeen
+});
+export type CampaignTrim = z.output<typeof campaignTrim>;
+
+export const campaignRepeats = z.object({
+	workload: reference('Choose a workload.'),
+	repeats,
+	version: versionSeen
+});
+export type CampaignRepeats = z.output<typeof campaignRepeats>;
+
+export const campaignArchive = z.object({ archived: z.enum(['yes', 'no']), version: versionSeen });
+export type CampaignArchive = z.output<typeof campaignArchive>;
+
+export const campaignsQuery = listing(['created', 'due', 'name'], 'down').extend({
+	rig: z.string().trim().max(80).default(''),
+	state: z.enum(['open', ...campaignStates, 'all']).default('open')
+});
+export type CampaignsQuery = z.output<typeof campaignsQuery>;
+
+export const blankCampaign = (rig: string): CampaignTyped => ({
+	name: '',
+	slug: '',
+	rig,
+	profiles: [],
+	workloads: [],
+	purpose: '',
+	dueOn: ''
+});

@@ -1,0 +1,55 @@
+import { and, asc, count, eq, isNull } from 'drizzle-orm';
+import type { Db } from '../client';
+import { reading, run } from '../schema';
+
+/** Several readings at once, in slices that stay far below the server's packet limit. */
+export async function insertMany(db: Db, rows: (typeof reading.$inferInsert)[]): Promise<void> {
+	const slice = 2000;
+	for (let from = 0; from < rows.length; from += slice) {
+		await db.insert(reading).values(rows.slice(from, from + slice));
+	}
+}
+
+/** The readings of a run in the order they were taken, as they stand now, locked until the transaction ends. */
+export const lockOfRun = (db: Db, runId: number) =>
+	db.select().from(reading).where(eq(reading.runId, runId)).orderBy(asc(reading.position)).for('update');
+
+/** Which run a reading is in, without a lock; its cell is locked first. */
+export const runOf = async (db: Db, id: number) =>
+	(await db.select({ runId: reading.runId }).from(reading).where(eq(reading.id, id)).limit(1))[0]?.runId;
+
+/** The reading row, locked until the transaction ends. */
+export const lock = async (db: Db, id: number) =>
+	(await db.select().from(reading).where(eq(reading.id, id)).for('update'))[0];
+
+export const setExclusion = (
+	db: Db,
+	id: number,
+	change: { excludedAt: Date | null; excludedBy: string | null; excludeReason: string | null }
+) => db.update(reading).set(change).where(eq(reading.id, id));
+
+/** The readings of one cell that count, in the order they were recorded: as they stand now, whatever was read before. */
+export const countedOfCell = (db: Db, cell: { campaignId: number; profileId: number; workloadId: number }) =>
+	db
+		.select({ id: reading.id, value: reading.value })
+		.from(run)
+		.innerJoin(reading, and(eq(reading.runId, run.id), isNull(reading.excludedAt)))
+		.where(
+			and(
+				eq(run.campaignId, cell.campaignId),
+				eq(run.profileId, cell.profileId),
+				eq(run.workloadId, cell.workloadId),
+				isNull(run.voidedAt)
+			)
+		)
+		.orderBy(asc(run.id), asc(reading.position))
+		.for('share');
+
+/** How many readings of each cell of a campaign count. */
+export const countsOfCells = (db: Db, campaignId: number) =>
+	db
+		.select({ profileId: run.profileId, workloadId: run.workloadId, readings: count() })
+		.from(run)
+		.innerJoin(reading, and(eq(reading.runId, run.id), isNull(reading.excludedAt)))
+		.where(and(eq(run.campaignId, campaignId), isNull(run.voidedAt)))
+		.groupBy(run.profileId, run.workloadId);

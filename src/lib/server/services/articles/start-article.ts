@@ -1,0 +1,75 @@
+import { may } from '../../../domain/people/policy';
+import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
+import { isReserved, slugOf } from '../../../domain/shared/slug';
+import type { ArticleStart } from '../../../schemas/article';
+import type { Context } from '../../context';
+import { inTransaction, isDuplicate } from '../../db/client';
+import * as articles from '../../db/queries/article';
+import * as audit from '../../db/queries/audit';
+import * as campaigns from '../../db/queries/campaign-choice';
+import * as revisions from '../../db/queries/revision';
+
+const taken = 'Another article has this title, or one that makes the same address. Choose another.';
+
+/**
+ * Starts an article of the actor's from a template's text, bound to campaigns. Its address comes from its title
+ * and stays. Refuses a title that makes the address of another article, beside the field.
+ */
+export async function startArticle(
+	ctx: Context,
+	input: ArticleStart,
+	templateSource: string
+): Promise<Outcome<{ slug: string }, 'forbidden' | 'invalid' | 'conflict'>> {
+	if (!may(ctx.actor, 'article.create'))
+		return refuse('forbidden', 'Only writers and editors start articles.');
+	const slug = slugOf(input.title);
+	if (slug === '' || isReserved(slug))
+		return refuse('invalid', 'This title cannot make an address.', {
+			fields: { title: ['This title cannot make an address: use a few letters or words more.'] }
+		});
+	try {
+		return await inTransaction(ctx.db, async (tx) => {
+			const found = new Map((await campaigns.idsOf(tx, input.campaigns)).map((one) => [one.slug, one.id]));
+			const ids = [...new Set(input.campaigns)].flatMap((name) => found.get(name) ?? []);
+			if (ids.length < new Set(input.campaigns).size)
+				return refuse('invalid', 'One of the campaigns does not exist any more.', {
+					fields: { campaigns: ['One of these campaigns does not exist any more. Choose again.'] }
+				});
+			const id = await articles.insert(tx, {
+				slug,
+				title: input.title,
+				template: input.template,
+				stage: 'drafting',
+				authorId: ctx.actor.id,
+				head: 1,
+				createdAt: ctx.now,
+				updatedAt: ctx.now
+			});
+			await articles.setCampaigns(tx, id, ids);
+			await revisions.insert(tx, {
+				articleId: id,
+				number: 1,
+				title: input.title,
+				standfirst: '',
+				source: templateSource,
+				savedBy: ctx.actor.id,
+				savedAt: ctx.now,
+				note: 'from the template'
+			});
+			await audit.append(tx, [
+				{
+					at: ctx.now,
+					actorId: ctx.actor.id,
+					act: 'article.start',
+					subjectKind: 'article',
+					subjectId: id,
+					after: { slug, title: input.title, template: input.template, campaigns: input.campaigns }
+				}
+			]);
+			return done({ slug });
+		});
+	} catch (error) {
+		if (!isDuplicate(error)) throw error;
+		return refuse('conflict', taken, { fields: { title: [taken] } });
+	}
+}

@@ -1,0 +1,132 @@
+import type { ArticleData } from '../data';
+import type { PlateSpec } from '../plates/spec';
+
+/** What a directive could not do, in words for its writer, with the names that exist. */
+export interface Problem {
+	message: string;
+	nearest: string[];
+}
+
+/** Either what was looked for or why not. */
+export type Lookup<T> = { ok: true; value: T } | { ok: false; problem: Problem };
+
+export const found = <T>(value: T): Lookup<T> => ({ ok: true, value });
+export const missing = (message: string, nearest: string[] = []): { ok: false; problem: Problem } => ({
+	ok: false,
+	problem: { message, nearest }
+});
+
+/** A directive as it was written. */
+export interface Call {
+	name: string;
+	attributes: Record<string, string>;
+	/** Line of the source, from 1. */
+	line: number;
+}
+
+export const cautionTopics = ['voltage', 'power', 'heat', 'liquid', 'static', 'data', 'mains'] as const;
+export type CautionTopic = (typeof cautionTopics)[number];
+
+/** A number in the prose that is bound to stored runs. */
+export interface BoundFigure {
+	directive: 'reading' | 'gain' | 'overall';
+	line: number;
+	campaign: string;
+	profile: string;
+	/** Null for an overall figure. */
+	workload: string | null;
+	/** The profile it is held against; null for a reading. */
+	over: string | null;
+	/** As it stands on the page. */
+	printed: string;
+	/** At full precision, in `unit`. */
+	value: number;
+	unit: string;
+}
+
+/** A cell of a campaign whose data the article shows. */
+export interface UsedCell {
+	campaign: string;
+	profile: string;
+	workload: string;
+}
+
+/** A setting shown to readers that can cost them hardware, with the caution it calls for. */
+export interface Risk {
+	topic: CautionTopic;
+	campaign: string;
+	profile: string;
+	setting: string;
+	line: number;
+}
+
+/** What a directive leaves behind besides its markup. */
+export interface Trace {
+	bound?: BoundFigure;
+	plate?: PlateSpec;
+	cells?: UsedCell[];
+	profiles?: { campaign: string; profile: string }[];
+	campaigns?: string[];
+	cautions?: CautionTopic[];
+	risks?: Risk[];
+	disclosure?: true;
+}
+
+export interface Printed extends Trace {
+	html: string;
+	/** The same in plain text, for feeds, search and the word count; empty where it adds nothing. */
+	plain: string;
+}
+
+/** The names an attribute takes; null where any text will do. */
+export type Values = readonly string[] | null;
+
+export interface Attribute {
+	name: string;
+	required: boolean;
+	/** What it is, in a few words, for the insert panel. */
+	words: string;
+	/** What may stand there, given what else was chosen. */
+	values: (data: ArticleData, attributes: Record<string, string>) => Values;
+}
+
+/** Draws a plate: SVG markup for its specification. */
+export type Draw = (spec: PlateSpec) => string;
+
+/** What printing needs beside what was found. */
+export interface Press {
+	data: ArticleData;
+	draw: Draw;
+	call: Call;
+	/** Where the plates' files are, with a slash at its end. */
+	platesAt: string;
+}
+
+/** One directive: how it is written, how its names are resolved, how what was found is printed. */
+export interface Directive<T> {
+	name: string;
+	/** In a sentence, or on a line of its own. */
+	level: 'inline' | 'block';
+	/** What it prints, in a sentence for the insert panel. */
+	words: string;
+	attributes: Attribute[];
+	resolve: (call: Call, data: ArticleData) => Lookup<T>;
+	render: (value: T, press: Press) => Printed;
+}
+
+/** A directive with its own types closed over, so that all of them fit one list. */
+export interface AnyDirective extends Pick<Directive<unknown>, 'name' | 'level' | 'words' | 'attributes'> {
+	print: (press: Press) => Lookup<Printed>;
+}
+
+/** Closes a directive over the type it resolves to. */
+export const directive = <T>(it: Directive<T>): AnyDirective => ({
+	name: it.name,
+	level: it.level,
+	words: it.words,
+	attributes: it.attributes,
+	print: (press) => {
+		const result = it.resolve(press.call, press.data);
+		return result.ok ? found(it.render(result.value, press)) : result;
+	}
+});

@@ -1,0 +1,145 @@
+import { Marked, type Token, type Tokens } from 'marked';
+import { directiveSyntax, isDirective, type DirectiveToken } from './directive-syntax';
+import { element, escapeHtml } from './html';
+import { isSafeLink, relOf } from './links';
+
+/** A token with the line it starts on, from 1, and what was settled about it before printing. */
+export type Placed = Token & { line?: number; id?: string; refused?: string };
+
+const at = (token: object): number | undefined => (token as { line?: number }).line;
+
+/**
+ * CommonMark with tables and our directives; HTML in a source is text. The renderers print what was settled
+ * in the token tree beforehand and keep no state, so that one parser serves everybody.
+ */
+const marked = new Marked({ gfm: true, breaks: false });
+marked.use(directiveSyntax());
+marked.use({
+	tokenizer: {
+		// No token, and not marked's own reading either: what looks like HTML stays text and is escaped.
+		html: () => undefined,
+		tag: () => undefined
+	},
+	renderer: {
+		heading(token) {
+			// The page's title is its one h1.
+			const tag = `h${Math.max(2, token.depth)}`;
+			const { id } = token as { id?: string };
+			return element(tag, { id, 'data-line': at(token) }, this.parser.parseInline(token.tokens));
+		},
+		paragraph(token) {
+			return element('p', { 'data-line': at(token) }, this.parser.parseInline(token.tokens));
+		},
+		blockquote(token) {
+			return element('blockquote', { 'data-line': at(token) }, this.parser.parse(token.tokens));
+		},
+		hr(token) {
+			return `<hr data-line="${at(token) ?? ''}">`;
+		},
+		code(token) {
+			return element(
+				'pre',
+				{ 'data-line': at(token), tabindex: 0 },
+				`<code>${escapeHtml(token.text)}\n</code>`
+			);
+		},
+		list(token) {
+			const start = token.ordered && token.start !== 1 && token.start !== '' ? token.start : undefined;
+			return element(
+				token.ordered ? 'ol' : 'ul',
+				{ 'data-line': at(token), start },
+				token.items.map((item) => this.listitem(item)).join('')
+			);
+		},
+		listitem(token) {
+			return element('li', { 'data-line': at(token) }, this.parser.parse(token.tokens));
+		},
+		checkbox: ({ checked }) => (checked ? '☑ ' : '☐ '),
+		table(token) {
+			const cell = (one: Tokens.TableCell, tag: 'th' | 'td') =>
+				element(
+					tag,
+					{
+						class: one.align === 'right' ? 'num' : undefined,
+						scope: tag === 'th' ? 'col' : undefined
+					},
+					this.parser.parseInline(one.tokens)
+				);
+			const row = (cells: Tokens.TableCell[], tag: 'th' | 'td') =>
+				`<tr>${cells.map((one) => cell(one, tag)).join('')}</tr>`;
+			return element(
+				'div',
+				{ class: 'table-box', tabindex: 0, role: 'group', 'aria-label': 'Table', 'data-line': at(token) },
+				`<table><thead>${row(token.header, 'th')}</thead><tbody>${token.rows.map((one) => row(one, 'td')).join('')}</tbody></table>`
+			);
+		},
+		codespan: (token) => element('code', {}, escapeHtml(token.text)),
+		link(token) {
+			const inner = this.parser.parseInline(token.tokens);
+			if (!isSafeLink(token.href)) return inner + ((token as Placed).refused ?? '');
+			return element(
+				'a',
+				{ href: token.href, title: token.title ?? undefined, rel: relOf(token.href) },
+				inner
+			);
+		},
+		image(token) {
+			const { refused } = token as Placed;
+			if (refused !== undefined) return refused;
+			const title = token.title ? ` title="${escapeHtml(token.title)}"` : '';
+			return `<img src="${escapeHtml(token.href)}" alt="${escapeHtml(token.text)}"${title} loading="lazy">`;
+		},
+		text(token) {
+			if ('tokens' in token && token.tokens) return this.parser.parseInline(token.tokens);
+			// Entities that a writer typed are decoded by the browser, so they stay as they are.
+			return token.text.replace(/&(?!#?\w{1,31};)/g, '&amp;').replace(/[<>"']/g, (sign) => escapeHtml(sign));
+		}
+	}
+});
+
+const linesIn = (raw: string): number => raw.split('\n').length - 1;
+
+/** The lists of tokens inside a token, with the lines they begin after it. */
+function inside(token: Token): { tokens: Token[]; offset: number }[] {
+	if (token.type === 'list') return [{ tokens: (token as Tokens.List).items, offset: 0 }];
+	if (token.type === 'table') {
+		const { header, rows } = token as Tokens.Table;
+		return [
+			...header.map((cell) => ({ tokens: cell.tokens, offset: 0 })),
+			...rows.flatMap((row, index) => row.map((cell) => ({ tokens: cell.tokens, offset: index + 2 })))
+		];
+	}
+	const tokens = 'tokens' in token ? token.tokens : undefined;
+	const container = isDirective(token as Tokens.Generic) && token.type === 'directive-container';
+	return tokens ? [{ tokens, offset: container ? 1 : 0 }] : [];
+}
+
+function place(tokens: Token[], first: number): void {
+	let line = first;
+	for (const token of tokens) {
+		(token as Placed).line = line;
+		for (const { tokens: inner, offset } of inside(token)) place(inner, line + offset);
+		line += linesIn(token.raw);
+	}
+}
+
+/** The token tree of a source, each token with the line it starts on. RangeError where it is nested too deep. */
+export function parseMarkdown(source: string): Token[] {
+	const tokens = marked.lexer(source);
+	place(tokens, 1);
+	return tokens;
+}
+
+/** Calls for every token of a tree, outermost first. */
+export function eachToken(tokens: Token[], visit: (token: Placed) => void): void {
+	for (const token of tokens) {
+		visit(token);
+		for (const { tokens: inner } of inside(token)) eachToken(inner, visit);
+	}
+}
+
+/** The markup of a token tree. */
+export const printMarkdown = (tokens: Token[]): string => marked.parser(tokens);
+
+/** What a container directive holds, as markup. */
+export const printInside = (token: DirectiveToken): string => marked.parser(token.tokens ?? []);

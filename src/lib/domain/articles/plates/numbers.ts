@@ -1,0 +1,126 @@
+import { verdictWords } from '../../bench/figures';
+import { printed, printedRatio } from '../../shared/quantity';
+import { table } from '../html';
+import type { GainsSpec, PlateSpec, ScoresSpec } from './spec';
+
+const scoresTable = (spec: ScoresSpec): string =>
+	table(
+		`Numbers of ${spec.title}`,
+		[
+			{ head: 'Profile' },
+			{ head: 'n', figures: true },
+			{ head: `Value, ${spec.unit}`, figures: true },
+			{ head: '95 % interval', figures: true },
+			{ head: 'Standard deviation', figures: true }
+		],
+		spec.rows.map((row) => [
+			row.name,
+			String(row.n),
+			row.printed,
+			row.printedInterval ?? 'none',
+			row.sd === null ? 'none' : printed(row.sd, { halfWidth: row.sd })
+		])
+	);
+
+const gainsTable = (spec: GainsSpec): string =>
+	table(
+		`Numbers of ${spec.title}`,
+		[
+			{ head: 'Workload' },
+			{ head: 'Profile' },
+			{ head: 'n', figures: true },
+			{ head: 'Ratio', figures: true },
+			{ head: 'Gain', figures: true },
+			{ head: '95 % interval', figures: true },
+			{ head: 'Verdict' }
+		],
+		spec.rows.flatMap((row) =>
+			row.points.flatMap((point, index) =>
+				point === null
+					? []
+					: [
+							[
+								row.name,
+								spec.series[index]?.name ?? point.profile,
+								String(point.n),
+								printedRatio(point.ratio),
+								point.printed,
+								point.printedInterval ?? 'none',
+								verdictWords[point.verdict]
+							]
+						]
+			)
+		)
+	);
+
+/** The numbers of a plate as a table, at printed rounding. */
+export const plateTable = (spec: PlateSpec): string =>
+	spec.kind === 'scores' ? scoresTable(spec) : gainsTable(spec);
+
+type Field = string | number | null;
+
+/** One field: quoted where it must be, doubled quotes inside (RFC 4180, rules 5 to 7). */
+function field(value: Field): string {
+	if (value === null) return '';
+	if (typeof value === 'number') return String(value);
+	// A text that a spreadsheet would run as a formula is shown as text (common practice, no source).
+	const text = /^[=+\-@\t\r]/.test(value) ? `'${value}` : value;
+	return /[",\r\n]/.test(text) ? `"${text.replace(/"/g, '""')}"` : text;
+}
+
+const csv = (rows: Field[][]): string => rows.map((row) => `${row.map(field).join(',')}\r\n`).join('');
+
+/** The numbers of a plate at full precision, as CSV by RFC 4180 with a header line. */
+export function plateCsv(spec: PlateSpec): string {
+	if (spec.kind === 'scores') {
+		return csv([
+			['profile', 'workload', 'unit', 'better', 'n', 'mean', 'median', 'sd', 'ci95_low', 'ci95_high'],
+			...spec.rows.map((row): Field[] => [
+				row.name,
+				spec.workload,
+				spec.unit,
+				spec.better,
+				row.n,
+				row.mean,
+				row.median,
+				row.sd,
+				row.ci95?.[0] ?? null,
+				row.ci95?.[1] ?? null
+			])
+		]);
+	}
+	return csv([
+		[
+			'workload',
+			'profile',
+			'over',
+			'n',
+			'n_over',
+			'ratio',
+			'gain_percent',
+			'gain_ci95_low',
+			'gain_ci95_high',
+			'verdict'
+		],
+		...spec.rows.flatMap((row) =>
+			row.points.flatMap((point, index): Field[][] =>
+				point === null
+					? []
+					: [
+							[
+								row.workload,
+								spec.series[index]?.name ?? point.profile,
+								spec.baseline.name,
+								point.n,
+								point.nBaseline,
+								point.ratio,
+								point.gainPercent,
+								point.ci95?.[0] ?? null,
+								point.ci95?.[1] ?? null,
+								verdictWords[point.verdict]
+							]
+						]
+			)
+		)
+	]);
+}

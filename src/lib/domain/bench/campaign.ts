@@ -1,5 +1,5 @@
-import type { CellFigures, Overall, WorkloadFacts } from './figures';
-import { compareCells } from './statistics/compare';
+import type { CellFigures, Comparison, Overall, Summary, WorkloadFacts } from './figures';
+import { compareSummaries } from './statistics/compare';
 import { overall } from './statistics/overall';
 import { summarise } from './statistics/summary';
 
@@ -74,8 +74,15 @@ function circumstances(
 	};
 }
 
-const average = (values: readonly number[]): number =>
-	values.reduce((sum, value) => sum + value, 0) / values.length;
+/** Null where a side is empty or its mean is not above zero. */
+const compared = (
+	subject: Summary | null,
+	baseline: Summary | null,
+	{ better, leastDifferencePercent }: WorkloadFacts
+): Comparison | null =>
+	subject && baseline && subject.mean > 0 && baseline.mean > 0
+		? compareSummaries(subject, baseline, better, leastDifferencePercent)
+		: null;
 
 /**
  * Every figure of a campaign: each cell's summary, its ratio to the baseline with interval and verdict,
@@ -88,23 +95,26 @@ export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
 	}
 	const runs = byCell(matrix.runs);
 	const signatures = byCell(matrix.signatures);
-	const valuesOf = (profile: string, workload: string): number[] =>
-		countedReadings(runs.get(cellKey({ profile, workload })) ?? []).map((reading) => reading.value);
+	const summaryOf = (profile: string, workload: CampaignMatrix['workloads'][number]): Summary | null => {
+		const readings = countedReadings(runs.get(cellKey({ profile, workload: workload.slug })) ?? []);
+		const values = readings.map((reading) => reading.value);
+		return values.length > 0 ? summarise(values, workload.headline) : null;
+	};
+	const baselines = new Map(
+		matrix.workloads.map((workload) => [workload.slug, summaryOf(matrix.baseline, workload)])
+	);
 
 	const cells = matrix.profiles.flatMap((profile) =>
 		matrix.workloads.map((workload): CellFigures => {
 			const cell = { profile, workload: workload.slug };
-			const values = valuesOf(profile, workload.slug);
-			const against = profile === matrix.baseline ? [] : valuesOf(matrix.baseline, workload.slug);
-			const comparable = average(values) > 0 && average(against) > 0;
+			const summary = summaryOf(profile, workload);
+			const against = profile === matrix.baseline ? null : (baselines.get(workload.slug) ?? null);
 			const signature = signatures.get(cellKey(cell))?.at(-1);
 			return {
 				...cell,
 				needed: workload.needed,
-				summary: values.length ? summarise(values, workload.headline) : null,
-				comparison: comparable
-					? compareCells(values, against, workload.better, workload.leastDifferencePercent)
-					: null,
+				summary,
+				comparison: compared(summary, against, workload),
 				signedBy: signature?.signedBy ?? null,
 				signedAt: signature?.signedAt ?? null,
 				...circumstances(runs.get(cellKey(cell)) ?? [])

@@ -11,14 +11,22 @@ interface Side {
 	df: number;
 }
 
-function side(values: readonly number[]): Side {
+type Spread = Pick<Summary, 'n' | 'mean' | 'sd'>;
+
+const side = ({ n, mean: centre, sd }: Spread): Side => ({
+	mean: centre,
+	varianceOfMean: sd === null ? null : sd ** 2 / n,
+	df: n - 1
+});
+
+function spread(values: readonly number[]): Spread {
 	if (values.length === 0) throw new RangeError('A comparison needs readings on both sides.');
 	if (!values.every(Number.isFinite)) throw new RangeError('Every reading must be a finite number.');
 	const list = [...values];
 	return {
+		n: list.length,
 		mean: mean(list),
-		varianceOfMean: list.length > 1 ? sampleVariance(list) / list.length : null,
-		df: list.length - 1
+		sd: list.length > 1 ? Math.sqrt(sampleVariance(list)) : null
 	};
 }
 
@@ -88,31 +96,42 @@ function compareSides(
 }
 
 /**
- * A cell against its baseline: the ratio of means, turned so that above 1 is better, with Fieller's
- * 95 % interval and a verdict. *Better* or *worse*: the 95 % interval lies wholly beyond the band of what
- * does not matter, 1/(1 + m) to 1 + m. *No difference*: the 90 % interval lies wholly inside it.
- * RangeError for an empty side or a mean that is not above zero, where a ratio says nothing.
+ * A cell against its baseline from their summaries: the ratio of means, turned so that above 1 is better, with
+ * Fieller's 95 % interval and a verdict. *Better* or *worse*: the 95 % interval lies wholly beyond the band of
+ * what does not matter, 1/(1 + m) to 1 + m. *No difference*: the 90 % interval lies wholly inside it.
+ * RangeError for a mean that is not above zero, where a ratio says nothing.
  * @param leastDifferencePercent m, in percent
  */
-export function compareCells(
+export function compareSummaries(
+	subject: Spread,
+	baseline: Spread,
+	better: Direction,
+	leastDifferencePercent: number
+): Comparison {
+	if (!(subject.mean > 0 && baseline.mean > 0)) throw new RangeError('A ratio needs means above zero.');
+	const turned = better === 'higher' ? ([subject, baseline] as const) : ([baseline, subject] as const);
+	const [top, bottom] = [side(turned[0]), side(turned[1])];
+	const ratio = top.mean / bottom.mean;
+	const ci95 = fieller(top, bottom, 0.95);
+	return {
+		ratio,
+		ci95,
+		gainPercent: (ratio - 1) * 100,
+		gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100],
+		verdict: judge(ci95, fieller(top, bottom, 0.9), leastDifferencePercent / 100)
+	};
+}
+
+/**
+ * The same from the readings themselves. RangeError also for an empty side.
+ * @example compareCells([104, 105], [98, 99], 'higher', 1).ratio // 1.0609…
+ */
+export const compareCells = (
 	subject: readonly number[],
 	baseline: readonly number[],
 	better: Direction,
 	leastDifferencePercent: number
-): Comparison {
-	return compareSides(side(subject), side(baseline), better, leastDifferencePercent);
-}
-
-/**
- * The same comparison from summaries, for two profiles of which neither is the campaign's baseline.
- * RangeError for a mean that is not above zero.
- */
-export const compareSummaries = (
-	subject: Summary,
-	baseline: Summary,
-	better: Direction,
-	leastDifferencePercent: number
-): Comparison => compareSides(sideOf(subject), sideOf(baseline), better, leastDifferencePercent);
+): Comparison => compareSummaries(spread(subject), spread(baseline), better, leastDifferencePercent);
 
 export interface WelchTest {
 	/** Mean of the first minus mean of the second, in the unit of the readings. */
@@ -129,8 +148,8 @@ export interface WelchTest {
  * RangeError with fewer than two readings on a side or where neither side varies.
  */
 export function welch(first: readonly number[], second: readonly number[], level = 0.95): WelchTest {
-	const a = side(first);
-	const b = side(second);
+	const a = side(spread(first));
+	const b = side(spread(second));
 	if (a.varianceOfMean === null || b.varianceOfMean === null) {
 		throw new RangeError("Welch's test needs two readings or more on each side.");
 	}

@@ -16,6 +16,7 @@ export const partnerInput = z.object({
 	notes: paragraphs(20_000).default('')
 });
 export type PartnerInput = z.output<typeof partnerInput>;
+export const partnerEdit = partnerInput.extend({ version: versionSeen });
 
 /** A decimal amount as people type it, such as 1 249.50 or 1249,50; the service turns it into minor units. */
 const amount = line(40).default('');
@@ -81,3 +82,42 @@ export const embargoLift = z.object({
 	reason: paragraphs(1000).min(3, 'Say why it is lifted: the log keeps it.')
 });
 export type EmbargoLift = z.output<typeof embargoLift>;
+
+/** What the list of partners takes from its address. */
+export const partnersQuery = z.object({
+	q: z.string().trim().max(200).default(''),
+	page: z.coerce.number().int().min(1).max(100_000).default(1)
+});
+
+export const blankPartner: z.input<typeof partnerInput> = {
+	name: '',
+	contactName: '',
+	contactEmail: '',
+	notes: ''
+};
+export const blankLoan: z.input<typeof loanInput> = {
+	samples: [],
+	askedOn: '',
+	dueOn: '',
+	terms: '',
+	disclosure: '',
+	value: '',
+	currency: ''
+};
+export const blankLoanEdit: z.input<typeof loanEdit> = {
+	version: 1,
+	dueOn: '',
+	terms: '',
+	disclosure: '',
+	value: '',
+	currency: ''
+};
+export const blankMove: z.input<typeof loanMoveInput> = { version: 1, move: 'promise', on: '', note: '' };
+export const blankEmbargo: z.input<typeof embargoInput> = {
+	sample: '',
+	field: 'everything',
+	until: '',
+	zone: '',
+	note: ''
+};
+export const blankLift: z.input<typeof embargoLift> = { embargo: 0, reason: '' };

@@ -49,3 +49,6 @@ export const owedStages: readonly LoanStage[] = ['here', 'going-back'];
 
 /** Stages that end a loan. */
 export const closedStages: readonly LoanStage[] = ['returned', 'kept', 'lost'];
+
+/** Stages of a loan that goes on. */
+export const openStages: readonly LoanStage[] = ['asked-for', 'promised', 'in-transit', ...owedStages];

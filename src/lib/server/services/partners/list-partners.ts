@@ -1,25 +1,25 @@
 import { DateTime } from 'luxon';
 import { may } from '../../../domain/people/policy';
-import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
+import { done, refuse } from '../../../domain/shared/outcome';
 import type { LoanStage } from '../../../domain/stores/words';
+import { paged, pageSize } from '../../../schemas/listing';
 import type { Context } from '../../context';
 import * as loans from '../../db/queries/loan';
 import * as partners from '../../db/queries/partner';
+import { publication } from '../../db/queries/settings';
 
-const pageSize = 50;
+const todayIn = (zone: string, now: Date): string => DateTime.fromJSDate(now, { zone }).toISODate() ?? '';
 
-/** Partners by name, a page at a time, with open and overdue loans. `zone` decides what day today is. */
-export async function listPartners(
-	ctx: Context,
-	{ text, page, zone }: { text: string; page: number; zone: string }
-) {
+/** Partners by name, a page at a time, with open and overdue loans. */
+export async function listPartners(ctx: Context, { q, page }: { q: string; page: number }) {
 	if (!may(ctx.actor, 'partner.read')) return refuse('forbidden', 'Partners are the liaison’s.');
-	const today = DateTime.fromJSDate(ctx.now, { zone }).toISODate() ?? '';
+	const { zone } = await publication(ctx.db);
+	const today = todayIn(zone, ctx.now);
 	const [rows, total] = await Promise.all([
-		partners.list(ctx.db, { text, today, limit: pageSize, offset: (page - 1) * pageSize }),
-		partners.countMatching(ctx.db, text)
+		partners.list(ctx.db, { text: q, today, limit: pageSize, offset: (page - 1) * pageSize }),
+		partners.countMatching(ctx.db, q)
 	]);
-	return done({ rows, total, pages: Math.max(1, Math.ceil(total / pageSize)), today });
+	return done({ ...paged(rows, total, page), today });
 }
 
 /** Loans that are not closed, the soonest due first, with their samples. */
@@ -41,18 +41,10 @@ export async function listLoans(ctx: Context, stages: LoanStage[], partnerId?: n
 }
 
 /** A partner with every loan it made. */
-export async function readPartner(
-	ctx: Context,
-	slug: string
-): Promise<
-	Outcome<{ partner: NonNullable<Awaited<ReturnType<typeof partners.bySlug>>>; loans: ListedLoan[] }>
-> {
+export async function readPartner(ctx: Context, slug: string) {
 	if (!may(ctx.actor, 'partner.read')) return refuse('forbidden', 'Partners are the liaison’s.');
-	const partner = await partners.bySlug(ctx.db, slug);
+	const [partner, { zone }] = await Promise.all([partners.bySlug(ctx.db, slug), publication(ctx.db)]);
 	if (!partner) return refuse('not_found', 'There is no such partner.');
 	const made = await listLoans(ctx, [], partner.id);
-	return made.ok ? done({ partner, loans: made.value }) : made;
+	return made.ok ? done({ partner, loans: made.value, today: todayIn(zone, ctx.now) }) : made;
 }
-
-type Listed = Awaited<ReturnType<typeof listLoans>>;
-export type ListedLoan = Extract<Listed, { ok: true }>['value'][number];

@@ -8,13 +8,13 @@ import type { Context } from '../../context';
 import { inTransaction } from '../../db/client';
 import * as audit from '../../db/queries/audit';
 import * as loans from '../../db/queries/loan';
+import { publication } from '../../db/queries/settings';
 
-/** Takes a loan one step on, on the day it happened. `zone` decides what day today is. */
+/** Takes a loan one step on, on the day it happened: today, in the publication's zone, when none is given. */
 export async function moveLoan(
 	ctx: Context,
 	id: number,
-	input: LoanMoveInput,
-	zone: string
+	input: LoanMoveInput
 ): Promise<Outcome<{ stage: LoanStage }, 'forbidden' | 'not_found' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'loan.edit')) return refuse('forbidden', 'Only a liaison moves loans.');
 	return inTransaction(ctx.db, async (tx) => {
@@ -26,6 +26,7 @@ export async function moveLoan(
 				'conflict',
 				`“${loanMoveWords[input.move]}” does not follow: the loan is ${loanStageWords[before.stage]}. Nothing was changed.`
 			);
+		const { zone } = await publication(tx);
 		const on = input.on ?? DateTime.fromJSDate(ctx.now, { zone }).toISODate();
 		const dates =
 			stage === 'here' ? { receivedOn: on } : closedStages.includes(stage) ? { closedOn: on } : {};

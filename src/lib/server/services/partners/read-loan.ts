@@ -5,6 +5,7 @@ import type { Context } from '../../context';
 import * as audit from '../../db/queries/audit';
 import * as embargoes from '../../db/queries/embargo';
 import * as loans from '../../db/queries/loan';
+import { publication } from '../../db/queries/settings';
 import * as usage from '../../db/queries/sample-usage';
 
 /** A loan with its samples, embargoes, history, and the articles that use the samples: their title, stage and slot, never their text. */
@@ -13,7 +14,8 @@ export async function readLoan(ctx: Context, id: number) {
 	const found = await loans.byId(ctx.db, id);
 	if (!found) return refuse('not_found', 'There is no such loan.');
 	const samples = await loans.samplesOf(ctx.db, [id]);
-	const [articles, terms, history] = await Promise.all([
+	const [{ zone }, articles, terms, history] = await Promise.all([
+		publication(ctx.db),
 		usage.articlesOf(
 			ctx.db,
 			samples.map((s) => s.sampleId)
@@ -30,6 +32,8 @@ export async function readLoan(ctx: Context, id: number) {
 		embargoes: terms,
 		history,
 		articles: once,
-		moves: openMoves(found.loan.stage)
+		moves: openMoves(found.loan.stage),
+		zone,
+		now: ctx.now
 	});
 }

@@ -17,7 +17,9 @@ export async function addPartner(
 	input: PartnerInput
 ): Promise<Outcome<{ slug: string }, 'forbidden' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'partner.edit')) return refuse('forbidden', 'Only a liaison adds partners.');
-	const slug = slugOf(input.name);
+	const name = slugOf(input.name);
+	// The application's own pages stand beside the partners'.
+	const slug = ['new', 'loans'].includes(name) ? `${name}-partner` : name;
 	if (slug === '')
 		return refuse(
 			'invalid',

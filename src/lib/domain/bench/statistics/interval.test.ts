@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { relative } from './nearly';
+import { relative } from './nearly.fixture';
 import { meanInterval, studentQuantile, twoSidedP } from './interval';
 
 describe("Student's t", () => {

@@ -1,0 +1,193 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { compareCells, compareSummaries, welch } from './compare';
+import { relative } from './nearly.fixture';
+import { autoJapan, autoUs } from './published.fixture';
+import { summarise } from './summary';
+
+const treated = [1.53, 1.75, 2.12, 2.83, 2.58, 2.37, 2.92, 2.08, 3.01, 2.67, 2.06, 2.25, 3.08, 2.01, 1.58];
+const control = [
+	1.33, 1.78, 1.53, 1.95, 1.83, 1.47, 1.87, 1.55, 2.58, 2.17, 1.97, 1.62, 2.25, 3.53, 2.92, 1.78, 2.22, 2.55,
+	2.75
+];
+const faster = [104.2, 105.1, 103.8, 104.9, 104.5];
+const slower = [98.7, 99.4, 98.9, 99.9, 99.1];
+
+const expectInterval = (interval: [number, number] | null, low: number, high: number, tolerance = 1e-11) => {
+	expect(relative(interval?.[0] ?? Number.NaN, low)).toBeLessThan(tolerance);
+	expect(relative(interval?.[1] ?? Number.NaN, high)).toBeLessThan(tolerance);
+};
+
+describe("Fieller's interval of a ratio, unequal variances", () => {
+	it('ASAT (Hauschke 1999, CRAN mratios)', () => {
+		const { ratio, ci95, gainPercent } = compareCells(treated, control, 'higher', 1);
+		expect(ratio).toBeCloseTo(1.11300546448, 11);
+		expect(gainPercent).toBeCloseTo(11.300546448, 9);
+		expectInterval(ci95, 0.937668878136, 1.325086167725);
+	});
+
+	it('Mutagenicity (CRAN mratios), and the other way round', () => {
+		const [dosed, vehicle] = [
+			[15, 20, 32, 33],
+			[1, 2, 2, 2, 3, 3, 5]
+		];
+		const forth = compareCells(dosed, vehicle, 'higher', 1);
+		expect(forth.ratio).toBeCloseTo(9.72222222222, 10);
+		expectInterval(forth.ci95, 5.17164813995, 18.65952695647);
+		expectInterval(compareCells(dosed, vehicle, 'lower', 1).ci95, 0.0535919266514, 0.1933619559835);
+	});
+
+	it('five runs a side (R 4.2.2, t at 7.97182277573 degrees of freedom)', () => {
+		const { ratio, ci95 } = compareCells(faster, slower, 'higher', 1);
+		expect(ratio).toBeCloseTo(1.05342741935, 10);
+		expectInterval(ci95, 1.045957373, 1.06094762242, 1e-9);
+	});
+
+	it('is not printed where it has no end', () => {
+		// The baseline's mean is within its own error of zero: g ≥ 1.
+		expect(compareCells([10, 11, 12], [0.1, 5, 0.2], 'higher', 1)).toMatchObject({
+			ci95: null,
+			gainCi95: null,
+			verdict: 'not-enough'
+		});
+		expect(compareCells([0.1, 5, 0.2], [10, 11, 12], 'higher', 1)).toMatchObject({
+			ci95: null,
+			verdict: 'not-enough'
+		});
+	});
+
+	it('is the ratio alone where nothing varies', () => {
+		expect(compareCells([3, 3], [2, 2], 'higher', 1)).toMatchObject({ ci95: [1.5, 1.5], verdict: 'better' });
+	});
+
+	const side = fc.array(fc.double({ min: 90, max: 110, noNaN: true }), { minLength: 2, maxLength: 12 });
+
+	it('inverts exactly when the sides or the direction swap', () => {
+		fc.assert(
+			fc.property(side, side, (a, b) => {
+				const forth = compareCells(a, b, 'higher', 2);
+				for (const back of [compareCells(b, a, 'higher', 2), compareCells(a, b, 'lower', 2)]) {
+					expect(relative(back.ratio, 1 / forth.ratio)).toBeLessThan(1e-13);
+					expect(back.ci95 === null).toBe(forth.ci95 === null);
+					if (forth.ci95) expectInterval(back.ci95, 1 / forth.ci95[1], 1 / forth.ci95[0], 1e-11);
+				}
+			})
+		);
+	});
+
+	it('turns the verdict round with the sides', () => {
+		const turned = {
+			better: 'worse',
+			worse: 'better',
+			'no-difference': 'no-difference',
+			'not-enough': 'not-enough'
+		};
+		fc.assert(
+			fc.property(side, side, fc.double({ min: 0.1, max: 20, noNaN: true }), (a, b, least) => {
+				expect(compareCells(b, a, 'higher', least).verdict).toBe(
+					turned[compareCells(a, b, 'higher', least).verdict]
+				);
+			})
+		);
+	});
+
+	it('does not depend on order or unit', () => {
+		fc.assert(
+			fc.property(side, side, (a, b) => {
+				const plain = compareCells(a, b, 'higher', 2);
+				const other = compareCells(
+					[...a].reverse().map((value) => value * 1000),
+					b.map((value) => value * 1000),
+					'higher',
+					2
+				);
+				expect(relative(other.ratio, plain.ratio)).toBeLessThan(1e-12);
+				if (plain.ci95) expectInterval(other.ci95, ...plain.ci95, 1e-10);
+			})
+		);
+	});
+
+	it('is the same from summaries as from readings', () => {
+		expect(compareSummaries(summarise(treated), summarise(control), 'lower', 3)).toEqual(
+			compareCells(treated, control, 'lower', 3)
+		);
+	});
+});
+
+describe('the verdict', () => {
+	it('asks that the whole interval lies beyond what does not matter', () => {
+		// 95 %: 1.04596 to 1.06095.
+		expect(compareCells(faster, slower, 'higher', 4).verdict).toBe('better');
+		expect(compareCells(faster, slower, 'lower', 4).verdict).toBe('worse');
+		expect(compareCells(faster, slower, 'higher', 5).verdict).toBe('not-enough');
+		expect(compareCells(faster, slower, 'higher', 7).verdict).toBe('no-difference');
+	});
+
+	it('calls it no difference from the 90 % interval, as two one-sided tests do', () => {
+		// Schuirmann 1987: at 6 % the 95 % interval (to 1.06095) crosses the margin and the 90 % one does not.
+		const { ci95, verdict } = compareCells(faster, slower, 'higher', 6);
+		expect(ci95?.[1]).toBeGreaterThan(1.06);
+		expect(verdict).toBe('no-difference');
+	});
+
+	it('needs two readings a side', () => {
+		expect(compareCells([200], slower, 'higher', 1)).toMatchObject({
+			ci95: null,
+			gainCi95: null,
+			verdict: 'not-enough'
+		});
+		expect(compareCells([200], [100], 'higher', 1)).toMatchObject({
+			ratio: 2,
+			gainPercent: 100,
+			verdict: 'not-enough'
+		});
+	});
+
+	it('refuses what has no ratio', () => {
+		expect(() => compareCells([], slower, 'higher', 1)).toThrow(RangeError);
+		expect(() => compareCells([0, 0], slower, 'higher', 1)).toThrow(RangeError);
+		expect(() => compareCells(faster, [-5, -6], 'higher', 1)).toThrow(RangeError);
+		expect(() => compareCells([1, Number.NaN], slower, 'higher', 1)).toThrow(RangeError);
+	});
+
+	it('keeps percent changes apart from time saved: 125 s to 100 s is 25 % faster', () => {
+		expect(compareCells([100, 100], [125, 125], 'lower', 1).gainPercent).toBeCloseTo(25, 12);
+	});
+});
+
+describe("Welch's test", () => {
+	it('AUTO83B (e-Handbook §1.3.5.3; Boost.Math prints df 136.87, T −12.946, p 1.571e-025)', () => {
+		const { t, df, p, ci } = welch(autoUs, autoJapan);
+		expect(relative(t, -12.9462732749)).toBeLessThan(1e-11);
+		expect(relative(df, 136.874976673)).toBeLessThan(1e-11);
+		expect(relative(p, 1.57085e-25)).toBeLessThan(1e-5);
+		expectInterval(ci, -11.91524809464, -8.75762059531);
+	});
+
+	it('sleep (Student 1908; R 4.2.2 and SciPy)', () => {
+		const { t, df, p, ci, difference } = welch(
+			[0.7, -1.6, -0.2, -1.2, -0.1, 3.4, 3.7, 0.8, 0, 2],
+			[1.9, 0.8, 1.1, 0.1, -0.1, 4.4, 5.5, 1.6, 4.6, 3.4]
+		);
+		expect(difference).toBeCloseTo(-1.58, 12);
+		expect(relative(t, -1.86081346749)).toBeLessThan(1e-11);
+		expect(relative(df, 17.7764735162)).toBeLessThan(1e-11);
+		expect(relative(p, 0.0793941401874)).toBeLessThan(1e-11);
+		expectInterval(ci, -3.365483230712, 0.205483230712);
+	});
+
+	it('the 90 % interval by which equivalence is judged (CRAN TOSTER, test-NCSS1)', () => {
+		const first = [452, 874, 554, 447, 356, 754, 558, 574, 664, 682, 547, 435, 245];
+		const second = [546, 547, 774, 465, 459, 665, 467, 365, 589, 534, 456, 651, 654, 665, 546, 537];
+		const at90 = welch(first, second, 0.9);
+		expect(at90.df).toBeCloseTo(19.1690023743, 9);
+		expect(at90.p).toBeCloseTo(0.881277932362, 10);
+		expectInterval(at90.ci, -100.7871506371, 84.5563814063);
+		expectInterval(welch(first, second).ci, -120.27336, 104.04259, 1e-7);
+	});
+
+	it('refuses a single reading and what does not vary', () => {
+		expect(() => welch([1], [1, 2])).toThrow(RangeError);
+		expect(() => welch([1, 1], [2, 2])).toThrow(RangeError);
+	});
+});

@@ -15,6 +15,7 @@ export const shapes = {
 	ring: { path: 'M5.5 1.5a4 4 0 1 1 0 8a4 4 0 1 1 0-8z', stroke: 2 },
 	bar: { path: 'M0 5.5h11', stroke: 2.4 },
 	pennant: { path: 'M1.5 11V1h8L7 4l2.5 3h-7', stroke: 1.8 },
+	gate: { path: 'M1 1.5h9M1 9.5h9M5.5 1.5v8', stroke: 2 },
 	rails: { path: 'M3 .5v10M8 .5v10', stroke: 2.2 },
 	triangle: { path: 'M5.5 .5l5.3 9.5H.2z', stroke: 0 },
 	chevron: { path: 'M3 1l5 4.5L3 10', stroke: 2 }
@@ -34,7 +35,7 @@ export const kinds = {
 	caution: { shape: 'triangle', ink: 'red' },
 	waiting: { shape: 'clock', ink: 'brass' },
 	loan: { shape: 'rails', ink: 'brass' },
-	embargo: { shape: 'bar', ink: 'brass' },
+	embargo: { shape: 'gate', ink: 'brass' },
 	info: { shape: 'square', ink: 'blue' },
 	advice: { shape: 'chevron', ink: 'blue' },
 	open: { shape: 'ring', ink: 'graphite' },

@@ -111,3 +111,32 @@ export const blankCampaign = (rig: string): CampaignTyped => ({
 	purpose: '',
 	dueOn: ''
 });
+
+export const campaignsApiQuery = z.object({
+	q: z.string().trim().max(200).default('').describe('Words in the name, the slug or the name of the rig.'),
+	rig: z.string().trim().max(80).default('').describe('Slug of a rig.'),
+	state: z.enum(['open', ...campaignStates, 'all']).default('all'),
+	limit: z.coerce.number('Give a whole number.').int('Give a whole number.').min(1).max(200).default(50),
+	after: z.coerce
+		.number('Pass `next` of the page before.')
+		.int()
+		.positive()
+		.optional()
+		.describe('`next` of the page before.')
+});
+export type CampaignsApiQuery = z.output<typeof campaignsApiQuery>;
+
+export const summaryQuery = z.object({
+	baseline: z
+		.string()
+		.trim()
+		.max(80)
+		.optional()
+		.describe('Slug or id of the profile the others are held against; stock when left out.')
+});
+
+/** Which cell of a board an address selects. */
+export const cellQuery = z.object({
+	profile: z.string().trim().max(80).catch('').default(''),
+	workload: z.string().trim().max(80).catch('').default('')
+});

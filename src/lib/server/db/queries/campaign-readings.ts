@@ -14,6 +14,7 @@ const runsOf = (db: Db, campaignIds: number[]) =>
 			workload: workload.slug,
 			tester: user.name,
 			testerId: run.testerId,
+			version: run.version,
 			source: run.source,
 			clientKey: run.clientKey,
 			startedAt: run.startedAt,

@@ -5,6 +5,7 @@ import {
 	desc,
 	eq,
 	exists,
+	gt,
 	isNotNull,
 	isNull,
 	like,
@@ -22,8 +23,10 @@ export interface CampaignFilter {
 	text: string;
 	rig: string;
 	state: CampaignState | 'open' | 'all';
-	sort: 'created' | 'due' | 'name';
+	sort: 'created' | 'due' | 'name' | 'id';
 	way: 'up' | 'down';
+	/** Only rows after this id. */
+	after?: number;
 	limit: number;
 	offset: number;
 }
@@ -62,7 +65,10 @@ function inState(db: Db, state: CampaignFilter['state']): SQL | undefined {
 	return state === 'open' ? open : undefined;
 }
 
-const matching = (db: Db, filter: Pick<CampaignFilter, 'text' | 'rig' | 'state'>): SQL | undefined =>
+const matching = (
+	db: Db,
+	filter: Pick<CampaignFilter, 'text' | 'rig' | 'state' | 'after'>
+): SQL | undefined =>
 	and(
 		filter.text === ''
 			? undefined
@@ -72,11 +78,13 @@ const matching = (db: Db, filter: Pick<CampaignFilter, 'text' | 'rig' | 'state'>
 					like(rig.name, escaped(filter.text))
 				),
 		filter.rig === '' ? undefined : eq(rig.slug, filter.rig),
-		inState(db, filter.state)
+		inState(db, filter.state),
+		filter.after === undefined ? undefined : gt(campaign.id, filter.after)
 	);
 
 function order({ sort, way }: CampaignFilter): SQL[] {
 	const turned = way === 'up' ? asc : desc;
+	if (sort === 'id') return [turned(campaign.id)];
 	if (sort === 'name') return [turned(campaign.name), asc(campaign.id)];
 	// What has no due date comes last, whichever way.
 	if (sort === 'due') return [asc(sql`${campaign.dueAt} is null`), turned(campaign.dueAt), desc(campaign.id)];

@@ -1,4 +1,4 @@
-import { and, eq, isNull } from 'drizzle-orm';
+import { and, eq, inArray, isNull } from 'drizzle-orm';
 import type { Db } from '../client';
 import { cellSignature } from '../schema';
 
@@ -8,7 +8,7 @@ export interface Cell {
 	workloadId: number;
 }
 
-/** Standing signatures of a campaign. */
+/** Standing signatures of a campaign, as they are now, locked until the transaction ends. */
 export const standing = (db: Db, campaignId: number) =>
 	db
 		.select({
@@ -19,24 +19,15 @@ export const standing = (db: Db, campaignId: number) =>
 			signedAt: cellSignature.signedAt
 		})
 		.from(cellSignature)
-		.where(and(eq(cellSignature.campaignId, campaignId), isNull(cellSignature.removedAt)));
+		.where(and(eq(cellSignature.campaignId, campaignId), isNull(cellSignature.removedAt)))
+		.for('update');
 
 export async function insertMany(db: Db, rows: (typeof cellSignature.$inferInsert)[]): Promise<void> {
 	if (rows.length > 0) await db.insert(cellSignature).values(rows);
 }
 
-/** Takes the standing signature off a cell; false where there was none. */
-export async function takeOff(db: Db, cell: Cell, removedAt: Date, removedReason: string): Promise<boolean> {
-	const [result] = await db
-		.update(cellSignature)
-		.set({ removedAt, removedReason })
-		.where(
-			and(
-				eq(cellSignature.campaignId, cell.campaignId),
-				eq(cellSignature.profileId, cell.profileId),
-				eq(cellSignature.workloadId, cell.workloadId),
-				isNull(cellSignature.removedAt)
-			)
-		);
-	return result.affectedRows > 0;
+/** Takes signatures off, with the reason. */
+export async function takeOff(db: Db, ids: number[], removedAt: Date, removedReason: string): Promise<void> {
+	if (ids.length > 0)
+		await db.update(cellSignature).set({ removedAt, removedReason }).where(inArray(cellSignature.id, ids));
 }

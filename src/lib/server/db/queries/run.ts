@@ -1,4 +1,4 @@
-import { and, eq, like, sql } from 'drizzle-orm';
+import { and, eq, inArray, like, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { profile, run, user, workload } from '../schema';
 
@@ -8,11 +8,27 @@ export async function insert(db: Db, row: typeof run.$inferInsert): Promise<numb
 	return created.id;
 }
 
-/** Several runs at once; their ids in the order given. */
-export async function insertMany(db: Db, rows: (typeof run.$inferInsert)[]): Promise<number[]> {
-	if (rows.length === 0) return [];
-	const created = await db.insert(run).values(rows).$returningId();
-	return created.map((row) => row.id);
+/** Several runs at once, each with a key of its own; their ids by key, for a cluster does not count in steps of one. */
+export async function insertMany(
+	db: Db,
+	testerId: string,
+	rows: (Omit<typeof run.$inferInsert, 'testerId'> & { clientKey: string })[]
+): Promise<Map<string, number>> {
+	if (rows.length === 0) return new Map();
+	await db.insert(run).values(rows.map((row) => ({ ...row, testerId })));
+	const written = await db
+		.select({ id: run.id, clientKey: run.clientKey })
+		.from(run)
+		.where(
+			and(
+				eq(run.testerId, testerId),
+				inArray(
+					run.clientKey,
+					rows.map((row) => row.clientKey)
+				)
+			)
+		);
+	return new Map(written.flatMap((row) => (row.clientKey === null ? [] : [[row.clientKey, row.id]])));
 }
 
 /** The run row, locked until the transaction ends. */

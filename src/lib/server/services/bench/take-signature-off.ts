@@ -7,12 +7,32 @@ export interface NamedCell extends signatures.Cell {
 	name: string;
 }
 
-/** Takes the standing signature off a cell whose data changed, and says so in the history; false where there was none. */
-export async function takeSignatureOff(ctx: Context, cell: NamedCell, reason: string): Promise<boolean> {
+/**
+ * Takes the standing signatures off cells whose data changed, and says so in the history. Returns how many there were.
+ * The cells are locked by the caller.
+ */
+export async function takeSignaturesOff(
+	ctx: Context,
+	cells: readonly NamedCell[],
+	reason: string
+): Promise<number> {
+	const [first] = cells;
+	if (!first) return 0;
+	const standing = await signatures.standing(ctx.db, first.campaignId);
+	const signed = standing.flatMap((row) => {
+		const cell = cells.find((one) => one.profileId === row.profileId && one.workloadId === row.workloadId);
+		return cell ? [{ id: row.id, cell }] : [];
+	});
 	const written = reason.slice(0, 300);
-	if (!(await signatures.takeOff(ctx.db, cell, ctx.now, written))) return false;
-	await audit.append(ctx.db, [
-		{
+	await signatures.takeOff(
+		ctx.db,
+		signed.map((row) => row.id),
+		ctx.now,
+		written
+	);
+	await audit.append(
+		ctx.db,
+		signed.map(({ cell }) => ({
 			at: ctx.now,
 			actorId: ctx.actor.id,
 			act: 'cell.unsign',
@@ -21,7 +41,11 @@ export async function takeSignatureOff(ctx: Context, cell: NamedCell, reason: st
 			before: { cell: cell.name, signed: true },
 			after: { cell: cell.name, signed: false },
 			reason: written
-		}
-	]);
-	return true;
+		}))
+	);
+	return signed.length;
 }
+
+/** As takeSignaturesOff, of one cell; false where there was none. */
+export const takeSignatureOff = async (ctx: Context, cell: NamedCell, reason: string): Promise<boolean> =>
+	(await takeSignaturesOff(ctx, [cell], reason)) > 0;

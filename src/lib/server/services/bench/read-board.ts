@@ -1,0 +1,152 @@
+import { campaignState, type CampaignState } from '../../../domain/bench/campaign-state';
+import { countedReadings } from '../../../domain/bench/campaign';
+import type { CellFigures, WorkloadFacts } from '../../../domain/bench/figures';
+import { currentProfile, progress, toRun, type Progress, type ToRun } from '../../../domain/bench/progress';
+import type { RunSource } from '../../../domain/bench/words';
+import { may } from '../../../domain/people/policy';
+import { done, type Outcome } from '../../../domain/shared/outcome';
+import type { Context } from '../../context';
+import * as articles from '../../db/queries/campaign-articles';
+import type { CampaignHead } from '../../db/queries/campaign-facts';
+import * as settings from '../../db/queries/settings';
+import { readCampaign, type MeasuredCampaign } from './read-campaign';
+
+export interface BoardReading {
+	id: number;
+	value: number;
+	/** The reason, where it does not count. */
+	excluded: string | null;
+}
+
+export interface BoardRun {
+	id: number;
+	version: number;
+	tester: string;
+	source: RunSource;
+	startedAt: Date;
+	ambientC: number | null;
+	notes: string;
+	/** The reason, where the run does not count. */
+	voided: string | null;
+	readings: BoardReading[];
+}
+
+export interface Board {
+	head: CampaignHead;
+	state: CampaignState;
+	articles: { slug: string; title: string }[];
+	profiles: { slug: string; name: string }[];
+	workloads: (WorkloadFacts & { needed: number })[];
+	baseline: string;
+	cells: CellFigures[];
+	progress: Progress;
+	signed: number;
+	/** What to run now and how many readings are left before the next restart of the rig; null when nothing is left. */
+	next: (ToRun & { leftInProfile: number }) | null;
+	selected: { profile: string; workload: string; runs: BoardRun[]; baselineValues: number[] | null };
+	zone: string;
+	may: { plan: boolean; record: boolean; sign: boolean };
+}
+
+function nextToRun({ matrix, figures }: MeasuredCampaign): Board['next'] {
+	const left = toRun(figures.cells, currentProfile(matrix.runs));
+	const [first] = left;
+	if (!first) return null;
+	const inProfile = left.filter((cell) => cell.profile === first.profile);
+	return { ...first, leftInProfile: inProfile.reduce((sum, cell) => sum + cell.remaining, 0) };
+}
+
+/** The cell the address names; else the next to run, else the first. */
+function select(
+	{ plan }: MeasuredCampaign,
+	wanted: { profile: string; workload: string },
+	next: Board['next']
+) {
+	const slugOf = (rows: { slug: string }[], ...refs: (string | undefined)[]) =>
+		refs.find((ref) => rows.some((row) => row.slug === ref)) ?? rows[0]?.slug ?? '';
+	const named = wanted.profile !== '' || wanted.workload !== '';
+	return {
+		profile: slugOf(plan.profiles, wanted.profile, named ? undefined : next?.profile),
+		workload: slugOf(plan.workloads, wanted.workload, named ? undefined : next?.workload)
+	};
+}
+
+function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workload: string }): BoardRun[] {
+	return recorded.runs
+		.filter((run) => run.profile === cell.profile && run.workload === cell.workload)
+		.map((run) => ({
+			id: run.id,
+			version: run.version,
+			tester: run.tester,
+			source: run.source,
+			startedAt: run.startedAt,
+			ambientC: run.ambientC,
+			notes: run.notes,
+			voided: run.voidReason,
+			readings: run.readings.map(({ id, value, excludeReason }) => ({
+				id,
+				value,
+				excluded: excludeReason
+			}))
+		}));
+}
+
+function boardOf(
+	measured: MeasuredCampaign,
+	wanted: { profile: string; workload: string }
+): Omit<Board, 'articles' | 'zone' | 'may'> {
+	const { plan, matrix, figures, recorded } = measured;
+	const next = nextToRun(measured);
+	const cell = select(measured, wanted, next);
+	const signed = figures.cells.filter((one) => one.signedAt !== null).length;
+	return {
+		head: plan.head,
+		state: campaignState({
+			archived: plan.head.archivedAt !== null,
+			runs: recorded.runs.filter((run) => run.voidedAt === null).length,
+			cells: figures.cells.length,
+			signed
+		}),
+		profiles: plan.profiles.map(({ slug, name }) => ({ slug, name })),
+		workloads: plan.workloads,
+		baseline: matrix.baseline,
+		cells: figures.cells,
+		progress: progress(figures.cells),
+		signed,
+		next,
+		selected: {
+			...cell,
+			runs: runsOf(measured, cell),
+			baselineValues:
+				cell.profile === matrix.baseline
+					? null
+					: countedReadings(
+							matrix.runs.filter((run) => run.profile === matrix.baseline && run.workload === cell.workload)
+						).map((reading) => reading.value)
+		}
+	};
+}
+
+/** The campaign's board: the matrix, how far it is, what to run next, and the selected cell whole. */
+export async function readBoard(
+	ctx: Context,
+	campaignRef: string,
+	wanted: { profile: string; workload: string }
+): Promise<Outcome<Board>> {
+	const measured = await readCampaign(ctx, campaignRef);
+	if (!measured.ok) return measured;
+	const [bound, { zone }] = await Promise.all([
+		articles.ofCampaign(ctx.db, measured.value.plan.head.id),
+		settings.publication(ctx.db)
+	]);
+	return done({
+		...boardOf(measured.value, wanted),
+		articles: bound.map(({ slug, title }) => ({ slug, title })),
+		zone,
+		may: {
+			plan: may(ctx.actor, 'bench.plan'),
+			record: may(ctx.actor, 'run.record'),
+			sign: may(ctx.actor, 'cell.sign')
+		}
+	});
+}

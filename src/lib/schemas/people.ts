@@ -80,3 +80,9 @@ export type PublicationInput = z.output<typeof publicationInput>;
 export const rowInput = z.object({ id: z.coerce.number<number>().int().positive() });
 export const dropJobInput = rowInput.extend({ reason });
 export type DropJobInput = z.output<typeof dropJobInput>;
+
+/** Forms as they open. */
+export const blankSignIn = { email: '', password: '', to: '' };
+export const blankLink = { email: '', to: '' };
+export const blankInvite: z.input<typeof inviteInput> = { name: '', email: '', roles: [] };
+export const blankToken: z.input<typeof tokenInput> = { name: '', scopes: [], days: '90' };

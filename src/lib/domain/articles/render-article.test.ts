@@ -181,12 +181,9 @@ describe('directives', () => {
 
 describe('blocks', () => {
 	it('sets steps in menu order, each caution beside its step', () => {
-		const { html, risks, cautions } = render('::steps{profile=huge-pages}');
+		const { html, cautions } = render('::steps{profile=huge-pages}');
 		expect(html.indexOf('Tuning › Clocks')).toBeLessThan(html.indexOf('Core ratio'));
 		expect(html).toMatch(/Core voltage[\s\S]*1\.24\u00a0V[\s\S]*6\.0\u00a0% over stock/);
-		expect(risks).toEqual([
-			{ topic: 'voltage', setting: 'Core voltage', campaign: 'two-cores', profile: 'huge-pages', line: 1 }
-		]);
 		expect(cautions).toEqual(['voltage']);
 	});
 	it('lists the kit with its sum and the days of its prices', () => {

@@ -1,7 +1,7 @@
 import type { Token } from 'marked';
 import { isDirective, type DirectiveToken } from './directive-syntax';
 import type { ArticleData } from './data';
-import type { BoundFigure, CautionTopic, Draw, Printed, Problem, Risk, UsedCell } from './directives/shape';
+import type { BoundFigure, CautionTopic, Draw, Printed, Problem, UsedCell } from './directives/shape';
 import { element, escapeHtml } from './html';
 import { isSafeLink, isSameSitePath } from './links';
 import { refusalOf } from './limits';
@@ -42,8 +42,6 @@ export interface Rendered {
 	};
 	/** Topics of the cautions the page gives, beside a step or on their own. */
 	cautions: CautionTopic[];
-	/** Settings shown that can cost hardware. */
-	risks: Risk[];
 	hasDisclosure: boolean;
 	headings: Heading[];
 	wordCount: number;
@@ -62,7 +60,6 @@ const empty = (): Rendered => ({
 	bound: [],
 	uses: { campaigns: [], profiles: [], cells: [] },
 	cautions: [],
-	risks: [],
 	hasDisclosure: false,
 	headings: [],
 	wordCount: 0,
@@ -167,7 +164,6 @@ class Setting {
 		if (printed.plate) out.plates.push({ key: plateKey(printed.plate), spec: printed.plate });
 		if (printed.disclosure) out.hasDisclosure = true;
 		out.cautions.push(...(printed.cautions ?? []));
-		out.risks.push(...(printed.risks ?? []));
 		out.uses.cells.push(...(printed.cells ?? []));
 		out.uses.profiles.push(...(printed.profiles ?? []));
 		out.uses.campaigns.push(...(printed.campaigns ?? []));

@@ -1,3 +1,4 @@
+import type { RaiseTopic } from '../../bench/tuning/raises';
 import type { CautionTopic } from './shape';
 
 export interface CautionText {
@@ -48,7 +49,7 @@ export const cautionTexts: Record<CautionTopic, CautionText> = {
 };
 
 /** The short form that stands beside a step. */
-export const stepCautions: Partial<Record<CautionTopic, string>> = {
+export const stepCautions: Record<RaiseTopic, string> = {
 	voltage:
 		'More voltage means more heat and a shorter life. The maker’s limit for your part stands above ours.',
 	power:

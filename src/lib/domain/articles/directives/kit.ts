@@ -1,7 +1,7 @@
 import { formatMoney } from '../../shared/money';
 import { printedDay } from '../dates';
 import { element, escapeHtml } from '../html';
-import { nearest } from '../nearest';
+import { namesNear } from '../names-near';
 import type { CampaignData, KitLine } from '../data';
 import { campaignsOf } from './lookup';
 import { directive, found, missing } from './shape';
@@ -70,7 +70,7 @@ export const kit = directive<CampaignData>({
 		if (!newest)
 			return missing(
 				`No campaign of this article used a rig called “${name ?? ''}”.`,
-				nearest(name ?? '', rigs)
+				namesNear(name ?? '', rigs)
 			);
 		return newest.kit.length > 0
 			? found(newest)

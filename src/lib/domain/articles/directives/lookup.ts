@@ -1,6 +1,6 @@
 import type { CellFigures, Comparison, Summary, WorkloadFacts } from '../../bench/figures';
 import type { ArticleData, CampaignData, ProfileFacts } from '../data';
-import { nearest } from '../nearest';
+import { namesNear } from '../names-near';
 import { found, missing, type Attribute, type Call, type Lookup, type Values } from './shape';
 
 /** A profile in the campaign that has it. */
@@ -28,7 +28,10 @@ export function campaignsOf(call: Call, data: ArticleData): Lookup<CampaignData[
 	const campaign = data.campaigns.find((one) => one.slug === name);
 	return campaign
 		? found([campaign])
-		: missing(`This article is bound to no campaign called “${name}”.`, nearest(name, slugs(data.campaigns)));
+		: missing(
+				`This article is bound to no campaign called “${name}”.`,
+				namesNear(name, slugs(data.campaigns))
+			);
 }
 
 /** Picks the one campaign of those that have everything named, or says that there are several. */
@@ -61,7 +64,7 @@ export function findProfile(call: Call, data: ArticleData): Lookup<ProfilePlace>
 	return only(call, places, slugs(places.map((place) => place.campaign)), () =>
 		missing(
 			`No profile of this article's campaigns is called “${name}”.`,
-			nearest(
+			namesNear(
 				name,
 				campaigns.value.flatMap((campaign) => slugs(campaign.profiles))
 			)
@@ -84,7 +87,7 @@ export function findWorkload(
 	return only(call, places, slugs(places.map((place) => place.campaign)), () =>
 		missing(
 			`No workload of this article's campaigns is called “${name}”.`,
-			nearest(
+			namesNear(
 				name,
 				campaigns.value.flatMap((campaign) => slugs(campaign.workloads))
 			)
@@ -136,7 +139,7 @@ export function findBaseline(call: Call, campaign: CampaignData): Lookup<Profile
 		? found(profile)
 		: missing(
 				`${campaign.name} has no profile called “${name}” to hold this against.`,
-				nearest(name, slugs(campaign.profiles))
+				namesNear(name, slugs(campaign.profiles))
 			);
 }
 

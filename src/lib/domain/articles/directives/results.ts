@@ -3,7 +3,7 @@ import { printed, printedGain, printedPercent, printedRange } from '../../shared
 import { comparisonOver } from '../against';
 import { precisionOf } from '../figures-in-words';
 import { element, table } from '../html';
-import { nearest } from '../nearest';
+import { namesNear } from '../names-near';
 import type { CampaignData, ProfileFacts } from '../data';
 import { attribute, figuresOf, findBaseline, findCampaign } from './lookup';
 import { directive, found, missing, type UsedCell } from './shape';
@@ -62,7 +62,7 @@ export const results = directive<Results>({
 		const only = call.attributes.workload;
 		const known = campaign.value.workloads.map((one) => one.slug);
 		if (only !== undefined && !known.includes(only)) {
-			return missing(`${campaign.value.name} has no workload called “${only}”.`, nearest(only, known));
+			return missing(`${campaign.value.name} has no workload called “${only}”.`, namesNear(only, known));
 		}
 		const { rows, cells } = rowsOf(campaign.value, over.value, only);
 		return cells.length === 0

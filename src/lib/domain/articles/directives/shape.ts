@@ -51,15 +51,6 @@ export interface UsedCell {
 	workload: string;
 }
 
-/** A setting shown to readers that can cost them hardware, with the caution it calls for. */
-export interface Risk {
-	topic: CautionTopic;
-	campaign: string;
-	profile: string;
-	setting: string;
-	line: number;
-}
-
 /** What a directive leaves behind besides its markup. */
 export interface Trace {
 	bound?: BoundFigure;
@@ -68,7 +59,6 @@ export interface Trace {
 	profiles?: { campaign: string; profile: string }[];
 	campaigns?: string[];
 	cautions?: CautionTopic[];
-	risks?: Risk[];
 	disclosure?: true;
 }
 

@@ -1,0 +1,84 @@
+import type { Config } from 'dompurify';
+import { isSafeLink, isSameSitePath } from './links';
+
+/**
+ * What may stand on a page, the same for the preview and the edition. DOMPurify is the last step of both:
+ * nothing touches the markup after it.
+ */
+export const sanitiseConfig = {
+	ALLOWED_TAGS: [
+		...[
+			'p',
+			'h2',
+			'h3',
+			'h4',
+			'h5',
+			'h6',
+			'br',
+			'hr',
+			'blockquote',
+			'pre',
+			'code',
+			'em',
+			'strong',
+			'del',
+			'a',
+			'img'
+		],
+		...['ul', 'ol', 'li', 'table', 'caption', 'thead', 'tbody', 'tfoot', 'tr', 'th', 'td'],
+		...['figure', 'figcaption', 'details', 'summary', 'aside', 'section', 'div', 'span'],
+		// Plates: shapes and words alone, nothing that links, embeds, animates or refers.
+		...['svg', 'g', 'path', 'rect', 'circle', 'line', 'text', 'tspan', 'title', 'desc', '#text']
+	],
+	ALLOWED_ATTR: [
+		...['id', 'class', 'title', 'href', 'rel', 'src', 'alt', 'loading', 'start', 'scope', 'role', 'tabindex'],
+		...['aria-label', 'data-line', 'data-plate', 'data-plate-file', 'data-rig', 'data-topic'],
+		...['data-campaign', 'data-workload', 'data-profile', 'data-over', 'data-verdict'],
+		...[
+			'xmlns',
+			'viewbox',
+			'width',
+			'height',
+			'x',
+			'y',
+			'x1',
+			'x2',
+			'y1',
+			'y2',
+			'cx',
+			'cy',
+			'r',
+			'd',
+			'transform'
+		],
+		...[
+			'fill',
+			'fill-opacity',
+			'stroke',
+			'stroke-width',
+			'stroke-opacity',
+			'stroke-dasharray',
+			'stroke-linejoin'
+		],
+		...['font-size', 'font-weight', 'text-anchor', 'paint-order', 'opacity', 'rx', 'ry']
+	],
+	ALLOW_DATA_ATTR: false,
+	ALLOW_ARIA_ATTR: false,
+	FORBID_TAGS: ['script', 'style', 'noscript', 'iframe', 'textarea', 'xmp', 'form', 'template', 'math'],
+	// The words of what is refused would only puzzle a reader.
+	KEEP_CONTENT: false,
+	SANITIZE_DOM: true
+} satisfies Config;
+
+const paint = /^(?:none|currentcolor|var\(--color-[a-z-]+\))$/i;
+
+/**
+ * A second look at each attribute that leads somewhere or could: DOMPurify lets a data: image pass, and a
+ * paint may name an outside address. Returns whether the attribute may stay.
+ */
+export function mayStay(tag: string, name: string, value: string): boolean {
+	if (name === 'href') return isSafeLink(value) || /^(?:plates|[\w-]+\/plates)\/[\w.-]+$/.test(value);
+	if (name === 'src') return tag === 'img' && isSameSitePath(value) && value.startsWith('/');
+	if (name === 'fill' || name === 'stroke') return paint.test(value);
+	return true;
+}

@@ -1,10 +1,13 @@
 import { z } from 'zod';
+import { isReading } from '../domain/bench/numbers';
 import { line, paragraphs, reference, versionSeen } from './fields';
 
 /** Readings that one run may carry. */
 export const readingsPerRun = 1000;
 
-const finite = z.number('Each reading must be a finite number.');
+const finite = z
+	.number('Each reading must be a finite number.')
+	.refine(isReading, 'A reading is zero, or between 1e-100 and 1e100 in size.');
 
 const ambientC = z
 	.number('The ambient temperature is a number, in °C.')
@@ -20,6 +23,8 @@ const startedAt = z.iso
 	.default(null);
 
 const unit = z.string('Say in which unit the readings are.').trim().max(40, 'Keep it to 40 characters.');
+/** Local time in the publication's zone, as the browser's field gives it; empty for none. */
+const localTime = z.string().trim().max(40).default('');
 const notes = paragraphs(5000).default('');
 
 /** A key that a client makes and repeats when it sends the same thing again. */
@@ -50,6 +55,8 @@ export const gridInput = z.object({
 	runKey: key,
 	ambientC,
 	startedAt,
+	/** Local time in the publication's zone, as typed; it goes before `startedAt`. */
+	started: localTime,
 	notes,
 	/** Empty to bring only the circumstances up to date. */
 	readings: list(z.object({ key, value: finite }))
@@ -70,8 +77,8 @@ export const plainRun = z.object({
 		.string('Write one reading a line.')
 		.max(plainReadingsLimit, 'That is too much for one run. Nothing was entered; paste a smaller block.'),
 	ambient: z.string().trim().max(40).default(''),
-	/** Local time in the publication's zone, as the browser's field gives it; empty for now. */
-	started: z.string().trim().max(40).default(''),
+	/** Empty for now. */
+	started: localTime,
 	notes
 });
 export type PlainRun = z.output<typeof plainRun>;
@@ -81,7 +88,7 @@ export const runEdit = z.object({
 	run: z.coerce.number().int().positive(),
 	version: versionSeen,
 	ambient: z.string().trim().max(40).default(''),
-	started: z.string().trim().max(40).default(''),
+	started: localTime,
 	notes
 });
 export type RunEdit = z.output<typeof runEdit>;

@@ -5,6 +5,14 @@ export type ParsedNumber = { ok: true; value: number } | { ok: false; message: s
 /** How a file writes decimals, where that is known; typed numbers may use either. */
 export type DecimalMark = 'point' | 'comma' | 'either';
 
+/** Between these the statistics neither overflow nor vanish; nothing that is measured comes near them. */
+const greatest = 1e100;
+const least = 1e-100;
+
+/** Whether a number can be kept as a reading: finite, and zero or between 1e-100 and 1e100 in size. */
+export const isReading = (value: number): boolean =>
+	value === 0 || (Math.abs(value) >= least && Math.abs(value) <= greatest);
+
 const refused = (message: string): ParsedNumber => ({ ok: false, message });
 
 // A space between digits groups thousands: plain, no-break, thin, figure or narrow no-break.
@@ -35,8 +43,8 @@ function outOfForm(text: string): ParsedNumber {
 
 /**
  * A reading as a person or a file writes it: decimal point or comma, spaces between thousands, a minus sign of
- * either kind, a power of ten. Refused with the reason: text, nothing, NaN, Infinity, other bases, what a double
- * cannot hold, and a comma that could as well group thousands (1,234) where the file does not settle it.
+ * either kind, a power of ten. Refused with the reason: text, nothing, NaN, Infinity, other bases, what is too
+ * large or small for a reading, and a comma that could as well group thousands (1,234) where the file does not settle it.
  * @example parseReading('3 322 298,25') // { ok: true, value: 3322298.25 }
  */
 export function parseReading(typed: string, decimal: DecimalMark = 'either'): ParsedNumber {
@@ -60,9 +68,9 @@ export function parseReading(typed: string, decimal: DecimalMark = 'either'): Pa
 	}
 	const digits = whole.replace(/\D/g, '');
 	const value = Number(`${sign}${digits || '0'}.${fraction || '0'}e${power}`);
-	if (!Number.isFinite(value)) return refused(`${quoted(text)} is too large to be kept as a number.`);
-	if (value === 0 && /[1-9]/.test(digits + fraction)) {
-		return refused(`${quoted(text)} is too small to be kept as a number.`);
+	if (Math.abs(value) > greatest) return refused(`${quoted(text)} is too large to be a reading.`);
+	if (!isReading(value) || (value === 0 && /[1-9]/.test(digits + fraction))) {
+		return refused(`${quoted(text)} is too small to be a reading.`);
 	}
 	return { ok: true, value: value === 0 ? 0 : value };
 }

@@ -107,6 +107,18 @@ describe("Fieller's interval of a ratio, unequal variances", () => {
 		);
 	});
 
+	it('holds at the bounds of what a reading may be', () => {
+		const { ci95 } = compareCells(treated, control, 'higher', 1);
+		for (const unit of [1e-100, 1e99]) {
+			const scaled = (values: number[]) => values.map((value) => value * unit);
+			expectInterval(
+				compareCells(scaled(treated), scaled(control), 'higher', 1).ci95,
+				...(ci95 ?? [0, 0]),
+				1e-10
+			);
+		}
+	});
+
 	it('is the same from summaries as from readings', () => {
 		expect(compareSummaries(summarise(treated), summarise(control), 'lower', 3)).toEqual(
 			compareCells(treated, control, 'lower', 3)

@@ -30,9 +30,15 @@ function spread(values: readonly number[]): Spread {
 	};
 }
 
-/** Degrees of freedom of a sum of two variances of means (Welch–Satterthwaite). */
-const satterthwaite = (a: number, dfA: number, b: number, dfB: number): number =>
-	(a + b) ** 2 / (a ** 2 / dfA + b ** 2 / dfB);
+/**
+ * Degrees of freedom of a sum of two variances of means, not both zero (Welch–Satterthwaite), in shares of the
+ * larger, so that very small or large units neither vanish nor overflow when squared.
+ */
+function satterthwaite(a: number, dfA: number, b: number, dfB: number): number {
+	const larger = Math.max(a, b);
+	const [shareA, shareB] = [a / larger, b / larger];
+	return (shareA + shareB) ** 2 / (shareA ** 2 / dfA + shareB ** 2 / dfB);
+}
 
 /**
  * Fieller's interval for a ratio of means with unequal variances, degrees of freedom after Satterthwaite
@@ -68,31 +74,6 @@ function judge(
 	// Two one-sided tests at 0.05 are the 90 % interval wholly inside the margins (Schuirmann 1987).
 	if (ci90[0] > lower && ci90[1] < upper) return 'no-difference';
 	return 'not-enough';
-}
-
-const sideOf = ({ n, mean: average, sd }: Summary): Side => ({
-	mean: average,
-	varianceOfMean: sd === null ? null : sd ** 2 / n,
-	df: n - 1
-});
-
-function compareSides(
-	ours: Side,
-	theirs: Side,
-	better: Direction,
-	leastDifferencePercent: number
-): Comparison {
-	if (!(ours.mean > 0 && theirs.mean > 0)) throw new RangeError('A ratio needs means above zero.');
-	const [top, bottom] = better === 'higher' ? [ours, theirs] : [theirs, ours];
-	const ratio = top.mean / bottom.mean;
-	const ci95 = fieller(top, bottom, 0.95);
-	return {
-		ratio,
-		ci95,
-		gainPercent: (ratio - 1) * 100,
-		gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100],
-		verdict: judge(ci95, fieller(top, bottom, 0.9), leastDifferencePercent / 100)
-	};
 }
 
 /**

@@ -101,7 +101,7 @@ describe('modified z-scores', () => {
 			-1.396452261, -1.247316583, -0.799909548, -0.372839196, 0.372839196, 0.39317588, 0.549090452,
 			29.962713568
 		];
-		published.forEach((score, index) => expect(scores[index]).toBeCloseTo(score, 8));
+		for (const [index, score] of published.entries()) expect(scores[index]).toBeCloseTo(score, 8);
 	});
 
 	it('of Rosner: exactly three beyond 3.5', () => {

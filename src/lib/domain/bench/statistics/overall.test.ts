@@ -18,8 +18,8 @@ describe('the overall figure', () => {
 	it('says which workloads are not in it', () => {
 		const figure = overall([of('one', 121, 100), { workload: 'two', comparison: null }]);
 		expect(figure).toEqual({
-			ratio: expect.closeTo(1.21, 12),
-			gainPercent: expect.closeTo(21, 10),
+			ratio: expect.closeTo(1.21, 12) as unknown,
+			gainPercent: expect.closeTo(21, 10) as unknown,
 			workloads: ['one'],
 			missing: ['two']
 		});

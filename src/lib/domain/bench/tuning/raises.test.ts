@@ -14,7 +14,7 @@ describe('what a profile raises over stock', () => {
 			quantity: 'core-voltage',
 			from: '1.2 V',
 			to: '1.272 V',
-			byPercent: expect.closeTo(6, 9)
+			byPercent: expect.closeTo(6, 9) as unknown
 		});
 	});
 

@@ -17,7 +17,7 @@ describe('the number of a setting', () => {
 		['current-limit', '400', 'A', 400]
 	] as const)('%s %s %s', (quantity, value, unit, expected) => {
 		expect(settingNumber(quantity, value, unit)).toEqual({
-			value: expect.closeTo(expected, 10),
+			value: expect.closeTo(expected, 10) as unknown,
 			offset: false
 		});
 	});

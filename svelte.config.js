@@ -1,11 +1,15 @@
 import adapter from '@sveltejs/adapter-node';
 import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
 import { mdsvex } from 'mdsvex';
+import { fileURLToPath } from 'node:url';
+
+// The frame of pages that are written, not assembled.
+const textPage = fileURLToPath(new URL('src/routes/(reader)/TextPage.svelte', import.meta.url));
 
 /** @type {import('@sveltejs/kit').Config} */
 export default {
 	extensions: ['.svelte', '.svx'],
-	preprocess: [vitePreprocess(), mdsvex({ extensions: ['.svx'] })],
+	preprocess: [vitePreprocess(), mdsvex({ extensions: ['.svx'], layout: textPage })],
 	kit: {
 		adapter: adapter({ precompress: true }),
 		csp: {

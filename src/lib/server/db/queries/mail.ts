@@ -1,4 +1,4 @@
-import { inArray } from 'drizzle-orm';
+import { eq, inArray } from 'drizzle-orm';
 import type { Db } from '../client';
 import { mail } from '../schema';
 
@@ -32,3 +32,8 @@ export async function write(
 			)
 		);
 }
+
+/** A mail as the outbox holds it. */
+export const byId = async (db: Db, id: number) => (await db.select().from(mail).where(eq(mail.id, id)).limit(1))[0];
+
+export const markSent = (db: Db, id: number, sentAt: Date) => db.update(mail).set({ sentAt }).where(eq(mail.id, id));

@@ -1,0 +1,60 @@
+// Serves the built application and ends calmly: readiness says no first, open connections are told to close,
+// what is in flight is answered, then the jobs and the database are closed.
+import { createServer } from 'node:http';
+
+const drainMs = Number(process.env.SHUTDOWN_TIMEOUT_MS ?? 20_000);
+const host = process.env.HOST || '127.0.0.1';
+const port = Number(process.env.PORT || 3000);
+process.env.ORIGIN ||= `http://localhost:${port}`;
+// Uploads have routes and limits of their own; forms and JSON stay small.
+process.env.BODY_SIZE_LIMIT ||= '2M';
+if (Number(process.env.PROXY_DEPTH) > 0) {
+	process.env.ADDRESS_HEADER ||= 'x-forwarded-for';
+	process.env.XFF_DEPTH ||= process.env.PROXY_DEPTH;
+}
+
+let handler;
+try {
+	({ handler } = await import('../build/handler.js'));
+} catch (error) {
+	console.error(`Calipress cannot start: ${error instanceof Error ? error.message : error}`);
+	process.exit(1);
+}
+
+const server = createServer((request, response) => {
+	if (draining) response.setHeader('connection', 'close');
+	handler(request, response, () => {
+		response.statusCode = 404;
+		response.end();
+	});
+});
+let draining = false;
+
+function end() {
+	if (draining) return;
+	draining = true;
+	process.emit('calipress:drain');
+	const close = () => process.emit('calipress:close', () => process.exit(0)) || process.exit(0);
+	const patience = setTimeout(() => {
+		server.closeAllConnections();
+		close();
+	}, drainMs);
+	server.close(() => {
+		clearTimeout(patience);
+		close();
+	});
+	// A kept connection with nothing in flight would hold the server open.
+	server.closeIdleConnections();
+	setInterval(() => server.closeIdleConnections(), 200).unref();
+}
+process.on('SIGTERM', end);
+process.on('SIGINT', end);
+
+server.on('error', (error) => {
+	const words = error.code === 'EADDRINUSE' ? `PORT ${port} is in use on ${host}` : error.message;
+	console.error(`Calipress cannot start: ${words}`);
+	process.exit(1);
+});
+server.listen(port, host, () => {
+	if (process.send) process.send('listening');
+});

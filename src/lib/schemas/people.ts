@@ -86,3 +86,28 @@ export const blankSignIn = { email: '', password: '', to: '' };
 export const blankLink = { email: '', to: '' };
 export const blankInvite: z.input<typeof inviteInput> = { name: '', email: '', roles: [] };
 export const blankToken: z.input<typeof tokenInput> = { name: '', scopes: [], days: '90' };
+
+/** The list of people, as its address says. */
+export const peopleQuery = z.object({
+	q: z.string().trim().max(200).default(''),
+	role: z.union([z.literal(''), z.enum(roles)]).default(''),
+	state: z.enum(['here', 'left', 'all']).default('here'),
+	page: z.coerce.number().int().min(1).max(100_000).default(1)
+});
+export type PeopleQuery = z.output<typeof peopleQuery>;
+
+const day = z.union([z.literal(''), z.iso.date()]).default('');
+
+/** The audit log, as its address says; days are those of the publication's zone. */
+export const auditQuery = z.object({
+	who: z.string().max(36).default(''),
+	act: z.string().trim().max(60).default(''),
+	kind: z.string().max(40).default(''),
+	id: z.string().trim().max(60).default(''),
+	from: day,
+	until: day,
+	before: z.coerce.number().int().positive().optional()
+});
+export type AuditQuery = z.output<typeof auditQuery>;
+
+export const pageQuery = z.object({ page: z.coerce.number().int().min(1).max(100_000).default(1) });

@@ -1,13 +1,12 @@
 import { redirect } from '@sveltejs/kit';
-import { homeOf } from '$lib/domain/people/home';
 import { blankToken, nameInput, passwordChange, rowInput, tokenInput } from '$lib/schemas/people';
 import { endSession, sessionCookie } from '$lib/server/auth/session-cookie';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { blankForm, readForm, refusedForm, refuseForm } from '$lib/server/http/read-form';
 import { setRetryAfter } from '$lib/server/http/retry-after';
+import { saidOrProblem } from '$lib/server/http/small-act';
 import { changePassword } from '$lib/server/services/people/change-password';
 import { createToken } from '$lib/server/services/people/create-token';
-import { readPublication } from '$lib/server/services/people/read-publication';
 import { readSelf } from '$lib/server/services/people/read-self';
 import { renameSelf } from '$lib/server/services/people/rename-self';
 import { revokeToken } from '$lib/server/services/people/revoke-token';
@@ -17,25 +16,14 @@ import type { PageServerLoadEvent, RequestEvent } from './$types';
 const blankPassword = { current: '', password: '' };
 
 export const load = guarded('account.use', async (_event: PageServerLoadEvent, ctx) => {
-	const [found, published] = await Promise.all([readSelf(ctx), readPublication(ctx)]);
-	const self = valueOrError(found);
+	const self = valueOrError(await readSelf(ctx));
 	const { name, version } = self.person;
 	const [nameForm, passwordForm, tokenForm] = await Promise.all([
 		blankForm(nameInput, { name, version }, 'name'),
 		blankForm(passwordChange, blankPassword, 'password'),
 		blankForm(tokenInput, blankToken, 'token')
 	]);
-	const { zone } = valueOrError(published);
-	return {
-		title: name,
-		...self,
-		home: homeOf(ctx.actor),
-		zone,
-		now: ctx.now,
-		nameForm,
-		passwordForm,
-		tokenForm
-	};
+	return { title: name, ...self, now: ctx.now, nameForm, passwordForm, tokenForm };
 });
 
 export const actions = {
@@ -68,8 +56,7 @@ export const actions = {
 	revoke: guarded('account.use', async ({ request }: RequestEvent, ctx) => {
 		const { form, value } = await readForm(request, rowInput, { id: 0 }, 'revoke');
 		if (!value) return refuseForm(form);
-		const outcome = await revokeToken(ctx, value.id);
-		return outcome.ok ? { form, said: 'The token is revoked.' } : refusedForm(form, outcome);
+		return saidOrProblem(await revokeToken(ctx, value.id), 'The token is revoked.');
 	}),
 	'sign-out-everywhere': guarded('account.use', async ({ cookies }: RequestEvent, ctx) => {
 		valueOrError(await signOutEverywhere(ctx));

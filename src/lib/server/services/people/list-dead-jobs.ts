@@ -1,21 +1,19 @@
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
+import { paged, pageSize } from '../../../schemas/listing';
 import type { Context } from '../../context';
 import * as deadJobs from '../../db/queries/dead-jobs';
 import * as mails from '../../db/queries/mail-heads';
 
-const jobsPerPage = 50;
-
 async function pageOf({ db }: Context, page: number) {
-	const { rows, total } = await deadJobs.list(db, { limit: jobsPerPage, offset: (page - 1) * jobsPerPage });
+	const { rows, total } = await deadJobs.list(db, { limit: pageSize, offset: (page - 1) * pageSize });
 	const mailIds = rows.map((row) => row.payload.mailId).filter((id) => typeof id === 'number');
 	const heads = new Map((await mails.headsOf(db, mailIds)).map((mail) => [mail.id, mail]));
-	return {
-		jobs: rows.map((row) => ({ ...row, mail: heads.get(Number(row.payload.mailId)) ?? null })),
+	return paged(
+		rows.map((row) => ({ ...row, mail: heads.get(Number(row.payload.mailId)) ?? null })),
 		total,
-		page,
-		pages: Math.max(1, Math.ceil(total / jobsPerPage))
-	};
+		page
+	);
 }
 
 /** Jobs that were tried as often as they may be; a mail among them with whom it is for. */

@@ -1,33 +1,29 @@
 import { may } from '../../../domain/people/policy';
 import type { Role } from '../../../domain/people/roles';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
+import { paged, pageSize } from '../../../schemas/listing';
+import type { PeopleQuery } from '../../../schemas/people';
 import type { Context } from '../../context';
 import * as people from '../../db/queries/people';
 
-export const peoplePerPage = 50;
-
-async function pageOf({ db }: Context, filter: people.PeopleFilter, page: number) {
-	const { rows, total } = await people.list(db, filter, {
-		limit: peoplePerPage,
-		offset: (page - 1) * peoplePerPage
-	});
+async function pageOf({ db }: Context, { q, role, state, page }: PeopleQuery) {
+	const filter = { text: q || undefined, role: role || undefined, state };
+	const { rows, total } = await people.list(db, filter, { limit: pageSize, offset: (page - 1) * pageSize });
 	const held = new Map<string, Role[]>(rows.map((row) => [row.id, []]));
 	for (const { userId, role } of await people.rolesOf(db, [...held.keys()])) held.get(userId)?.push(role);
-	return {
-		people: rows.map((row) => ({ ...row, roles: held.get(row.id) ?? [] })),
+	return paged(
+		rows.map((row) => ({ ...row, roles: held.get(row.id) ?? [] })),
 		total,
-		page,
-		pages: Math.max(1, Math.ceil(total / peoplePerPage))
-	};
+		page
+	);
 }
 
-/** One page of the people here, with their roles. */
+/** One page of the people, with their roles. */
 export async function listPeople(
 	ctx: Context,
-	filter: people.PeopleFilter,
-	page: number
+	query: PeopleQuery
 ): Promise<Outcome<Awaited<ReturnType<typeof pageOf>>, 'forbidden'>> {
 	if (!may(ctx.actor, 'people.read'))
 		return refuse('forbidden', 'Your roles do not include the list of people.');
-	return done(await pageOf(ctx, filter, page));
+	return done(await pageOf(ctx, query));
 }

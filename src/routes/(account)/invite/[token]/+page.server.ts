@@ -1,20 +1,18 @@
 import { redirect } from '@sveltejs/kit';
 import { acceptInput } from '$lib/schemas/people';
 import { startSession } from '$lib/server/auth/session-cookie';
-import { open, valueOrError } from '$lib/server/http/guarded';
+import { open } from '$lib/server/http/guarded';
 import { blankForm, readForm, refusedForm, refuseForm } from '$lib/server/http/read-form';
 import { acceptInvitation, readInvitation } from '$lib/server/services/people/accept-invitation';
-import { readPublication } from '$lib/server/services/people/read-publication';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 export const load = open(async ({ params }: PageServerLoadEvent, ctx) => {
-	const [found, publication] = await Promise.all([readInvitation(ctx, params.token), readPublication(ctx)]);
+	const found = await readInvitation(ctx, params.token);
 	const name = found.ok ? found.value.name : '';
 	return {
 		title: found.ok ? 'Welcome' : 'This invitation does not work',
 		invitation: found.ok ? found.value : null,
 		problem: found.ok ? '' : found.message,
-		publicationName: valueOrError(publication).name,
 		form: await blankForm(acceptInput, { name, password: '' })
 	};
 });

@@ -77,7 +77,7 @@ const paint = /^(?:none|currentcolor|var\(--color-[a-z-]+\))$/i;
  * paint may name an outside address. Returns whether the attribute may stay.
  */
 export function mayStay(tag: string, name: string, value: string): boolean {
-	if (name === 'href') return isSafeLink(value) || /^(?:plates|[\w-]+\/plates)\/[\w.-]+$/.test(value);
+	if (name === 'href') return isSafeLink(value) || /^plates\/[\w.-]+$/.test(value);
 	if (name === 'src') return tag === 'img' && isSameSitePath(value) && value.startsWith('/');
 	if (name === 'fill' || name === 'stroke') return paint.test(value);
 	return true;

@@ -1,0 +1,123 @@
+import type {
+	ArticleData,
+	CampaignData,
+	KitLine,
+	ProfileFacts,
+	SampleDuty
+} from '../../../domain/articles/data';
+import { summariseCampaign } from '../../../domain/bench/campaign';
+import type { WorkloadFacts } from '../../../domain/bench/figures';
+import { defaultBaseline, matrixOf } from '../../../domain/bench/matrix';
+import { chainTo, effectiveSettings } from '../../../domain/bench/profile';
+import { derivedFacts } from '../../../domain/bench/tuning/derive';
+import type { Context } from '../../context';
+import * as facts from '../../db/queries/campaign-facts';
+import * as recorded from '../../db/queries/campaign-readings';
+import * as duties from '../../db/queries/sample-duties';
+import { publication } from '../../db/queries/settings';
+
+function kitOf(rows: facts.KitRow[]): KitLine[] {
+	return rows.map(({ part, maker, model, kind, sample, provenance, price }) => ({
+		part,
+		partName: `${maker} ${model}`,
+		kind,
+		sample,
+		provenance,
+		price
+	}));
+}
+
+function profilesOf({ profiles, rigProfiles, rigSettings }: facts.CampaignFacts): ProfileFacts[] {
+	return profiles.map(({ id, slug, name, parentId, notes }) => {
+		const chain = chainTo(rigProfiles, id).map((one) => ({
+			settings: rigSettings.filter((setting) => setting.profileId === one.id)
+		}));
+		const settings = effectiveSettings(chain);
+		const parent = rigProfiles.find((one) => one.id === parentId)?.slug ?? null;
+		return { slug, name, parent, notes, settings, derived: derivedFacts(settings) };
+	});
+}
+
+const workloadOf = (row: facts.CampaignWorkloadRow): WorkloadFacts => ({
+	slug: row.slug,
+	name: row.name,
+	programVersion: row.programVersion,
+	settings: row.settings,
+	quantity: row.quantity,
+	unit: row.unit,
+	better: row.better,
+	class: row.class,
+	headline: row.headline,
+	leastDifferencePercent: row.leastDifferencePercent,
+	warmUps: row.warmUps,
+	repeats: row.repeats,
+	coolDownS: row.coolDownS
+});
+
+function campaignOf(plan: facts.CampaignFacts, own: recorded.CampaignReadings): CampaignData {
+	const { head } = plan;
+	const baseline = defaultBaseline(plan.profiles);
+	const figures =
+		baseline === null ? { cells: [], overall: {} } : summariseCampaign(matrixOf(plan, own, baseline));
+	return {
+		slug: head.slug,
+		name: head.name,
+		rig: {
+			slug: head.rigSlug,
+			name: head.rigName,
+			revision: head.revision,
+			firmware: head.firmware,
+			driver: head.driver,
+			os: head.os
+		},
+		kit: kitOf(plan.kit),
+		profiles: profilesOf(plan),
+		workloads: plan.workloads.map(workloadOf),
+		baseline: baseline ?? '',
+		...figures
+	};
+}
+
+function dutyOf({
+	slug,
+	maker,
+	model,
+	provenance,
+	disclosures,
+	embargoes
+}: duties.SampleDutyRow): SampleDuty {
+	const agreed = disclosures.filter((text) => text.trim() !== '');
+	return {
+		sample: slug,
+		partName: `${maker} ${model}`,
+		provenance,
+		// The terms of the latest loan stand.
+		disclosure: agreed.at(-1) ?? null,
+		embargoes: embargoes.map(({ field, until }) => ({ field, until: until.toISOString() }))
+	};
+}
+
+/**
+ * Everything an article's directives may name, of the campaigns it is bound to, in the order given. The number
+ * of queries does not depend on how much was measured. The service that asks has checked that its actor may.
+ */
+export async function articleData(
+	{ db, now }: Pick<Context, 'db' | 'now'>,
+	campaignIds: number[]
+): Promise<ArticleData> {
+	const [plans, readings, { zone }] = await Promise.all([
+		facts.forCampaigns(db, campaignIds),
+		recorded.forCampaigns(db, campaignIds),
+		publication(db)
+	]);
+	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
+	const rows = await duties.ofRigRevisions(db, revisions, now);
+	const ordered = campaignIds.flatMap((id) => plans.find(({ head }) => head.id === id) ?? []);
+	return {
+		campaigns: ordered.map((plan) =>
+			campaignOf(plan, readings.get(plan.head.id) ?? { runs: [], signatures: [] })
+		),
+		duties: rows.map(dutyOf),
+		zone
+	};
+}

@@ -46,6 +46,13 @@ export type RevisionSave = z.output<typeof revisionSave>;
 export const revisionRestore = z.object({ number: revisionNumber, basedOn: revisionNumber });
 export type RevisionRestore = z.output<typeof revisionRestore>;
 
+/** Which revisions to list and which two to compare; the newest and the one before it when left out. */
+export const revisionsQuery = z.object({
+	page: z.coerce.number().int().min(1).max(10_000).default(1),
+	from: z.coerce.number().int().min(1).nullable().default(null),
+	to: z.coerce.number().int().min(1).nullable().default(null)
+});
+
 export const campaignsChoice = z.object({ version, campaigns });
 export type CampaignsChoice = z.output<typeof campaignsChoice>;
 
@@ -93,13 +100,6 @@ export const withdrawal = z.object({
 	reason: words('Write the reason: readers will see it in place of the article.')
 });
 export type Withdrawal = z.output<typeof withdrawal>;
-
-/** One plate the editor's page asks to have drawn. */
-export const platesAsk = z.object({
-	specs: z
-		.array(z.object({ key: z.string().min(1).max(200) }).loose())
-		.max(60, 'A page can have sixty plates at most.')
-});
 
 export const deskFilter = z.object({
 	stage: z.string().default(''),

@@ -1,11 +1,13 @@
 import type { JobHandler } from './handler';
 import { loanReminders } from './loan-reminders';
+import { publishScheduled } from './publish-article';
 import { sendMail } from './send-mail';
 import { sweep } from './sweep';
 
 /** Every kind of job, and what does it. */
 export const handlers: Record<string, JobHandler> = {
 	'send-mail': sendMail,
+	'publish-article': publishScheduled,
 	'loan-reminders': loanReminders,
 	sweep
 };

@@ -1,5 +1,5 @@
 import { may } from '../../../domain/people/policy';
-import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
+import { done, refuse } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as articles from '../../db/queries/article';
 import * as revisions from '../../db/queries/revision';
@@ -36,7 +36,3 @@ export async function readRevisions(
 		mayEdit: may(ctx.actor, 'article.edit', { authorId: article.authorId })
 	});
 }
-export type RevisionsView = Extract<
-	Awaited<ReturnType<typeof readRevisions>>,
-	Outcome<unknown> & { ok: true }
->['value'];

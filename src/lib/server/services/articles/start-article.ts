@@ -1,3 +1,4 @@
+import { fillTemplate } from '../../../domain/articles/fill-template';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { isReserved, slugOf } from '../../../domain/shared/slug';
@@ -8,20 +9,26 @@ import * as articles from '../../db/queries/article';
 import * as audit from '../../db/queries/audit';
 import * as campaigns from '../../db/queries/campaign-choice';
 import * as revisions from '../../db/queries/revision';
+import { templateOf } from '../../rendering/templates';
+import { articleData } from './article-data';
 
 const taken = 'Another article has this title, or one that makes the same address. Choose another.';
 
 /**
- * Starts an article of the actor's from a template's text, bound to campaigns. Its address comes from its title
+ * Starts an article of the actor's from a template, filled in with what its campaigns have. Its address comes from its title
  * and stays. Refuses a title that makes the address of another article, beside the field.
  */
 export async function startArticle(
 	ctx: Context,
-	input: ArticleStart,
-	templateSource: string
+	input: ArticleStart
 ): Promise<Outcome<{ slug: string }, 'forbidden' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'article.create'))
 		return refuse('forbidden', 'Only writers and editors start articles.');
+	const template = templateOf(input.template);
+	if (!template)
+		return refuse('invalid', 'There is no such template.', {
+			fields: { template: ['There is no such template any more. Choose another.'] }
+		});
 	const slug = slugOf(input.title);
 	if (slug === '' || isReserved(slug))
 		return refuse('invalid', 'This title cannot make an address.', {
@@ -35,9 +42,13 @@ export async function startArticle(
 				return refuse('invalid', 'One of the campaigns does not exist any more.', {
 					fields: { campaigns: ['One of these campaigns does not exist any more. Choose again.'] }
 				});
+			const data = await articleData({ db: tx, now: ctx.now }, ids);
+			// The template's own standfirst tells the writer what to say; in print it would say nothing.
+			const standfirst = '';
 			const id = await articles.insert(tx, {
 				slug,
 				title: input.title,
+				standfirst,
 				template: input.template,
 				stage: 'drafting',
 				authorId: ctx.actor.id,
@@ -50,8 +61,8 @@ export async function startArticle(
 				articleId: id,
 				number: 1,
 				title: input.title,
-				standfirst: '',
-				source: templateSource,
+				standfirst,
+				source: fillTemplate(template.body, data),
 				savedBy: ctx.actor.id,
 				savedAt: ctx.now,
 				note: 'from the template'

@@ -1,6 +1,9 @@
 import type { TestProject } from 'vitest/node';
-import { startMaildev } from './maildev';
-import { startMariadb } from './mariadb';
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { startMaildev } from '../../scripts/parts/maildev.mjs';
+import { startMariadb } from '../../scripts/parts/mariadb.mjs';
 
 declare module 'vitest' {
 	interface ProvidedContext {
@@ -12,11 +15,16 @@ declare module 'vitest' {
 
 /** One MariaDB and one mail fake for all integration tests; each test file has databases of its own in it. */
 export default async function setup(project: TestProject) {
-	const [mariadb, maildev] = await Promise.all([startMariadb(), startMaildev()]);
+	const folder = mkdtempSync(join(tmpdir(), 'calipress-test-'));
+	const [mariadb, maildev] = await Promise.all([
+		startMariadb({ folder: join(folder, 'mariadb'), throwaway: true }),
+		startMaildev({ folder: join(folder, 'mail') })
+	]);
 	project.provide('databaseServerUrl', mariadb.url);
 	project.provide('smtpUrl', maildev.smtpUrl);
 	project.provide('maildevUrl', maildev.webUrl);
 	return async () => {
 		await Promise.all([mariadb.stop(), maildev.stop()]);
+		rmSync(folder, { recursive: true, force: true });
 	};
 }

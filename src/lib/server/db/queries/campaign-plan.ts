@@ -115,7 +115,7 @@ export async function isUsed(db: Db, campaignId: number, part: PlanPart): Promis
 			)
 		)
 		.limit(1)
-		.for('share');
+		.for('update');
 	return row !== undefined;
 }
 
@@ -165,7 +165,7 @@ export async function lockCells(
 			and(eq(campaignWorkload.campaignId, campaignId), inArray(campaignWorkload.workloadId, workloadIds))
 		)
 		.orderBy(asc(campaignWorkload.workloadId))
-		.for('share');
+		.for('update');
 	return {
 		profileIds: profiles.map((row) => row.id),
 		needed: new Map(workloads.map((row) => [row.id, row.repeats]))

@@ -43,7 +43,7 @@ export const countedOfCell = (db: Db, cell: { campaignId: number; profileId: num
 			)
 		)
 		.orderBy(asc(run.id), asc(reading.position))
-		.for('share');
+		.for('update');
 
 /** How many readings of each cell of a campaign count. */
 export const countsOfCells = (db: Db, campaignId: number) =>

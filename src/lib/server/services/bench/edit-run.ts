@@ -14,6 +14,10 @@ type Circumstances = Pick<LockedRun, 'ambientC' | 'startedAt' | 'notes'>;
 
 const of = ({ ambientC, startedAt, notes }: Circumstances): Circumstances => ({ ambientC, startedAt, notes });
 
+/** Whether a field that knows no milliseconds still says the time it was filled with. */
+const sameSecond = (typed: Date, stored: Date): boolean =>
+	Math.trunc(typed.getTime() / 1000) === Math.trunc(stored.getTime() / 1000);
+
 /** Corrects what stands beside a run's readings: when it began, how warm it was, notes. The readings stay as they are. */
 export async function editRun(ctx: Context, campaignRef: string, input: RunEdit): Promise<Outcome<null>> {
 	if (!may(ctx.actor, 'run.record')) return refuse('forbidden', 'Only a tester corrects runs.');
@@ -30,7 +34,8 @@ export async function editRun(ctx: Context, campaignRef: string, input: RunEdit)
 		const { run, cell } = locked.value;
 		const after = {
 			ambientC: ambientC.value,
-			startedAt: startedAt.value ?? run.startedAt,
+			startedAt:
+				startedAt.value && !sameSecond(startedAt.value, run.startedAt) ? startedAt.value : run.startedAt,
 			notes: input.notes
 		};
 		if (!(await runs.update(db, run.id, input.version, after)))

@@ -1,8 +1,8 @@
 import { campaignState, type CampaignState } from '../../../domain/bench/campaign-state';
 import { countedReadings } from '../../../domain/bench/campaign';
+import type { CellRun } from '../../../domain/bench/cell-runs';
 import type { CellFigures, WorkloadFacts } from '../../../domain/bench/figures';
 import { currentProfile, progress, toRun, type Progress, type ToRun } from '../../../domain/bench/progress';
-import type { RunSource } from '../../../domain/bench/words';
 import { may } from '../../../domain/people/policy';
 import { done, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
@@ -10,26 +10,6 @@ import * as articles from '../../db/queries/campaign-articles';
 import type { CampaignHead } from '../../db/queries/campaign-facts';
 import * as settings from '../../db/queries/settings';
 import { readCampaign, type MeasuredCampaign } from './read-campaign';
-
-export interface BoardReading {
-	id: number;
-	value: number;
-	/** The reason, where it does not count. */
-	excluded: string | null;
-}
-
-export interface BoardRun {
-	id: number;
-	version: number;
-	tester: string;
-	source: RunSource;
-	startedAt: Date;
-	ambientC: number | null;
-	notes: string;
-	/** The reason, where the run does not count. */
-	voided: string | null;
-	readings: BoardReading[];
-}
 
 export interface Board {
 	head: CampaignHead;
@@ -43,7 +23,7 @@ export interface Board {
 	signed: number;
 	/** What to run now and how many readings are left before the next restart of the rig; null when nothing is left. */
 	next: (ToRun & { leftInProfile: number }) | null;
-	selected: { profile: string; workload: string; runs: BoardRun[]; baselineValues: number[] | null };
+	selected: { profile: string; workload: string; runs: CellRun[]; baselineValues: number[] | null };
 	zone: string;
 	may: { plan: boolean; record: boolean; sign: boolean };
 }
@@ -71,7 +51,7 @@ function select(
 	};
 }
 
-function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workload: string }): BoardRun[] {
+function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workload: string }): CellRun[] {
 	return recorded.runs
 		.filter((run) => run.profile === cell.profile && run.workload === cell.workload)
 		.map((run) => ({

@@ -6,9 +6,11 @@ import { inTransaction } from '../../db/client';
 import * as audit from '../../db/queries/audit';
 import * as readings from '../../db/queries/reading';
 import * as runs from '../../db/queries/run';
+import * as settings from '../../db/queries/settings';
 import { findOpenCampaign } from './find-campaign';
 import { findCell, unitFault } from './find-cell';
 import { lockCell } from './lock-cell';
+import { readStarted } from './read-started';
 import { storeReadings, storeRun } from './store-run';
 import type { NamedCell } from './take-signature-off';
 
@@ -108,9 +110,13 @@ export async function recordGridReadings(
 	if (fault) return refuse('invalid', `${fault} Nothing was stored.`, { fields: { unit: [fault] } });
 	if (new Set(input.readings.map((row) => row.key)).size < input.readings.length)
 		return refuse('invalid', 'Two readings carry the same key. Nothing was stored.');
+	const { zone } = await settings.publication(ctx.db);
+	const started = readStarted(input.started, zone);
+	if (!started.ok) return started;
+	const whole = { ...input, startedAt: started.value ?? input.startedAt };
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
 		const cell = await lockCell(tx, found.value, at.value);
-		return cell.ok ? record(tx, cell.value, input) : cell;
+		return cell.ok ? record(tx, cell.value, whole) : cell;
 	});
 }

@@ -2,8 +2,7 @@ import { decimalMarkOf, parseBlock, parseReading } from '../../../domain/bench/n
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { readingsPerRun, type PlainRun } from '../../../schemas/run';
 import type { Context } from '../../context';
-import * as settings from '../../db/queries/settings';
-import { readAmbient, readStarted } from './read-started';
+import { readAmbient } from './read-started';
 import { recordGridReadings, type GridAnswer } from './record-grid-readings';
 
 /** The numbers of a written list, one a line or one a cell; refused whole when one of them is not a number. */
@@ -29,11 +28,8 @@ export async function recordPlainRun(
 	campaignRef: string,
 	input: PlainRun
 ): Promise<Outcome<GridAnswer>> {
-	const { zone } = await settings.publication(ctx.db);
 	const list = readList(input.readings);
 	if (!list.ok) return list;
-	const startedAt = readStarted(input.started, zone);
-	if (!startedAt.ok) return startedAt;
 	const ambientC = readAmbient(input.ambient);
 	if (!ambientC.ok) return ambientC;
 	return recordGridReadings(ctx, campaignRef, {
@@ -42,7 +38,8 @@ export async function recordPlainRun(
 		unit: input.unit,
 		runKey: input.runKey,
 		notes: input.notes,
-		startedAt: startedAt.value,
+		started: input.started,
+		startedAt: null,
 		ambientC: ambientC.value,
 		readings: list.value.map((value, at) => ({ key: `${input.runKey}-${at}`, value }))
 	});

@@ -4,7 +4,7 @@ import type { PlateSpec } from '../../domain/articles/plates/spec';
 
 const oneTag = /<[a-z][^<>]*>/gi;
 /** What the chart library leaves behind that no reader needs: positions of its boxes, its data as words, its classes. */
-const stray = /\s(?:style|class|data|x1Get|yGet)="[^"]*"/g;
+const stray = /\s(?:style|class|data|(?!viewBox=)[a-z]+[A-Z][A-Za-z0-9]*)="[^"]*"/g;
 
 /** One drawing as clean SVG: what stands between the tags is text and stays untouched. */
 function drawing(spec: PlateSpec, narrow: boolean): string {

@@ -141,7 +141,7 @@ export function freezeEdition(input: EditionInput): FrozenEdition {
 		key,
 		kind: spec.kind,
 		title: spec.title.slice(0, 200),
-		svg: standaloneSvg(drawings.get(spec) ?? drawPlate(spec)),
+		svg: standaloneSvg(sanitisePage(drawings.get(spec) ?? drawPlate(spec))),
 		csv: plateCsv(spec)
 	}));
 	const shown = data.campaigns.filter((campaign) => facts.uses.campaigns.includes(campaign.slug));

@@ -1,4 +1,5 @@
 import { redirect } from '@sveltejs/kit';
+import { homeOf } from '$lib/domain/people/home';
 import { blankToken, nameInput, passwordChange, rowInput, tokenInput } from '$lib/schemas/people';
 import { endSession, sessionCookie } from '$lib/server/auth/session-cookie';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
@@ -23,7 +24,7 @@ export const load = guarded('account.use', async (_event: PageServerLoadEvent, c
 		blankForm(passwordChange, blankPassword, 'password'),
 		blankForm(tokenInput, blankToken, 'token')
 	]);
-	return { title: name, ...self, now: ctx.now, nameForm, passwordForm, tokenForm };
+	return { title: name, ...self, home: homeOf(ctx.actor), now: ctx.now, nameForm, passwordForm, tokenForm };
 });
 
 export const actions = {

@@ -60,7 +60,7 @@ export const commentInput = z.object({
 	/** The passage as it reads on the page; empty for the article as a whole. */
 	quote: z.string().trim().max(1000, 'Choose a shorter passage.').default(''),
 	body: words('Write what you want to say.'),
-	blocking: z.boolean().default(false),
+	blocking: z.stringbool().default(false),
 	parent: z.coerce.number().int().min(1).nullable().default(null)
 });
 export type CommentInput = z.output<typeof commentInput>;

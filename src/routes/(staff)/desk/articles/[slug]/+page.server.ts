@@ -41,7 +41,7 @@ export const actions = {
 		const posted = await request.formData();
 		const read = campaignsChoice.safeParse({
 			version: posted.get('version'),
-			campaigns: posted.getAll('campaigns')
+			campaigns: posted.getAll('campaigns[]')
 		});
 		const message = read.error?.issues[0]?.message;
 		if (!read.success)

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { settingQuantities } from '../domain/bench/words';
 import { line, number, optionalSlug, paragraphs, reference, versionSeen } from './fields';
+import { listing } from './listing';
 
 /** Menus from the outermost in, written with > or ›, kept with ' > ' between them. */
 const menuPath = line(300)
@@ -104,3 +105,10 @@ export const blankSetting = (menuPath = ''): SettingTyped => ({
 	quantity: 'other',
 	note: ''
 });
+
+/** What the list of profiles takes from its address. */
+export const profilesQuery = listing(['rig', 'name', 'newest']).extend({
+	/** Slug or id of a rig. */
+	rig: z.string().trim().max(80).optional()
+});
+export type ProfilesQuery = z.output<typeof profilesQuery>;

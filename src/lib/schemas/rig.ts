@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { line, optionalSlug, paragraphs, reference, versionSeen } from './fields';
+import { listing } from './listing';
 
 const name = line(160).min(1, 'A rig needs a name.');
 
@@ -42,3 +43,10 @@ export const blankRig = (): RigTyped => ({
 	driver: '',
 	os: ''
 });
+
+/** What the list of rigs takes from its address. */
+export const rigsQuery = listing(['name', 'revised', 'newest']).extend({
+	/** Slug or id of a sample: the rigs that have it now. */
+	sample: z.string().trim().max(80).optional()
+});
+export type RigsQuery = z.output<typeof rigsQuery>;

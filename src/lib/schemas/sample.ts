@@ -1,6 +1,7 @@
 import { z } from 'zod';
-import { provenances } from '../domain/stores/words';
+import { partKinds, provenances } from '../domain/stores/words';
 import { line, optionalSlug, reference, unchosen, versionSeen } from './fields';
+import { listing } from './listing';
 
 const sampleFields = {
 	serial: line(120).default(''),
@@ -30,3 +31,12 @@ export const blankSample = (part: string): SampleTyped => ({
 	condition: '',
 	place: ''
 });
+
+/** What the list of samples takes from its address. */
+export const samplesQuery = listing(['code', 'part', 'place', 'newest']).extend({
+	provenance: z.enum(provenances).optional(),
+	kind: z.enum(partKinds).optional(),
+	/** Slug or id of a part. */
+	part: z.string().trim().max(80).optional()
+});
+export type SamplesQuery = z.output<typeof samplesQuery>;

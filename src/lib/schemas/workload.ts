@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { directions, headlines, workloadClasses } from '../domain/bench/words';
 import { line, number, optionalSlug, paragraphs, unchosen, versionSeen } from './fields';
+import { listing } from './listing';
 
 const workloadFields = {
 	name: line(160).min(1, 'A workload needs a name.'),
@@ -45,3 +46,9 @@ export const blankWorkload = (): WorkloadTyped => ({
 	leastDifferencePercent: '1',
 	headline: 'mean'
 });
+
+/** What the list of workloads takes from its address. */
+export const workloadsQuery = listing(['name', 'class', 'newest']).extend({
+	class: z.enum(workloadClasses).optional()
+});
+export type WorkloadsQuery = z.output<typeof workloadsQuery>;

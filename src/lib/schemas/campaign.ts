@@ -102,12 +102,17 @@ export const campaignsQuery = listing(['created', 'due', 'name'], 'down').extend
 });
 export type CampaignsQuery = z.output<typeof campaignsQuery>;
 
-export const blankCampaign = (rig: string): CampaignTyped => ({
+/** A plan to fill in: all profiles of the rig ticked, the workloads not, each with its own protocol's repeats. */
+export const blankCampaign = (
+	rig: string,
+	offered: readonly { slug: string }[],
+	workloads: readonly { repeats: number }[]
+): CampaignTyped => ({
 	name: '',
 	slug: '',
 	rig,
-	profiles: [],
-	workloads: [],
+	profiles: offered.map((profile) => profile.slug),
+	workloads: workloads.map(({ repeats: own }) => ({ workload: '', repeats: String(own) })),
 	purpose: '',
 	dueOn: ''
 });
@@ -139,4 +144,10 @@ export const summaryQuery = z.object({
 export const cellQuery = z.object({
 	profile: z.string().trim().max(80).catch('').default(''),
 	workload: z.string().trim().max(80).catch('').default('')
+});
+
+/** A page of a campaign's history, of one cell (profile/workload) or of all. */
+export const historyQuery = z.object({
+	cell: z.string().trim().max(170).default(''),
+	page: z.coerce.number().int().min(1).max(100_000).default(1)
 });

@@ -17,7 +17,7 @@ import type { PageServerLoadEvent, RequestEvent } from './$types';
 export const load = guarded('bench.read', async ({ params, url }: PageServerLoadEvent, ctx) => {
 	const wanted = cellQuery.parse(Object.fromEntries(url.searchParams));
 	const board = valueOrError(await readBoard(ctx, params.campaign, wanted));
-	return { title: board.head.name, board, freshKey: crypto.randomUUID() };
+	return { title: board.head.name, board, freshKey: crypto.randomUUID(), me: ctx.actor.id };
 });
 
 /** What the page says when an act is done, or the refusal with what was typed. */

@@ -1,0 +1,58 @@
+import Papa from 'papaparse';
+import { verdictWords, type CellFigures, type Overall, type WorkloadFacts } from './figures';
+
+/** A campaign's profiles held against one of them. */
+export interface CampaignComparison {
+	/** Slugs of the campaign and the baseline. */
+	campaign: string;
+	name: string;
+	baseline: string;
+	profiles: { slug: string; name: string }[];
+	workloads: Pick<WorkloadFacts, 'slug' | 'name' | 'unit' | 'better' | 'leastDifferencePercent'>[];
+	cells: CellFigures[];
+	overall: Record<string, Overall>;
+}
+
+/**
+ * A comparison as CSV, one line for each cell and one for each profile's geometric mean; nothing is rounded.
+ * Texts that a spreadsheet would take for a formula are kept from being one.
+ */
+export function comparisonCsv(comparison: CampaignComparison): string {
+	const units = new Map(comparison.workloads.map((workload) => [workload.slug, workload.unit]));
+	const cells = comparison.cells.map(({ profile, workload, summary, comparison: held, signedBy }) => ({
+		profile,
+		workload,
+		unit: units.get(workload) ?? '',
+		n: summary?.n ?? 0,
+		mean: summary?.mean ?? '',
+		median: summary?.median ?? '',
+		sd: summary?.sd ?? '',
+		cv_percent: summary?.cvPercent ?? '',
+		mean_low_95: summary?.ci95?.[0] ?? '',
+		mean_high_95: summary?.ci95?.[1] ?? '',
+		baseline: comparison.baseline,
+		ratio: held?.ratio ?? '',
+		ratio_low_95: held?.ci95?.[0] ?? '',
+		ratio_high_95: held?.ci95?.[1] ?? '',
+		gain_percent: held?.gainPercent ?? '',
+		verdict: held ? verdictWords[held.verdict] : '',
+		signed_by: signedBy ?? ''
+	}));
+	const overall = comparison.profiles.flatMap(({ slug }) => {
+		const figure = comparison.overall[slug];
+		return figure
+			? [
+					{
+						profile: slug,
+						workload: 'geometric mean',
+						n: figure.workloads.length,
+						baseline: comparison.baseline,
+						ratio: figure.ratio,
+						gain_percent: figure.gainPercent
+					}
+				]
+			: [];
+	});
+	const columns = Object.keys(cells[0] ?? {});
+	return `${Papa.unparse([...cells, ...overall], { columns, newline: '\r\n', escapeFormulae: /^[=+@\t\r]/ })}\r\n`;
+}

@@ -47,11 +47,12 @@ export function behindGain(comparison: Comparison, workload: WorkloadFacts, over
 
 /** A gain as words that keep their truth when the data move. @example '12.4 % better' */
 export function gainInWords(comparison: Comparison): string {
-	const size = printedSize(comparison);
-	if (comparison.verdict === 'no-difference')
-		return `no different (${printedGain(comparison.gainPercent, comparison.gainCi95)})`;
-	const way = comparison.gainPercent < 0 ? `${size} worse` : `${size} better`;
-	return comparison.verdict === 'not-enough' ? `${way} (${verdictWords['not-enough']})` : way;
+	const gain = printedGain(comparison.gainPercent, comparison.gainCi95);
+	if (comparison.verdict === 'no-difference') return `no different (${gain})`;
+	const doubt = comparison.verdict === 'not-enough' ? ` (${verdictWords['not-enough']})` : '';
+	const way = comparison.gainPercent < 0 ? 'worse' : 'better';
+	const nought = !/[1-9]/.test(gain);
+	return `${nought ? 'about the same' : `${printedSize(comparison)} ${way}`}${doubt}`;
 }
 
 /** A gain without its sign, for a sentence that says which way. */

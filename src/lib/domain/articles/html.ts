@@ -31,24 +31,37 @@ export interface Column {
 	figures?: boolean;
 }
 
+/** Rows of a table that belong together, under a head of their own where there is one. */
+export interface RowGroup {
+	head?: string;
+	rows: string[][];
+}
+
 /** A table of texts in a box of its own that scrolls on narrow screens; the first cell of a row is its head. */
-export function table(caption: string, columns: Column[], rows: string[][]): string {
+export function table(caption: string, columns: Column[], groups: RowGroup[]): string {
 	const kind = (index: number) => (columns[index]?.figures ? 'num' : undefined);
 	const head = columns.map((column, index) =>
 		element('th', { scope: 'col', class: kind(index) }, escapeHtml(column.head))
 	);
-	const body = rows.map((row) => {
-		const cells = row.map((text, index) =>
-			index === 0
-				? element('th', { scope: 'row' }, escapeHtml(text))
-				: element('td', { class: kind(index) }, escapeHtml(text))
-		);
-		return `<tr>${cells.join('')}</tr>`;
+	const row = (cells: string[]) =>
+		`<tr>${cells
+			.map((text, index) =>
+				index === 0
+					? element('th', { scope: 'row' }, escapeHtml(text))
+					: element('td', { class: kind(index) }, escapeHtml(text))
+			)
+			.join('')}</tr>`;
+	const bodies = groups.map(({ head: name, rows }) => {
+		const title =
+			name === undefined
+				? ''
+				: `<tr class="row-group">${element('th', { scope: 'rowgroup', colspan: columns.length }, escapeHtml(name))}</tr>`;
+		return `<tbody>${title}${rows.map(row).join('')}</tbody>`;
 	});
 	// Focusable, so that what scrolls can be scrolled by keyboard.
 	return element(
 		'div',
 		{ class: 'table-box', tabindex: 0, role: 'group', 'aria-label': caption },
-		`<table><caption>${escapeHtml(caption)}</caption><thead><tr>${head.join('')}</tr></thead><tbody>${body.join('')}</tbody></table>`
+		`<table><caption>${escapeHtml(caption)}</caption><thead><tr>${head.join('')}</tr></thead>${bodies.join('')}</table>`
 	);
 }

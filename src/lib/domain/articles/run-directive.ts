@@ -1,7 +1,7 @@
 import type { DirectiveToken } from './directive-syntax';
 import { allDirectives } from './directives/all-directives';
 import { missing, type AnyDirective, type Lookup, type Press, type Printed } from './directives/shape';
-import { namesNear } from './names-near';
+import { unknownName } from './names-near';
 
 const byName = new Map(allDirectives.map((one) => [one.name, one]));
 const names = [...byName.keys()];
@@ -13,7 +13,7 @@ function attributeProblem(one: AnyDirective, { call, data }: Press): ReturnType<
 	const known = one.attributes.map((attribute) => attribute.name);
 	const stranger = Object.keys(call.attributes).find((name) => !known.includes(name));
 	if (stranger !== undefined) {
-		return missing(`“${one.name}” has no attribute called “${stranger}”.`, namesNear(stranger, known));
+		return unknownName(`“${one.name}” has no attribute called “${stranger}”.`, stranger, known);
 	}
 	for (const { name, required, words, values } of one.attributes) {
 		const value = call.attributes[name];
@@ -33,9 +33,10 @@ function valueProblem(one: AnyDirective, { call, data }: Press): ReturnType<type
 		const value = call.attributes[name];
 		const allowed = fixed.has(name) ? values(data, call.attributes) : null;
 		if (value !== undefined && allowed && !allowed.includes(value)) {
-			return missing(
+			return unknownName(
 				`“${value}” is no ${name} of “${one.name}”. It can be ${allowed.join(', ')}.`,
-				namesNear(value, allowed)
+				value,
+				allowed
 			);
 		}
 	}
@@ -49,7 +50,7 @@ const fixed = new Set(['kind', 'show', 'topic']);
  */
 export function runDirective(token: DirectiveToken, press: Press): Lookup<Printed> {
 	const one = byName.get(token.name);
-	if (!one) return missing(`There is no directive called “${token.name}”.`, namesNear(token.name, names));
+	if (!one) return unknownName(`There is no directive called “${token.name}”.`, token.name, names);
 	if (one.level !== token.level) {
 		const where = one.level === 'inline' ? 'stands in a sentence' : 'stands on a line of its own';
 		return missing(`“${one.name}” ${where}: write ${marks[one.level]}${one.name}.`, []);

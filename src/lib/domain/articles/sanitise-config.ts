@@ -31,7 +31,21 @@ export const sanitiseConfig = {
 		...['svg', 'g', 'path', 'rect', 'circle', 'line', 'text', 'tspan', 'title', 'desc', '#text']
 	],
 	ALLOWED_ATTR: [
-		...['id', 'class', 'title', 'href', 'rel', 'src', 'alt', 'loading', 'start', 'scope', 'role', 'tabindex'],
+		...[
+			'id',
+			'class',
+			'title',
+			'href',
+			'rel',
+			'src',
+			'alt',
+			'loading',
+			'start',
+			'scope',
+			'colspan',
+			'role',
+			'tabindex'
+		],
 		...['aria-label', 'data-line', 'data-plate', 'data-plate-file', 'data-rig', 'data-topic'],
 		...['data-campaign', 'data-workload', 'data-profile', 'data-over', 'data-verdict'],
 		...[

@@ -98,9 +98,9 @@ describe('digits from the uncertainty', () => {
 });
 
 describe('setting', () => {
-	it('uses a true minus, thin spaces and an unbreakable space before the unit', () => {
+	it('uses a true minus, spaces between thousands and an unbreakable space before the unit', () => {
 		expect(printedWithUnit(-4.56, '%', { decimals: 1 })).toBe('\u22124.6\u00a0%');
-		expect(printed(3322298.25857, { halfWidth: 295256 })).toBe('3\u202f320\u202f000');
+		expect(printed(3322298.25857, { halfWidth: 295256 })).toBe('3\u00a0320\u00a0000');
 		expect(printed(4687)).toBe('4687');
 		expect(printedWithUnit(45, '°')).toBe('45°');
 		expect(printedWithUnit(85, '°C')).toBe('85\u00a0°C');

@@ -8,8 +8,8 @@
  */
 
 const MINUS = '\u2212';
-/** Narrow and unbreakable, so that a number never ends a line half way. */
-const GROUP = '\u202f';
+/** Unbreakable, so that a number never ends a line half way; U+202F would be thinner, but closes up in our faces. */
+const GROUP = '\u00a0';
 const UNIT_SPACE = '\u00a0';
 
 /** How far to print. `decimals` wins; else the half width of an interval decides; else the value's own digits. */
@@ -67,7 +67,7 @@ export function decimalsFor(value: number, { decimals, halfWidth }: Precision = 
 	return value === 0 ? place : Math.max(place, 1 - first);
 }
 
-/** Digits as they stand in print: a true minus, thin spaces between thousands from five digits on. */
+/** Digits as they stand in print: a true minus, spaces between thousands from five digits on. */
 function set(plain: string, signed: boolean): string {
 	const negative = plain.startsWith('-');
 	const [whole = '0', fraction] = plain.replace('-', '').split('.');

@@ -83,7 +83,7 @@ describe('plates', () => {
 						value: 3.4e12,
 						ci95: [-1e12, 9e12],
 						name: 'x'.repeat(160),
-						printed: '3\u202f400\u202f000\u202f000\u202f000 bytes/s'
+						printed: '3\u00a0400\u00a0000\u00a0000\u00a0000 bytes/s'
 					}
 				]
 			},

@@ -74,7 +74,8 @@ export const gain = directive<Gain>({
 			html: element(
 				'span',
 				{
-					class: 'gain',
+					// Words may break between lines, a number may not.
+					class: show === 'words' ? 'gain gain-words' : 'gain',
 					'data-campaign': campaign.slug,
 					'data-workload': workload.slug,
 					'data-profile': profile.slug,

@@ -1,7 +1,7 @@
 import { formatMoney } from '../../shared/money';
 import { printedDay } from '../dates';
 import { element, escapeHtml } from '../html';
-import { namesNear } from '../names-near';
+import { unknownName } from '../names-near';
 import type { CampaignData, KitLine } from '../data';
 import { campaignsOf } from './lookup';
 import { directive, found, missing } from './shape';
@@ -68,10 +68,7 @@ export const kit = directive<CampaignData>({
 			.filter((campaign) => campaign.rig.slug === (name ?? rigs[0]))
 			.sort((a, b) => b.rig.revision - a.rig.revision);
 		if (!newest)
-			return missing(
-				`No campaign of this article used a rig called “${name ?? ''}”.`,
-				namesNear(name ?? '', rigs)
-			);
+			return unknownName(`No campaign of this article used a rig called “${name ?? ''}”.`, name ?? '', rigs);
 		return newest.kit.length > 0
 			? found(newest)
 			: missing(`Rig ${newest.rig.name} has no samples recorded, so there is nothing to list.`);

@@ -1,6 +1,6 @@
 import type { CellFigures, Comparison, Summary, WorkloadFacts } from '../../bench/figures';
 import type { ArticleData, CampaignData, ProfileFacts } from '../data';
-import { namesNear } from '../names-near';
+import { unknownName } from '../names-near';
 import { found, missing, type Attribute, type Call, type Lookup, type Values } from './shape';
 
 /** A profile in the campaign that has it. */
@@ -28,10 +28,7 @@ export function campaignsOf(call: Call, data: ArticleData): Lookup<CampaignData[
 	const campaign = data.campaigns.find((one) => one.slug === name);
 	return campaign
 		? found([campaign])
-		: missing(
-				`This article is bound to no campaign called “${name}”.`,
-				namesNear(name, slugs(data.campaigns))
-			);
+		: unknownName(`This article is bound to no campaign called “${name}”.`, name, slugs(data.campaigns));
 }
 
 /** Picks the one campaign of those that have everything named, or says that there are several. */
@@ -62,12 +59,11 @@ export function findProfile(call: Call, data: ArticleData): Lookup<ProfilePlace>
 		return profile ? [{ campaign, profile }] : [];
 	});
 	return only(call, places, slugs(places.map((place) => place.campaign)), () =>
-		missing(
+		unknownName(
 			`No profile of this article's campaigns is called “${name}”.`,
-			namesNear(
-				name,
-				campaigns.value.flatMap((campaign) => slugs(campaign.profiles))
-			)
+
+			name,
+			campaigns.value.flatMap((campaign) => slugs(campaign.profiles))
 		)
 	);
 }
@@ -85,12 +81,11 @@ export function findWorkload(
 		return workload ? [{ campaign, workload }] : [];
 	});
 	return only(call, places, slugs(places.map((place) => place.campaign)), () =>
-		missing(
+		unknownName(
 			`No workload of this article's campaigns is called “${name}”.`,
-			namesNear(
-				name,
-				campaigns.value.flatMap((campaign) => slugs(campaign.workloads))
-			)
+
+			name,
+			campaigns.value.flatMap((campaign) => slugs(campaign.workloads))
 		)
 	);
 }
@@ -137,9 +132,10 @@ export function findBaseline(call: Call, campaign: CampaignData): Lookup<Profile
 	const profile = campaign.profiles.find((one) => one.slug === name);
 	return profile
 		? found(profile)
-		: missing(
+		: unknownName(
 				`${campaign.name} has no profile called “${name}” to hold this against.`,
-				namesNear(name, slugs(campaign.profiles))
+				name,
+				slugs(campaign.profiles)
 			);
 }
 

@@ -2,7 +2,7 @@ import { gainsSpec } from '../plates/gains-spec';
 import { plateFigure } from '../plates/figure';
 import { scoresSpec } from '../plates/scores-spec';
 import { plateKinds, type PlateSpec } from '../plates/spec';
-import { namesNear } from '../names-near';
+import { unknownName } from '../names-near';
 import type { ArticleData, CampaignData } from '../data';
 import { attribute, findBaseline, findCampaign, findWorkload } from './lookup';
 import { directive, found, missing, type Call, type Lookup, type UsedCell } from './shape';
@@ -17,17 +17,16 @@ function chosen(call: Call, campaign: CampaignData): Lookup<string[] | undefined
 	);
 	return stranger === undefined
 		? found(names)
-		: missing(`${campaign.name} has no profile called “${stranger}”.`, namesNear(stranger, known));
+		: unknownName(`${campaign.name} has no profile called “${stranger}”.`, stranger, known);
 }
 
 function scores(call: Call, data: ArticleData): Lookup<PlateSpec> {
 	if (call.attributes.workload === undefined) {
-		return missing(
+		return unknownName(
 			'A plate of scores needs a workload.',
-			namesNear(
-				'',
-				data.campaigns.flatMap((campaign) => campaign.workloads.map((one) => one.slug))
-			)
+
+			'',
+			data.campaigns.flatMap((campaign) => campaign.workloads.map((one) => one.slug))
 		);
 	}
 	const place = findWorkload(call, data);

@@ -1,9 +1,9 @@
-import { verdictWords } from '../../bench/figures';
+import { verdictWords, type WorkloadFacts } from '../../bench/figures';
 import { printed, printedGain, printedPercent, printedRange } from '../../shared/quantity';
 import { comparisonOver } from '../against';
 import { precisionOf } from '../figures-in-words';
-import { element, table } from '../html';
-import { namesNear } from '../names-near';
+import { element, table, type RowGroup } from '../html';
+import { unknownName } from '../names-near';
 import type { CampaignData, ProfileFacts } from '../data';
 import { attribute, figuresOf, findBaseline, findCampaign } from './lookup';
 import { directive, found, missing, type UsedCell } from './shape';
@@ -11,42 +11,45 @@ import { directive, found, missing, type UsedCell } from './shape';
 interface Results {
 	campaign: CampaignData;
 	over: ProfileFacts;
-	rows: string[][];
+	groups: RowGroup[];
 	cells: UsedCell[];
 }
 
-function rowsOf(
+/** One line of the table: how often, how much, how sure, and against what. */
+function lineOf(
 	campaign: CampaignData,
-	over: ProfileFacts,
-	only: string | undefined
-): Pick<Results, 'rows' | 'cells'> {
-	const rows: string[][] = [];
-	const cells: UsedCell[] = [];
-	for (const workload of campaign.workloads) {
-		if (only !== undefined && workload.slug !== only) continue;
-		for (const profile of campaign.profiles) {
-			const summary = figuresOf(campaign, profile.slug, workload.slug)?.summary;
-			if (!summary) {
-				rows.push([`${workload.name}, ${workload.unit}`, profile.name, '0', 'not measured', '', '', '', '']);
-				continue;
-			}
-			const comparison = comparisonOver(campaign, workload, profile.slug, over.slug);
-			const precision = precisionOf(summary);
-			cells.push({ campaign: campaign.slug, profile: profile.slug, workload: workload.slug });
-			rows.push([
-				`${workload.name}, ${workload.unit}`,
-				profile.name,
-				String(summary.n),
-				printed(summary.mean, precision),
-				summary.ci95 ? printedRange(summary.ci95, precision) : 'none',
-				summary.cvPercent === null ? 'none' : printedPercent(summary.cvPercent),
-				comparison ? printedGain(comparison.gainPercent, comparison.gainCi95) : '',
-				comparison ? verdictWords[comparison.verdict] : profile.slug === over.slug ? 'held against' : ''
-			]);
-		}
-	}
-	return { rows, cells };
+	workload: WorkloadFacts,
+	profile: ProfileFacts,
+	over: string
+): string[] {
+	const summary = figuresOf(campaign, profile.slug, workload.slug)?.summary;
+	if (!summary) return [profile.name, '0', 'not measured', '', '', '', ''];
+	const comparison = comparisonOver(campaign, workload, profile.slug, over);
+	const precision = precisionOf(summary);
+	return [
+		profile.name,
+		String(summary.n),
+		printed(summary.mean, precision),
+		summary.ci95 ? printedRange(summary.ci95, precision) : 'none',
+		summary.cvPercent === null ? 'none' : printedPercent(summary.cvPercent),
+		comparison ? printedGain(comparison.gainPercent, comparison.gainCi95) : '',
+		comparison ? verdictWords[comparison.verdict] : profile.slug === over ? 'baseline' : ''
+	];
 }
+
+function groupsOf(campaign: CampaignData, over: string, only: string | undefined): RowGroup[] {
+	return campaign.workloads
+		.filter((workload) => only === undefined || workload.slug === only)
+		.map((workload) => ({
+			head: `${workload.name}, ${workload.unit}, ${workload.better === 'higher' ? 'more' : 'less'} is better`,
+			rows: campaign.profiles.map((profile) => lineOf(campaign, workload, profile, over))
+		}));
+}
+
+const measuredCells = (campaign: CampaignData, only: string | undefined): UsedCell[] =>
+	campaign.cells
+		.filter((cell) => cell.summary !== null && (only === undefined || cell.workload === only))
+		.map(({ profile, workload }) => ({ campaign: campaign.slug, profile, workload }));
 
 /** `::results`: every cell of a campaign as a table. */
 export const results = directive<Results>({
@@ -62,21 +65,25 @@ export const results = directive<Results>({
 		const only = call.attributes.workload;
 		const known = campaign.value.workloads.map((one) => one.slug);
 		if (only !== undefined && !known.includes(only)) {
-			return missing(`${campaign.value.name} has no workload called “${only}”.`, namesNear(only, known));
+			return unknownName(`${campaign.value.name} has no workload called “${only}”.`, only, known);
 		}
-		const { rows, cells } = rowsOf(campaign.value, over.value, only);
+		const cells = measuredCells(campaign.value, only);
 		return cells.length === 0
 			? missing(`${campaign.value.name} has no readings yet, so there is no table to print.`)
-			: found({ campaign: campaign.value, over: over.value, rows, cells });
+			: found({
+					campaign: campaign.value,
+					over: over.value,
+					groups: groupsOf(campaign.value, over.value.slug, only),
+					cells
+				});
 	},
-	render: ({ campaign, over, rows, cells }, { call }) => ({
+	render: ({ campaign, over, groups, cells }, { call }) => ({
 		html: element(
 			'div',
 			{ class: 'results', 'data-line': call.line },
 			table(
-				`Results of ${campaign.name}. Gains are over ${over.name}, turned so that more is better.`,
+				`Results of ${campaign.name}. Gains are over ${over.name}; above nought is better.`,
 				[
-					{ head: 'Workload' },
 					{ head: 'Profile' },
 					{ head: 'n', figures: true },
 					{ head: 'Mean', figures: true },
@@ -85,7 +92,7 @@ export const results = directive<Results>({
 					{ head: 'Gain', figures: true },
 					{ head: 'Verdict' }
 				],
-				rows
+				groups
 			)
 		),
 		plain: `Results of ${campaign.name}`,

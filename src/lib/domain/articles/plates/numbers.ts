@@ -1,5 +1,5 @@
 import { verdictWords } from '../../bench/figures';
-import { printed, printedRatio } from '../../shared/quantity';
+import { halfWidthOf, printed, printedRange, printedRatio } from '../../shared/quantity';
 import { table } from '../html';
 import type { GainsSpec, PlateSpec, ScoresSpec } from './spec';
 
@@ -13,20 +13,26 @@ const scoresTable = (spec: ScoresSpec): string =>
 			{ head: '95 % interval', figures: true },
 			{ head: 'Standard deviation', figures: true }
 		],
-		spec.rows.map((row) => [
-			row.name,
-			String(row.n),
-			row.printed,
-			row.printedInterval ?? 'none',
-			row.sd === null ? 'none' : printed(row.sd, { halfWidth: row.sd })
-		])
+		[
+			{
+				rows: spec.rows.map((row) => {
+					const precision = { halfWidth: halfWidthOf(row.ci95) };
+					return [
+						row.name,
+						String(row.n),
+						printed(row.value, precision),
+						row.ci95 ? printedRange(row.ci95, precision) : 'none',
+						row.sd === null ? 'none' : printed(row.sd, { halfWidth: row.sd })
+					];
+				})
+			}
+		]
 	);
 
 const gainsTable = (spec: GainsSpec): string =>
 	table(
 		`Numbers of ${spec.title}`,
 		[
-			{ head: 'Workload' },
 			{ head: 'Profile' },
 			{ head: 'n', figures: true },
 			{ head: 'Ratio', figures: true },
@@ -34,13 +40,13 @@ const gainsTable = (spec: GainsSpec): string =>
 			{ head: '95 % interval', figures: true },
 			{ head: 'Verdict' }
 		],
-		spec.rows.flatMap((row) =>
-			row.points.flatMap((point, index) =>
+		spec.rows.map((row) => ({
+			head: row.name,
+			rows: row.points.flatMap((point, index) =>
 				point === null
 					? []
 					: [
 							[
-								row.name,
 								spec.series[index]?.name ?? point.profile,
 								String(point.n),
 								printedRatio(point.ratio),
@@ -50,7 +56,7 @@ const gainsTable = (spec: GainsSpec): string =>
 							]
 						]
 			)
-		)
+		}))
 	);
 
 /** The numbers of a plate as a table, at printed rounding. */

@@ -86,6 +86,16 @@ describe('the job runner', () => {
 		expect(await jobs.countDead(database.db)).toBe(1);
 	});
 
+	it('gives up what ended its process at every attempt, instead of trying it for ever', async () => {
+		await enqueue(database.db, now, [{ kind: 'count', payload: {}, runAt: now }]);
+		await database.db.update(job).set({ attempts: 8, maxAttempts: 8, leasedBy: 'killed', leasedUntil: now });
+		let ran = 0;
+		const handlers = { count: () => Promise.resolve(void ran++) };
+		expect(await runDue(ctx(later(1)), { tools: noMail, handlers })).toBe(1);
+		expect(ran).toBe(0);
+		expect(await jobs.countDead(database.db)).toBe(1);
+	});
+
 	it('leaves what has a later time alone until that time', async () => {
 		await enqueue(database.db, now, [{ kind: 'count', payload: {}, runAt: later(1000) }]);
 		const handlers = { count: () => Promise.resolve() };

@@ -27,11 +27,14 @@ const wordsOf = (error: unknown) =>
 async function runOne(
 	ctx: SystemContext,
 	claimed: ClaimedJob,
-	{ tools, handlers = everyHandler, name = '', jitter = Math.random }: Work
+	{ tools, handlers = everyHandler, name, jitter = Math.random }: Work & { name: string }
 ): Promise<void> {
 	try {
 		const handler = handlers[claimed.kind];
 		if (!handler) throw new Error(`Nothing here does jobs of the kind ${claimed.kind}.`);
+		// Each attempt before ended without a word: what kills its process is not tried for ever.
+		if (claimed.attempts > claimed.maxAttempts)
+			throw new Error('The process that did this job ended in the middle of it, at every attempt.');
 		await handler(ctx, claimed.payload, tools);
 		await jobs.finish(ctx.db, claimed, name, ctx.now);
 	} catch (error) {
@@ -45,22 +48,26 @@ async function runOne(
 	}
 }
 
+/** Takes one batch of what is due and does it. @returns how many attempts were made */
+async function runBatch(ctx: SystemContext, work: Work & { name: string }): Promise<number> {
+	const claimed = await jobs.claim(ctx.db, ctx.now, {
+		name: work.name,
+		until: new Date(ctx.now.getTime() + leaseMs),
+		limit: batch
+	});
+	await Promise.all(claimed.map((one) => runOne(ctx, one, work)));
+	return claimed.length;
+}
+
 /**
  * Runs what is due now, batch after batch, until nothing is; what falls due later waits.
  * @returns how many attempts were made
  */
 export async function runDue(ctx: SystemContext, work: Work): Promise<number> {
-	const name = work.name ?? randomUUID();
-	for (let total = 0; ;) {
-		const claimed = await jobs.claim(ctx.db, ctx.now, {
-			name,
-			until: new Date(ctx.now.getTime() + leaseMs),
-			limit: batch
-		});
-		if (claimed.length === 0) return total;
-		await Promise.all(claimed.map((one) => runOne(ctx, one, { ...work, name })));
-		total += claimed.length;
-	}
+	const named = { ...work, name: work.name ?? randomUUID() };
+	let total = 0;
+	for (let made = 1; made > 0; total += made) made = await runBatch(ctx, named);
+	return total;
 }
 
 /** Queues the recurring jobs of the current period; whoever comes second finds them there. */
@@ -99,8 +106,9 @@ export function startRunner(base: Omit<SystemContext, 'now'>, tools: JobTools): 
 			// The periods are hours and days: asking once a minute is often enough.
 			if (Math.floor(now.getTime() / 60_000) !== minute) await queueRecurring({ ...base, now });
 			minute = Math.floor(now.getTime() / 60_000);
-			await runDue({ ...base, now: clock.now() }, { tools, name });
-			last = clock.now();
+			// The time is read for each batch: a lease counts from when its work begins, however long the queue is.
+			do last = clock.now();
+			while ((await runBatch({ ...base, now: clock.now() }, { tools, name })) > 0 && !stopped);
 		} catch (error) {
 			log.error({ error: wordsOf(error) }, 'the job runner could not look for work');
 		}

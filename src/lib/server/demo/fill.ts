@@ -1,33 +1,59 @@
-import { randomUUID } from 'node:crypto';
-import { hash } from '@node-rs/argon2';
 import { count } from 'drizzle-orm';
-import { demoPassword, demoPeople } from '../../domain/people/demo';
-import { inTransaction, type Connection } from '../db/client';
-import { setting, user, userRole } from '../db/schema';
+import { inTransaction, type Connection, type Transaction } from '../db/client';
+import { setting, user } from '../db/schema';
+import { env } from '../env';
+import { perform, type World } from './act';
+import { calendarAround, demoZone } from './calendar';
+import { campaigns } from './campaigns/all';
+import { lenders } from './lenders';
+import { parts } from './parts';
+import { rigG2 } from './profiles/rig-g-2';
+import { rigM4 } from './profiles/rig-m-4';
+import { rigN12 } from './profiles/rig-n-12';
+import { treeActs } from './profiles/tree';
+import { rigActs } from './rigs';
+import { samples } from './samples';
+import { insertStaff } from './staff';
+import { workloads } from './workloads';
 
-/** Fills an empty database with the demo; one with people in it is left as it is. */
-export async function fillDemo(db: Connection, now: Date): Promise<boolean> {
+const publication = {
+	name: 'Northlight Hardware',
+	zone: demoZone,
+	tagline: 'Measured first, then printed.'
+};
+
+const story = (world: World) => [
+	...parts(world),
+	...samples(world),
+	...lenders(world),
+	...workloads(world),
+	...rigActs(world),
+	...[rigN12, rigM4, rigG2].flatMap((tree) => treeActs(world, tree)),
+	...campaigns(world)
+];
+
+/** Fills within one transaction; false where another fill was there first. */
+async function fill(tx: Transaction, now: Date, origin: string): Promise<boolean> {
+	const calendar = calendarAround(now);
+	const world: World = { calendar, runs: new Map(), loans: new Map(), comments: new Map() };
+	const staff = await insertStaff(tx, calendar.at(-70, '09:00'));
+	if (!staff) return false;
+	await tx.insert(setting).values({ key: 'publication', isDemo: true, value: publication });
+	await perform(story(world), staff, { db: tx, origin });
+	return true;
+}
+
+/**
+ * Fills an empty database with the demo; one with people in it is left as it is. It is one transaction, so a fill
+ * that is interrupted leaves nothing, and of two at once the later finds the people of the earlier.
+ * @returns whether it was this call that filled it
+ */
+export async function fillDemo(
+	db: Connection,
+	now: Date,
+	origin = env().ORIGIN.replace(/\/$/, '')
+): Promise<boolean> {
 	const [people] = await db.select({ n: count() }).from(user);
 	if ((people?.n ?? 0) > 0) return false;
-	const passwordHash = await hash(demoPassword);
-	await inTransaction(db, async (tx) => {
-		const rows = demoPeople.map((person) => ({
-			id: randomUUID(),
-			name: person.name,
-			email: person.email,
-			passwordHash,
-			createdAt: now,
-			role: person.role
-		}));
-		await tx.insert(user).values(rows);
-		await tx.insert(userRole).values(rows.map(({ id, role }) => ({ userId: id, role })));
-		await tx
-			.insert(setting)
-			.values({
-				key: 'publication',
-				isDemo: true,
-				value: { name: 'Northlight Hardware', zone: 'Europe/Oslo', tagline: 'Measured first, then printed.' }
-			});
-	});
-	return true;
+	return inTransaction(db, (tx) => fill(tx, now, origin));
 }

@@ -25,7 +25,7 @@ export interface FixtureReading {
 export const fixtureReadings = (): FixtureReading[] =>
 	fixture('readings.csv')
 		.trim()
-		.split('\n')
+		.split(/\r?\n/)
 		.slice(1)
 		.map((line) => {
 			const [profileSlug = '', work = '', unit = '', better, kind, repeat, value, startedAt = ''] =

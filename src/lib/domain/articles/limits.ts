@@ -28,17 +28,17 @@ export function refusalOf(source: string): { message: string; line: number } | n
 	let number = 0;
 	for (const line of source.split(/\r\n|\r|\n/)) {
 		number += 1;
+		if (nestingOf(line) > maxNesting) {
+			return {
+				line: number,
+				message: `Quotes or lists are nested deeper than ${maxNesting} levels. Take some levels out. What you typed is kept.`
+			};
+		}
 		block = line.trim() === '' ? 0 : block + line.length + 1;
 		if (block > maxBlockLength) {
 			return {
 				line: number,
 				message: `One block without an empty line has more than ${maxBlockLength} characters. Part it with empty lines. What you typed is kept.`
-			};
-		}
-		if (nestingOf(line) > maxNesting) {
-			return {
-				line: number,
-				message: `Quotes or lists are nested deeper than ${maxNesting} levels. Take some levels out. What you typed is kept.`
 			};
 		}
 	}

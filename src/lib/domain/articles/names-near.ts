@@ -14,7 +14,6 @@ export function unknownName(
 	const near = nearest(typed, names);
 	if (near.length > 0 || names.length === 0) return missing(message, near);
 	const first = names.slice(0, 5).join(', ');
-	return missing(
-		`${message} There ${names.length === 1 ? 'is' : 'are'} ${first}${names.length > 5 ? ' …' : ''}.`
-	);
+	const more = names.length > 5 ? ` and ${names.length - 5} more` : '';
+	return missing(`${message} There ${names.length === 1 ? 'is' : 'are'} ${first}${more}.`);
 }

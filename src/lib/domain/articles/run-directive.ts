@@ -2,6 +2,7 @@ import type { DirectiveToken } from './directive-syntax';
 import { allDirectives } from './directives/all-directives';
 import { missing, type AnyDirective, type Lookup, type Press, type Printed } from './directives/shape';
 import { unknownName } from './names-near';
+import { nearest } from '../shared/nearest';
 
 const byName = new Map(allDirectives.map((one) => [one.name, one]));
 const names = [...byName.keys()];
@@ -33,10 +34,9 @@ function valueProblem(one: AnyDirective, { call, data }: Press): ReturnType<type
 		const value = call.attributes[name];
 		const allowed = fixed.has(name) ? values(data, call.attributes) : null;
 		if (value !== undefined && allowed && !allowed.includes(value)) {
-			return unknownName(
+			return missing(
 				`“${value}” is no ${name} of “${one.name}”. It can be ${allowed.join(', ')}.`,
-				value,
-				allowed
+				nearest(value, allowed)
 			);
 		}
 	}

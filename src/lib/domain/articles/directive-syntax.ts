@@ -28,7 +28,8 @@ const closing = /\n:::[ \t]*(?:\n+|$)/;
 
 /** Where an inline directive may start. Looked for in a window, since this is asked at every piece of text. */
 function inlineStart(source: string): number | undefined {
-	const at = source.slice(0, 2000).search(/:[a-z][\w-]*\{/i);
+	const near = source.slice(0, 2000);
+	const at = near.includes(':') ? near.search(/:[a-z][\w-]*\{/i) : -1;
 	if (at >= 0) return at;
 	// Nothing starts before here, and what comes after is looked at again from here.
 	return source.length > 2000 ? 2000 - longestLine : undefined;

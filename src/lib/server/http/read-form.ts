@@ -10,7 +10,8 @@ type Shape = Record<string, unknown>;
 type FormSchema = z.ZodObject | z.ZodPipe<z.ZodObject, z.ZodType<Shape, Shape>>;
 
 /** A form as its page shows it: what was typed, as it was typed, with the errors beside it. */
-export type Form<S extends FormSchema> = SuperValidated<z.input<S> & Shape, string, z.input<S> & Shape>;
+export type Form<S extends FormSchema> =
+	z.input<S> extends infer Typed extends Shape ? SuperValidated<Typed, string, Typed> : never;
 
 const adapterOf = <S extends FormSchema>(schema: S, blank: z.input<S>) =>
 	zod4(schema, { config: { io: 'input' }, defaults: blank as never });

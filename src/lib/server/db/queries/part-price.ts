@@ -44,3 +44,8 @@ export const ofParts = async (db: Db, partIds: number[]) =>
 export async function insert(db: Db, rows: (typeof partPrice.$inferInsert)[]): Promise<void> {
 	if (rows.length > 0) await db.insert(partPrice).values(rows);
 }
+
+/** The currency of the price written last; undefined before the first. */
+export const lastCurrency = async (db: Db) =>
+	(await db.select({ currency: partPrice.currency }).from(partPrice).orderBy(desc(partPrice.id)).limit(1))[0]
+		?.currency;

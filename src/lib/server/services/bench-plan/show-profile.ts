@@ -1,15 +1,16 @@
+import { chainTo } from '../../../domain/bench/profile';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as profiles from '../../db/queries/profile';
 import * as rigs from '../../db/queries/rig';
-import { lineage, withHeirs } from './profile-tree';
+import { withHeirs } from './profile-tree';
 
 type Found = Awaited<ReturnType<typeof profiles.byIds>>[number];
 
 async function pageOf(ctx: Context, profile: Found) {
 	const tree = await profiles.ofRigs(ctx.db, [profile.rigId]);
-	const line = lineage(tree, profile.id);
+	const line = chainTo(tree, profile.id);
 	const heirs = withHeirs(tree, profile.id);
 	const [settings, campaigns, measured] = await Promise.all([
 		profiles.settingsOf(

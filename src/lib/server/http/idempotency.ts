@@ -55,7 +55,12 @@ async function firstTime(ctx: Context, row: keys.KeyedRequest, run: (ctx: Contex
 
 async function replay(ctx: Context, row: keys.KeyedRequest): Promise<Response | null> {
 	const before = await keys.read(ctx.db, row.userId, row.key);
-	if (!before || ctx.now.getTime() - before.createdAt.getTime() > keyMs) return null;
+	if (!before) return null;
+	if (ctx.now.getTime() - before.createdAt.getTime() > keyMs) {
+		// Only a key that is seen to be old is removed: a blind DELETE would wait for whoever holds it.
+		await keys.forget(ctx.db, row.userId, row.key, new Date(ctx.now.getTime() - keyMs));
+		return null;
+	}
 	if (before.bodyHash !== row.bodyHash || before.method !== row.method || before.path !== row.path)
 		return otherRequest();
 	if (before.status === null) return busy();
@@ -93,7 +98,6 @@ export async function idempotent(
 		bodyHash: createHash('sha256').update(body.value).digest('hex'),
 		createdAt: ctx.now
 	};
-	await keys.forget(ctx.db, row.userId, key, new Date(ctx.now.getTime() - keyMs));
 	const known = await replay(ctx, row);
 	if (known) return known;
 	const result = await firstTime(ctx, row, run);

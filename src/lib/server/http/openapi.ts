@@ -24,14 +24,36 @@ export const describe = (operation: Described): Described => operation;
 
 type Json = Record<string, unknown>;
 
-const jsonSchema = (schema: z.ZodType, io: 'input' | 'output'): Json => {
-	const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
-		io,
-		target: 'draft-2020-12',
-		unrepresentable: 'any'
-	});
-	return rest;
-};
+/** References of a schema point into itself; inside this document the parts they name stand under components. */
+function pointed(value: unknown): unknown {
+	if (Array.isArray(value)) return value.map(pointed);
+	if (typeof value !== 'object' || value === null) return value;
+	return Object.fromEntries(
+		Object.entries(value).map(([key, inner]) =>
+			key === '$ref' && typeof inner === 'string'
+				? [key, inner.replace('#/$defs/', '#/components/schemas/')]
+				: [key, pointed(inner)]
+		)
+	);
+}
+
+function parted(schema: z.ZodType, io: 'input' | 'output'): { body: Json; parts: Json } {
+	const made = z.toJSONSchema(schema, { io, target: 'draft-2020-12', unrepresentable: 'any' });
+	const { $schema: _dialect, $defs = {}, ...body } = made;
+	return { body: pointed(body) as Json, parts: pointed($defs) as Json };
+}
+
+const jsonSchema = (schema: z.ZodType, io: 'input' | 'output'): Json => parted(schema, io).body;
+
+/** The named parts that all schemas share. */
+const partsOf = (operations: Described[]): Json =>
+	Object.assign(
+		{},
+		...operations.flatMap(({ body, response }) => [
+			parted(response, 'output').parts,
+			...(body ? [parted(body, 'input').parts] : [])
+		])
+	) as Json;
 
 const content = (schema: Json, type = 'application/json') => ({ [type]: { schema } });
 const problemRef = (description: string) => ({
@@ -136,7 +158,7 @@ export function openApi(operations: Described[], origin: string) {
 		servers: [{ url: origin }],
 		paths,
 		components: {
-			schemas: { Problem: problemSchema },
+			schemas: { ...partsOf(operations), Problem: problemSchema },
 			securitySchemes: {
 				token: { type: 'http', scheme: 'bearer', description: 'A personal token, made on your own page.' }
 			}

@@ -3,12 +3,16 @@ import { isTheme } from '../../domain/people/theme';
 
 const name = 'theme';
 
-/** Writes the chosen look into the page before it leaves, so that it never flashes in another. */
+/** The two faces of every screen's first line; the rest come when the page asks for them. */
+const firstFonts = /(instrument-sans-latin-wght|source-serif-4-latin-600)-normal/;
+
+/** Writes the chosen look into the page before it leaves, and sends for its type early, so that neither flashes. */
 export const theme: Handle = ({ event, resolve }) => {
 	const chosen = event.cookies.get(name);
 	const attribute = isTheme(chosen) && chosen !== 'system' ? `data-theme="${chosen}"` : '';
 	return resolve(event, {
-		transformPageChunk: ({ html }) => html.replace('data-theme="%theme%"', attribute)
+		transformPageChunk: ({ html }) => html.replace('data-theme="%theme%"', attribute),
+		preload: ({ type, path }) => type === 'js' || type === 'css' || (type === 'font' && firstFonts.test(path))
 	});
 };
 

@@ -3,9 +3,12 @@ import { inTransaction, type Connection, type Transaction } from '../db/client';
 import { setting, user } from '../db/schema';
 import { env } from '../env';
 import { perform, type World } from './act';
+import { articlesInHand } from './articles/in-hand';
+import { printedArticles } from './articles/printed';
 import { calendarAround, demoZone } from './calendar';
 import { campaigns } from './campaigns/all';
 import { lenders } from './lenders';
+import { settleLetters } from './letters';
 import { parts } from './parts';
 import { rigG2 } from './profiles/rig-g-2';
 import { rigM4 } from './profiles/rig-m-4';
@@ -29,7 +32,9 @@ const story = (world: World) => [
 	...workloads(world),
 	...rigActs(world),
 	...[rigN12, rigM4, rigG2].flatMap((tree) => treeActs(world, tree)),
-	...campaigns(world)
+	...campaigns(world),
+	...printedArticles(world),
+	...articlesInHand(world)
 ];
 
 /** Fills within one transaction; false where another fill was there first. */
@@ -40,6 +45,7 @@ async function fill(tx: Transaction, now: Date, origin: string): Promise<boolean
 	if (!staff) return false;
 	await tx.insert(setting).values({ key: 'publication', isDemo: true, value: publication });
 	await perform(story(world), staff, { db: tx, origin });
+	await settleLetters(tx);
 	return true;
 }
 

@@ -5,7 +5,7 @@ import { say } from './parts/words.mjs';
 
 const folder = process.env.DATA_DIR || 'data';
 const port = process.env.PORT || '5173';
-openDataFolder(folder, process.argv.includes('--fresh'));
+await openDataFolder(folder, process.argv.includes('--fresh'));
 const database = process.env.DATABASE_URL ? undefined : await embeddedDatabase(folder);
 const mail = process.env.SMTP_URL ? undefined : await embeddedMail(folder);
 remember(folder, { databasePort: database?.port, smtpPort: mail?.smtpPort, webPort: mail?.webPort });

@@ -1,15 +1,14 @@
 // Browser tests against the built application, on a fresh data folder with the demo in it.
 import { spawn } from 'node:child_process';
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { rmSync } from 'node:fs';
 import { ensureBuild } from './parts/build.mjs';
 import { embeddedDatabase, embeddedMail, secretOf } from './parts/embedded.mjs';
 import { freePort } from './parts/mariadb.mjs';
+import { scratchFolder } from './parts/scratch.mjs';
 import { giveUp } from './parts/words.mjs';
 
 ensureBuild();
-const folder = mkdtempSync(join(tmpdir(), 'calipress-e2e-'));
+const folder = scratchFolder('e2e');
 const [database, mail, port] = await Promise.all([
 	embeddedDatabase(folder),
 	embeddedMail(folder),

@@ -1,8 +1,9 @@
 // `npm run admin -- EMAIL`, `npm run token -- EMAIL SCOPE…`: commands on the database that DATABASE_URL names,
 // or on the one of `npm start`, which is started for as long as it takes where it is not running.
+import { join } from 'node:path';
 import { createServer } from 'vite';
-import { listens } from './parts/mariadb.mjs';
-import { embeddedDatabase, openDataFolder, remembered, secretOf } from './parts/embedded.mjs';
+import { runningMariadb } from './parts/mariadb.mjs';
+import { embeddedDatabase, openDataFolder, secretOf } from './parts/embedded.mjs';
 import { giveUp, say } from './parts/words.mjs';
 
 const [name, ...args] = process.argv.slice(2);
@@ -11,16 +12,15 @@ const folder = process.env.DATA_DIR || 'data';
 
 async function databaseUrl() {
 	if (process.env.DATABASE_URL) return { url: process.env.DATABASE_URL, stop: async () => undefined };
-	const { databasePort } = remembered(folder);
-	if (databasePort && (await listens(databasePort)))
-		return { url: `mysql://root@127.0.0.1:${databasePort}/calipress`, stop: async () => undefined };
-	openDataFolder(folder, false);
+	const running = runningMariadb(join(folder, 'mariadb'));
+	if (running) return { url: `${running.url}calipress`, stop: async () => undefined };
+	await openDataFolder(folder, false);
 	return embeddedDatabase(folder);
 }
 
 const { url, stop } = await databaseUrl();
 process.env.DATABASE_URL = url;
-process.env.AUTH_SECRET ||= process.env.DATABASE_URL ? secretOf(folder) : '';
+process.env.AUTH_SECRET ||= secretOf(folder);
 process.env.SMTP_URL ||= 'smtp://127.0.0.1:25';
 process.env.LOG_LEVEL ||= 'warn';
 // The commands are TypeScript with the application's own aliases: Vite loads them as it loads the application.

@@ -1,8 +1,10 @@
 // Serves the built application and ends calmly: readiness says no first, open connections are told to close,
 // what is in flight is answered, then the jobs and the database are closed.
+import { readFileSync } from 'node:fs';
 import { createServer } from 'node:http';
 
-const drainMs = Number(process.env.SHUTDOWN_TIMEOUT_MS ?? 20_000);
+const drainMs = Number(process.env.SHUTDOWN_TIMEOUT_MS || 20_000);
+const noticeMs = Number(process.env.SHUTDOWN_NOTICE_MS || 0);
 const host = process.env.HOST || '127.0.0.1';
 const port = Number(process.env.PORT || 3000);
 process.env.ORIGIN ||= `http://localhost:${port}`;
@@ -13,6 +15,13 @@ if (Number(process.env.PROXY_DEPTH) > 0) {
 	process.env.XFF_DEPTH ||= process.env.PROXY_DEPTH;
 }
 
+// Files and early refusals are answered without the application's hooks; these are on them too.
+const headers = Object.entries(
+	JSON.parse(readFileSync(new URL('../src/lib/server/http/security-headers.json', import.meta.url), 'utf8'))
+);
+if (process.env.ORIGIN.startsWith('https:'))
+	headers.push(['strict-transport-security', 'max-age=31536000; includeSubDomains']);
+
 let handler;
 try {
 	({ handler } = await import('../build/handler.js'));
@@ -22,6 +31,7 @@ try {
 }
 
 const server = createServer((request, response) => {
+	for (const [name, value] of headers) response.setHeader(name, value);
 	if (draining) response.setHeader('connection', 'close');
 	handler(request, response, () => {
 		response.statusCode = 404;
@@ -30,10 +40,15 @@ const server = createServer((request, response) => {
 });
 let draining = false;
 
+/** Readiness says no at once; the port closes when whoever watches it had time to notice. */
 function end() {
 	if (draining) return;
 	draining = true;
 	process.emit('calipress:drain');
+	setTimeout(closeServer, noticeMs);
+}
+
+function closeServer() {
 	const close = () => process.emit('calipress:close', () => process.exit(0)) || process.exit(0);
 	const patience = setTimeout(() => {
 		server.closeAllConnections();
@@ -47,6 +62,8 @@ function end() {
 	server.closeIdleConnections();
 	setInterval(() => server.closeIdleConnections(), 200).unref();
 }
+// Whoever started this and listens to it was killed: nobody is left to say when to end.
+process.on('disconnect', end);
 process.on('SIGTERM', end);
 process.on('SIGINT', end);
 

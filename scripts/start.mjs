@@ -28,19 +28,33 @@ if (await listens(port)) giveUp(`Calipress cannot start: PORT ${port} is in use.
 
 const { embeddedDatabase, embeddedMail, openDataFolder, remember, secretOf } =
 	await import('./parts/embedded.mjs');
-openDataFolder(folder, flags.has('--fresh'));
+await openDataFolder(folder, flags.has('--fresh'));
 
-/** @type {(() => Promise<void>)[]} */
+/** What was started, in its order. @type {(() => Promise<void>)[]} */
 const stops = [];
 const stopAll = async () => {
-	for (const stop of stops.reverse()) await stop();
-	stops.length = 0;
+	for (let stop = stops.pop(); stop; stop = stops.pop()) await stop();
+};
+/** @type {import('node:child_process').ChildProcess | undefined} */
+let app;
+let ending = false;
+for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']))
+	process.on(signal, () => {
+		ending = true;
+		// Asked to end before the application ran: what is starting ends as soon as it stands.
+		if (app) app.kill('SIGTERM');
+	});
+const endIfAsked = async () => {
+	if (!ending) return;
+	await stopAll();
+	process.exit(0);
 };
 /** @type {<T extends { stop: () => Promise<void> }>(starting: Promise<T>) => Promise<T>} */
 const started = async (starting) => {
 	try {
 		const service = await starting;
 		stops.push(service.stop);
+		await endIfAsked();
 		return service;
 	} catch (error) {
 		await stopAll();
@@ -54,7 +68,7 @@ const origin = process.env.ORIGIN || `http://localhost:${port}`;
 const demo = Boolean(database) && !flags.has('--empty');
 remember(folder, { databasePort: database?.port, smtpPort: mail?.smtpPort, webPort: mail?.webPort });
 
-const app = spawn(process.execPath, ['scripts/serve.mjs'], {
+app = spawn(process.execPath, ['scripts/serve.mjs'], {
 	stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
 	detached: true,
 	env: {
@@ -78,12 +92,10 @@ app.once('message', () => {
 	if (demo) {
 		say('\n  Demo sign-ins    tester@  writer@  editor@  liaison@  admin@northlight.example');
 		say('  Password         measure-then-print');
-	} else if (database) say('\n  First admin      npm run admin -- you@example.org');
+	} else say('\n  First admin      npm run admin -- you@example.org');
 	say(`\n  Data             ${folder} (kept; npm start -- --fresh begins anew)\n  Ctrl-C ends it.\n`);
 });
 app.once('exit', async (code, signal) => {
 	await stopAll();
 	process.exit(signal ? 0 : (code ?? 1));
 });
-for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']))
-	process.on(signal, () => app.kill('SIGTERM'));

@@ -2,19 +2,22 @@
 import { randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { createDatabase, startMariadb } from './mariadb.mjs';
+import { createDatabase, startMariadb, takeOver } from './mariadb.mjs';
 import { startMaildev } from './maildev.mjs';
 import { giveUp } from './words.mjs';
 
 const marker = '.calipress-data';
 
-/** Makes the data folder, or takes the one that is ours. @param {string} folder @param {boolean} fresh empties it first */
-export function openDataFolder(folder, fresh) {
+/** Makes the data folder, or takes the one that is ours and not in use. @param {string} folder @param {boolean} fresh empties it first */
+export async function openDataFolder(folder, fresh) {
 	const ours = existsSync(join(folder, marker));
 	if (existsSync(folder) && readdirSync(folder).length > 0 && !ours)
 		giveUp(
 			`DATA_DIR ${folder} holds other things than Calipress’s data. Name an empty folder; nothing was touched.`
 		);
+	await takeOver(join(folder, 'mariadb')).catch((error) =>
+		giveUp(`Calipress cannot start: ${error.message}`)
+	);
 	if (fresh) rmSync(folder, { recursive: true, force: true });
 	mkdirSync(folder, { recursive: true, mode: 0o700 });
 	writeFileSync(
@@ -25,6 +28,7 @@ export function openDataFolder(folder, fresh) {
 
 /** The secret that signs links, made once. @param {string} folder */
 export function secretOf(folder) {
+	mkdirSync(folder, { recursive: true, mode: 0o700 });
 	const file = join(folder, 'secret');
 	if (!existsSync(file)) writeFileSync(file, randomBytes(32).toString('hex'), { mode: 0o600 });
 	return readFileSync(file, 'utf8').trim();

@@ -1,5 +1,5 @@
-import { spawn } from 'node:child_process';
 import { mkdirSync } from 'node:fs';
+import { startService } from './child.mjs';
 import { freePort, listens, pause } from './mariadb.mjs';
 
 /**
@@ -11,23 +11,19 @@ export async function startMaildev({ folder, smtpPort, webPort }) {
 	mkdirSync(folder, { recursive: true });
 	const smtp = smtpPort && !(await listens(smtpPort)) ? smtpPort : await freePort();
 	const web = webPort && !(await listens(webPort)) ? webPort : await freePort();
-	const child = spawn(
-		process.execPath,
-		[
-			'node_modules/.bin/maildev',
-			'--smtp',
-			String(smtp),
-			'--ip',
-			'127.0.0.1',
-			'--web',
-			String(web),
-			'--web-ip',
-			'127.0.0.1',
-			'--mail-directory',
-			folder
-		],
-		{ stdio: 'ignore', detached: true }
-	);
+	const child = startService(process.execPath, [
+		'node_modules/.bin/maildev',
+		'--smtp',
+		String(smtp),
+		'--ip',
+		'127.0.0.1',
+		'--web',
+		String(web),
+		'--web-ip',
+		'127.0.0.1',
+		'--mail-directory',
+		folder
+	]);
 	const exited = new Promise((done) => child.once('exit', done));
 	const webUrl = `http://127.0.0.1:${web}`;
 	for (let attempt = 0; ; attempt++) {
@@ -36,7 +32,7 @@ export async function startMaildev({ folder, smtpPort, webPort }) {
 			() => false
 		);
 		if (up) break;
-		if (child.exitCode !== null || attempt > 200) throw new Error('The mail fake did not start.');
+		if (child.exitCode !== null || attempt > 200) throw new Error('the mail fake did not start.');
 		await pause(100);
 	}
 	const stop = async () => {

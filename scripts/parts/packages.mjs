@@ -10,8 +10,8 @@ const extraPaths = ['/usr/sbin', '/usr/local/sbin', '/sbin'];
 
 export function checkNode() {
 	const [major = 0, minor = 0] = process.versions.node.split('.').map(Number);
-	if (major < 20 || (major === 20 && minor < 19))
-		giveUp(`Calipress needs Node.js 20.19 or newer; this is ${process.versions.node}.`);
+	if (!((major === 20 && minor >= 19) || (major === 22 && minor >= 12) || major > 22))
+		giveUp(`Calipress needs Node.js 20.19, or 22.12 and newer; this is ${process.versions.node}.`);
 }
 
 /** Where a program is, looked for in the places of servers too. @param {string} name @returns {string | undefined} */

@@ -1,9 +1,9 @@
 import type { TestProject } from 'vitest/node';
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { startMaildev } from '../../scripts/parts/maildev.mjs';
 import { startMariadb } from '../../scripts/parts/mariadb.mjs';
+import { scratchFolder } from '../../scripts/parts/scratch.mjs';
 
 declare module 'vitest' {
 	interface ProvidedContext {
@@ -15,7 +15,7 @@ declare module 'vitest' {
 
 /** One MariaDB and one mail fake for all integration tests; each test file has databases of its own in it. */
 export default async function setup(project: TestProject) {
-	const folder = mkdtempSync(join(tmpdir(), 'calipress-test-'));
+	const folder = scratchFolder('test');
 	const [mariadb, maildev] = await Promise.all([
 		startMariadb({ folder: join(folder, 'mariadb'), throwaway: true }),
 		startMaildev({ folder: join(folder, 'mail') })

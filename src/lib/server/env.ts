@@ -8,6 +8,8 @@ const url = (protocols: string[]) =>
 			`is not a ${protocols.join(' or ')} address`
 		);
 
+const oneOf = <const T extends string>(...words: T[]) => z.enum(words, `is not one of ${words.join(', ')}`);
+
 const schema = z.object({
 	NODE_ENV: z.string().default('production'),
 	HOST: z.string().min(1).default('127.0.0.1'),
@@ -20,11 +22,15 @@ const schema = z.object({
 	DATA_DIR: z.string().min(1).default('data'),
 	/** Signs e-mailed links; at least 32 characters. */
 	AUTH_SECRET: z.string().min(32, 'has fewer than 32 characters'),
-	LOG_LEVEL: z.enum(['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent']).default('info'),
+	LOG_LEVEL: oneOf('trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent').default('info'),
 	/** Whether this process works on jobs; off for a process that only serves. */
-	JOBS: z.enum(['on', 'off']).default('on'),
+	JOBS: oneOf('on', 'off').default('on'),
 	/** Fill an empty database with the demo; only the start script sets it, and only with its own database. */
-	DEMO: z.enum(['on', 'off']).default('off'),
+	DEMO: oneOf('on', 'off').default('off'),
+	/** How long the end waits for what is in flight; the server script reads it. */
+	SHUTDOWN_TIMEOUT_MS: z.coerce.number('is not a number').int().min(0).max(600_000).default(20_000),
+	/** How long `/readyz` says no before the port closes, for a load balancer to notice. */
+	SHUTDOWN_NOTICE_MS: z.coerce.number('is not a number').int().min(0).max(600_000).default(0),
 	BODY_SIZE_LIMIT: z.string().default('2M'),
 	/** Reverse proxies to trust for the visitor's address; 0 when people connect directly. */
 	PROXY_DEPTH: z.coerce.number('is not a number').int().min(0).max(5).default(0)

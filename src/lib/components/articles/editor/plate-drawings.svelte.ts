@@ -2,8 +2,8 @@ import { SvelteMap } from 'svelte/reactivity';
 import type { PlateSpec } from '../../../domain/articles/plates/spec';
 import { plateKey } from '../../../domain/articles/plates/spec';
 
-/** Fetches drawings of plates by their keys; answers with those it could draw. */
-export type FetchPlates = (specs: PlateSpec[]) => Promise<Record<string, string>>;
+/** Fetches drawings of plates, in order; none where it could not. */
+export type FetchPlates = (specs: PlateSpec[]) => Promise<string[]>;
 
 const escapes: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;' };
 const waiting = (spec: PlateSpec) =>
@@ -41,9 +41,9 @@ export class PlateDrawings {
 		const specs = this.queue;
 		this.queue = [];
 		const found = await this.fetchPlates(specs);
-		for (const spec of specs) {
+		for (const [index, spec] of specs.entries()) {
 			const key = plateKey(spec);
-			const svg = found[key];
+			const svg = found[index];
 			// What could not be drawn now is asked for again by the next change of the text.
 			if (svg === undefined) this.asked.delete(key);
 			else this.drawn.set(key, svg);

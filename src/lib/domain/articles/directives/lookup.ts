@@ -1,4 +1,4 @@
-import type { CellFigures, Comparison, Summary, WorkloadFacts } from '../../bench/figures';
+import type { CellFigures, Summary, WorkloadFacts } from '../../bench/figures';
 import type { ArticleData, CampaignData, ProfileFacts } from '../data';
 import { unknownName } from '../names-near';
 import { found, missing, type Attribute, type Call, type Lookup, type Values } from './shape';
@@ -138,8 +138,6 @@ export function findBaseline(call: Call, campaign: CampaignData): Lookup<Profile
 				slugs(campaign.profiles)
 			);
 }
-
-export type Compared = { comparison: Comparison; baseline: ProfileFacts };
 
 const all = (data: ArticleData, attributes: Record<string, string>): CampaignData[] => {
 	const chosen = data.campaigns.filter((campaign) => campaign.slug === attributes.campaign);

@@ -31,7 +31,8 @@ const settingRow = z
 		note: line(500).default('')
 	})
 	.superRefine((row, ctx) => {
-		const filled = row.menuPath || row.setting || row.value || row.unit || row.note;
+		// A menu alone is a row begun and left: it is dropped like a blank one.
+		const filled = row.setting || row.value || row.unit || row.note;
 		if (filled && !row.setting)
 			ctx.addIssue({ code: 'custom', path: ['setting'], message: 'Name the setting, or clear the row.' });
 		if (filled && !row.value)
@@ -112,3 +113,19 @@ export const profilesQuery = listing(['rig', 'name', 'newest']).extend({
 	rig: z.string().trim().max(80).optional()
 });
 export type ProfilesQuery = z.output<typeof profilesQuery>;
+
+/** Stored settings as their form shows them, with blank rows at the end to be filled without scripts. */
+export const asTypedSettings = (stored: readonly SettingInput[], blank = 3): SettingTyped[] =>
+	[...stored, ...Array.from({ length: blank }, () => blankSetting())].map((setting, index) => ({
+		...setting,
+		order: index + 1
+	}));
+
+/** What a form's rows would set, for the facts and steps beside it while it is being filled. */
+export const settingsTyped = (rows: readonly SettingTyped[]): SettingInput[] =>
+	rows.flatMap((row) => {
+		const setting = settingRow.safeParse(row);
+		if (!setting.success || setting.data.setting === '') return [];
+		const { order: _, ...kept } = setting.data;
+		return [kept];
+	});

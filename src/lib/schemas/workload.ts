@@ -52,3 +52,28 @@ export const workloadsQuery = listing(['name', 'class', 'newest']).extend({
 	class: z.enum(workloadClasses).optional()
 });
 export type WorkloadsQuery = z.output<typeof workloadsQuery>;
+
+/** A form for the next version of a workload: all as it was, under a name of its own. */
+export function nextVersion({ slug, ...before }: WorkloadInput): WorkloadTyped {
+	const [, stem = slug, number] = /^(.*?)(?:-v(\d+))?$/.exec(slug) ?? [];
+	return {
+		...asTyped(before),
+		slug: `${stem.slice(0, 74).replace(/-+$/, '')}-v${Number(number ?? 1) + 1}`
+	};
+}
+
+/** A stored workload as its form shows it. */
+export const asTyped = (stored: Omit<WorkloadInput, 'slug'>) => ({
+	name: stored.name,
+	programVersion: stored.programVersion,
+	settings: stored.settings,
+	quantity: stored.quantity,
+	unit: stored.unit,
+	better: stored.better,
+	class: stored.class,
+	warmUps: String(stored.warmUps),
+	repeats: String(stored.repeats),
+	coolDownS: String(stored.coolDownS),
+	leastDifferencePercent: String(stored.leastDifferencePercent),
+	headline: stored.headline
+});

@@ -15,6 +15,20 @@ describe('a comment’s passage', () => {
 		expect(words('“The prime sieve”')).toEqual({ text: 'The prime sieve', exact: true });
 	});
 
+	it('is found whichever apostrophe was typed', () => {
+		expect(words('Everybody’s modules', "One more. Everybody's modules are fine.")).toEqual({
+			text: "Everybody's modules",
+			exact: true
+		});
+	});
+
+	it('ends with its own last word when something was put before it', () => {
+		const text = 'Most modules are fine at that voltage for years. Caution: more voltage means more heat.';
+		expect(words('Everybody agrees modules are fine at that voltage for years', text)?.text).toBe(
+			'modules are fine at that voltage for years'
+		);
+	});
+
 	it('is followed as the text moves', () => {
 		const moved = `One more paragraph before it.\n\n${page}`;
 		expect(words('Held at 4.95 GHz', moved)).toEqual({ text: 'Held at 4.95 GHz', exact: true });

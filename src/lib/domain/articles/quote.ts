@@ -13,10 +13,10 @@ interface Word {
 	to: number;
 }
 
-/** Words with their offsets; case and marks around them do not matter. */
+/** Words with their offsets; case, the marks around them and the kind of apostrophe do not matter. */
 const wordsOf = (text: string): Word[] =>
 	[...text.matchAll(/[\p{L}\p{N}](?:[^\s]*[\p{L}\p{N}%°])?/gu)].map((match) => ({
-		word: match[0].toLowerCase(),
+		word: match[0].toLowerCase().replace(/[’ʼ]/g, "'"),
 		from: match.index,
 		to: match.index + match[0].length
 	}));
@@ -65,5 +65,9 @@ export function standingOf(quote: string, text: string): Standing | null {
 		const common = inCommon(wanted, window);
 		if (common > best.common) best = { start, common };
 	}
-	return best.common >= size * share && best.start >= 0 ? at(best.start, size, false) : null;
+	if (best.common < size * share || best.start < 0) return null;
+	// The window may reach past the passage: it ends where no more of the quote would be lost.
+	const window = words.slice(best.start, best.start + size + 2).map((one) => one.word);
+	while (inCommon(wanted, window.slice(0, -1)) === best.common) window.pop();
+	return at(best.start, window.length, false);
 }

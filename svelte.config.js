@@ -17,7 +17,13 @@ export default {
 			directives: {
 				'default-src': ['self'],
 				'script-src': ['self'],
-				'style-src': ['self'],
+				'style-src': [
+					'self',
+					// The cursor while the editor's divider is dragged: three fixed rules of the pane library.
+					'sha256-ejxaNqI9HE4qAX7B2hAfln6pnS37ktMxKSd3kZCKrvU=',
+					'sha256-3E7V3vrrCp0FIalfwVOrEiZQA9GXrPxylQSBapcdnoM=',
+					'sha256-XvJ01jaWVHkBTx63VEEV8Mmbn7pi9cbgzXIyweci36Q='
+				],
 				// Charts and the editor place things with style attributes; those cannot run script.
 				'style-src-attr': ['unsafe-inline'],
 				'img-src': ['self', 'data:'],

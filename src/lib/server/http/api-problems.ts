@@ -15,7 +15,12 @@ async function wordsOf(response: Response): Promise<string> {
 /** What went wrong in the words of a page becomes a problem document for a script. */
 async function problemOf(response: Response): Promise<Response> {
 	const { status, headers } = response;
-	const detail = status >= 500 ? 'Something failed on our side. Try again.' : await wordsOf(response);
+	const detail =
+		status >= 500
+			? 'Something failed on our side. Try again.'
+			: status === 405
+				? `This address answers ${headers.get('allow') ?? 'other methods'}.`
+				: await wordsOf(response);
 	const title = titles[status] ?? (status >= 500 ? 'Failed' : 'Not accepted');
 	const answer = problem(status, title, detail || title);
 	for (const name of ['allow', 'retry-after']) {

@@ -32,7 +32,7 @@ export const actions = {
 		if (!value) return refuseForm(form);
 		const outcome = await markLeft(ctx, params.id, value);
 		if (!outcome.ok) return refusedForm(form, outcome);
-		return { said: 'Marked as left. Their sessions and tokens have ended.' };
+		return { form, said: 'Marked as left. Their sessions and tokens have ended.' };
 	}),
 	return: guarded('people.manage', async ({ params, request }: RequestEvent, ctx) => {
 		const { form, value } = await readForm(request, returnInput, { version: 1 }, 'return');

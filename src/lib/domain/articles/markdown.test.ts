@@ -1,9 +1,12 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { isSafeLink, isSameSitePath } from './links';
 import { maxSourceLength } from './limits';
 import { countWords } from './plain-text';
 import { renderArticle } from './render-article';
+
+// Real work, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000 });
 
 const bare = { campaigns: [], duties: [], zone: 'UTC' };
 const render = (source: string) => renderArticle(source, bare, () => '');

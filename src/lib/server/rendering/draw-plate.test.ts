@@ -1,10 +1,13 @@
 import { readFileSync } from 'node:fs';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { measuredArticle, measuredCampaign } from '../../../../tests/fixtures/article-data';
 import type { GainsSpec, PlateSpec, ScoresSpec } from '../../domain/articles/plates/spec';
 import { renderArticle } from '../../domain/articles/render-article';
 import { drawPlate } from './draw-plate';
 import { inks, standaloneSvg } from './standalone-svg';
+
+// Real work, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000 });
 
 function specOf(source: string): PlateSpec {
 	const spec = renderArticle(source, measuredArticle(), () => '').plates[0]?.spec;

@@ -1,7 +1,10 @@
 import Papa from 'papaparse';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { measuredArticle, measuredCampaign, reference } from '../../../../tests/fixtures/article-data';
 import { canonicalJson, editionHash, freezeEdition } from './freeze-edition';
+
+// Real work, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000 });
 
 const source =
 	'## Builds\n\nA build takes :reading{workload=source-build profile=stock}.\n\n::plate{kind=scores workload=source-build}\n\n::plate{kind=gains}\n\n::disclosure';

@@ -1,5 +1,5 @@
 import { JSDOM } from 'jsdom';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { measuredArticle } from '../../../../tests/fixtures/article-data';
 import type { ArticleData } from '../../domain/articles/data';
 import { renderArticle } from '../../domain/articles/render-article';
@@ -7,6 +7,9 @@ import { sanitiseConfig } from '../../domain/articles/sanitise-config';
 import { drawPlate } from './draw-plate';
 import { freezeEdition } from './freeze-edition';
 import { sanitisePage } from './sanitise-page';
+
+// Real work, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000 });
 
 /**
  * Outside checks: shapes of attack from public lists, the mutation ones as they were published with the

@@ -1,8 +1,11 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { measuredArticle, measuredCampaign } from '../../../../tests/fixtures/article-data';
 import { fillTemplate } from '../../domain/articles/fill-template';
 import { renderArticle } from '../../domain/articles/render-article';
 import { articleTemplates, templateOf } from './templates';
+
+// Real work, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000 });
 
 describe('templates', () => {
 	it('ship, with their heads', () => {

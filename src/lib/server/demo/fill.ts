@@ -8,7 +8,7 @@ import { printedArticles } from './articles/printed';
 import { calendarAround, demoZone } from './calendar';
 import { campaigns } from './campaigns/all';
 import { lenders } from './lenders';
-import { settleLetters } from './letters';
+import { settleJobs } from './settle-jobs';
 import { parts } from './parts';
 import { rigG2 } from './profiles/rig-g-2';
 import { rigM4 } from './profiles/rig-m-4';
@@ -45,7 +45,7 @@ async function fill(tx: Transaction, now: Date, origin: string): Promise<boolean
 	if (!staff) return false;
 	await tx.insert(setting).values({ key: 'publication', isDemo: true, value: publication });
 	await perform(story(world), staff, { db: tx, origin });
-	await settleLetters(tx);
+	await settleJobs(tx, now);
 	return true;
 }
 

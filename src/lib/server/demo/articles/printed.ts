@@ -38,7 +38,7 @@ const guide = (world: World) =>
 		.resolve([-28, '14:00'], 'Marit', 'guide/one processor')
 		.approve(-27, '10:00')
 		.schedule([-27, '10:05'], [-24, '15:00'])
-		.publish(-24, '15:00')
+		.slotComes(-24, '15:00')
 		.revise(
 			[-12, '10:10'],
 			'The first edition said that the fixed clock of 4.70 GHz costs nothing worth naming outside the render. It does: the prime sieve is slower, as the table of results showed from the start. The sentence is put right; no figure changed.'
@@ -85,8 +85,8 @@ const kit = (world: World) =>
 			body: 'True for all four rates, and the means are within the same interval. Nothing to change.'
 		})
 		.approve(-7, '15:20')
-		.schedule([-7, '15:30'], [-4, '09:00'])
-		.publish(-4, '09:00');
+		.schedule([-7, '15:30'], [-1, '09:00'])
+		.slotComes(-1, '09:00');
 
 const sleep = (world: World) =>
 	new Story(world, {

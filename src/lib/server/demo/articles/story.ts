@@ -1,4 +1,4 @@
-import type { Outcome } from '../../../domain/shared/outcome';
+import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { slugOf } from '../../../domain/shared/slug';
 import {
 	articleStart,
@@ -15,7 +15,7 @@ import { approveArticle } from '../../services/articles/approve-article';
 import { askChanges } from '../../services/articles/ask-changes';
 import { commentOnArticle, resolveComment } from '../../services/articles/comment-on-article';
 import { correctArticle } from '../../services/articles/correct-article';
-import { publishArticle } from '../../services/articles/publish-article';
+import { publishArticle, publishDue } from '../../services/articles/publish-article';
 import { reviseArticle } from '../../services/articles/revise-article';
 import { saveRevision } from '../../services/articles/save-revision';
 import { planSlot, scheduleArticle } from '../../services/articles/schedule-article';
@@ -156,6 +156,15 @@ export class Story {
 		return this.act(when, 'Marit', 'publication', (ctx, { version }) =>
 			publishArticle(ctx, this.slug, plainMove.parse({ version }))
 		);
+	}
+
+	/** The slot comes, and the schedule prints what is due. */
+	slotComes(day: number, time: string): this {
+		return this.act([day, time], 'Marit', 'slot', async ({ db, now, origin }, { id, approvedEditionId }) => {
+			const job = { articleId: id, editionId: approvedEditionId ?? 0 };
+			const outcome = await publishDue({ db, now, origin }, job);
+			return outcome === 'published' ? done(outcome) : refuse('conflict', `The slot came: ${outcome}.`);
+		});
 	}
 
 	revise(when: When, body: string): this {

@@ -30,7 +30,7 @@ const vite = await createServer({
 	logLevel: 'error',
 	optimizeDeps: { noDiscovery: true, include: [] }
 });
-let code = 1;
+let code;
 try {
 	const [{ run }, { openDatabase }, { migrateDatabase }] = await Promise.all([
 		vite.ssrLoadModule(`/src/lib/server/cli/${name}.ts`),

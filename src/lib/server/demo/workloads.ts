@@ -3,7 +3,7 @@ import { createWorkload } from '../services/bench-plan/create-workload';
 import type { Act, World } from './act';
 
 /** How far readings of a workload lie from each other on a calm bench, and how many decimals its program prints. */
-export interface Scatter {
+interface Scatter {
 	cvPercent: number;
 	decimals: number;
 }

@@ -35,7 +35,7 @@ export function prose(name: string): string {
 	return text;
 }
 
-export interface Comment {
+interface Comment {
 	/** How the demo calls it. */
 	name: string;
 	who: Who;

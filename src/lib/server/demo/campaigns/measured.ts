@@ -12,7 +12,7 @@ import type { Who } from '../staff';
 import { workloadFacts } from '../workloads';
 
 /** What one cell has that the others have not. */
-export interface Oddity {
+interface Oddity {
 	/** Readings taken, where not as many as the plan asks for. */
 	n?: number;
 	/** Factors on single readings, by their place from 0. */
@@ -23,7 +23,7 @@ export interface Oddity {
 }
 
 /** One profile measured through its workloads, one after another. */
-export interface Sitting {
+interface Sitting {
 	profile: string;
 	day: number;
 	/** When it began; 09:10 when left out. */

@@ -15,7 +15,7 @@ export type Row = [
 	note?: string
 ];
 
-export interface Written {
+interface Written {
 	slug: string;
 	name: string;
 	/** Stock when left out. */

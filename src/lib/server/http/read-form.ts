@@ -26,7 +26,8 @@ export async function blankForm<S extends FormSchema>(
 	id?: string
 ): Promise<Form<S>> {
 	const form = await superValidate(data as never, adapterOf(schema, data), { errors: false, id });
-	return form as unknown as Form<S>;
+	// The page shows what is to be filled in, not what the schema would make of it.
+	return { ...form, data } as unknown as Form<S>;
 }
 
 /**

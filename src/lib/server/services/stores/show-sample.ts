@@ -11,7 +11,7 @@ async function dutiesOf(ctx: Context, sampleId: number) {
 		samples.embargoesOf(ctx.db, [sampleId])
 	]);
 	return {
-		embargoes: embargoes.map(({ field, until }) => ({ field, until })),
+		embargoes: embargoes.filter(({ until }) => until > ctx.now).map(({ field, until }) => ({ field, until })),
 		disclosures: loans.map((loan) => loan.disclosure).filter((text) => text !== ''),
 		// Terms and partners are the liaison's.
 		loans: may(ctx.actor, 'loan.read')

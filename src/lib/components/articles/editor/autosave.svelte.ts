@@ -31,7 +31,8 @@ export type SaveState = 'saved' | 'typing' | 'saving' | 'failed' | 'conflict' | 
 export interface AutosaveOptions {
 	draft: Draft;
 	revision: number;
-	savedAt: Date;
+	/** ISO time of the newest revision. */
+	savedAt: string;
 	send: (draft: Draft & { basedOn: number }) => Promise<SaveAnswer>;
 	/** Keeps a text in this browser, or forgets it once it is saved. */
 	keep: (draft: (Draft & { basedOn: number }) | null) => void;
@@ -48,7 +49,7 @@ const same = (a: Draft, b: Draft) =>
 export class Autosave {
 	state = $state<SaveState>('saved');
 	revision = $state(0);
-	savedAt = $state(new Date(0));
+	savedAt = $state('');
 	message = $state('');
 	theirs = $state<Theirs | null>(null);
 
@@ -95,7 +96,7 @@ export class Autosave {
 		const { number, savedAt, title, standfirst, source } = this.theirs;
 		this.latest = this.stored = { title, standfirst, source };
 		this.revision = number;
-		this.savedAt = new Date(savedAt);
+		this.savedAt = savedAt;
 		this.theirs = null;
 		this.settle();
 		return this.latest;
@@ -152,7 +153,7 @@ export class Autosave {
 			case 'saved':
 				this.stored = draft;
 				this.revision = answer.revision;
-				this.savedAt = new Date(answer.savedAt);
+				this.savedAt = answer.savedAt;
 				if (same(this.latest, draft)) this.settle();
 				else {
 					this.state = 'saved';

@@ -16,7 +16,7 @@ function started(answers: SaveAnswer[]) {
 	const autosave = new Autosave({
 		draft: first,
 		revision: 4,
-		savedAt: new Date('2026-11-11T07:00:00Z'),
+		savedAt: '2026-11-11T07:00:00.000Z',
 		send: (draft) => {
 			sent.push(draft);
 			return Promise.resolve(answers.shift() ?? { kind: 'unreachable', message: 'no answer left' });

@@ -12,7 +12,7 @@ const waiting = (spec: PlateSpec) =>
 /** The drawings a page needs: what is there at once, what is not asked for together and once. */
 export class PlateDrawings {
 	private readonly drawn: SvelteMap<string, string>;
-	private readonly asked = new Set<string>();
+	private readonly asked: Record<string, boolean> = {};
 	private queue: PlateSpec[] = [];
 	private timer: ReturnType<typeof setTimeout> | undefined;
 
@@ -28,8 +28,8 @@ export class PlateDrawings {
 		const key = plateKey(spec);
 		const svg = this.drawn.get(key);
 		if (svg !== undefined) return svg;
-		if (!this.asked.has(key)) {
-			this.asked.add(key);
+		if (!this.asked[key]) {
+			this.asked[key] = true;
 			this.queue.push(spec);
 			clearTimeout(this.timer);
 			this.timer = setTimeout(() => void this.fetchQueued(), 80);
@@ -45,7 +45,7 @@ export class PlateDrawings {
 			const key = plateKey(spec);
 			const svg = found[index];
 			// What could not be drawn now is asked for again by the next change of the text.
-			if (svg === undefined) this.asked.delete(key);
+			if (svg === undefined) this.asked[key] = false;
 			else this.drawn.set(key, svg);
 		}
 	}

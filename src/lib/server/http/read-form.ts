@@ -54,7 +54,12 @@ export async function readForm<S extends FormSchema>(
 		}
 	};
 	const data = posted.has('__superform_json') ? posted : nestFields(posted);
+	const typed = data instanceof FormData ? {} : { ...data };
 	const form = await superValidate(data as never, keeping as typeof adapter, { id });
+	// The library puts a field's default where text stands for a number, such as the version of the row.
+	for (const [key, text] of Object.entries(typed)) {
+		if (key in blank && typeof text === 'string') form.data = { ...form.data, [key]: text };
+	}
 	form.posted = true;
 	return { form: form as unknown as Form<S>, value };
 }

@@ -43,3 +43,20 @@ export function readListing<S extends z.ZodObject>(schema: S, params: URLSearchP
 	for (const issue of parsed.error.issues) delete given[String(issue.path[0])];
 	return schema.parse(given);
 }
+
+/** What a list of the API takes from its address: words to look for, and a cursor instead of a page. */
+export const apiListing = z.object({
+	q: z
+		.string()
+		.trim()
+		.max(200, 'Look for at most 200 characters.')
+		.default('')
+		.describe('Words to look for.'),
+	limit: z.coerce.number('Give a whole number.').int('Give a whole number.').min(1).max(200).default(50),
+	after: z.coerce
+		.number('Pass `next` of the page before.')
+		.int('Pass `next` of the page before.')
+		.positive('Pass `next` of the page before.')
+		.optional()
+		.describe('`next` of the page before.')
+});

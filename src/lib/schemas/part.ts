@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { isCurrency, minorUnits } from '../domain/shared/money';
 import { partKinds } from '../domain/stores/words';
 import { line, optionalSlug, unchosen, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 /** A line of the specification; a line left blank is dropped, one half filled is refused. */
 const specificationLine = z
@@ -106,3 +106,6 @@ export const blankPrice = (today: string, currency = 'USD'): PriceTyped => ({
 /** What the list of parts takes from its address. */
 export const partsQuery = listing(['name', 'kind', 'newest']).extend({ kind: z.enum(partKinds).optional() });
 export type PartsQuery = z.output<typeof partsQuery>;
+
+export const partsApiQuery = apiListing.extend({ kind: z.enum(partKinds).optional() });
+export type PartsApiQuery = z.output<typeof partsApiQuery>;

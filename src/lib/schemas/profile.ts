@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { settingQuantities } from '../domain/bench/words';
 import { line, number, optionalSlug, paragraphs, reference, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing } from './listing';
 
 /** Menus from the outermost in, written with > or ›, kept with ' > ' between them. */
 const menuPath = line(300)
@@ -107,13 +107,6 @@ export const blankSetting = (menuPath = ''): SettingTyped => ({
 	note: ''
 });
 
-/** What the list of profiles takes from its address. */
-export const profilesQuery = listing(['rig', 'name', 'newest']).extend({
-	/** Slug or id of a rig. */
-	rig: z.string().trim().max(80).optional()
-});
-export type ProfilesQuery = z.output<typeof profilesQuery>;
-
 /** Stored settings as their form shows them, with blank rows at the end to be filled without scripts. */
 export const asTypedSettings = (stored: readonly SettingInput[], blank = 3): SettingTyped[] =>
 	[...stored, ...Array.from({ length: blank }, () => blankSetting())].map((setting, index) => ({
@@ -129,3 +122,9 @@ export const settingsTyped = (rows: readonly SettingTyped[]): SettingInput[] =>
 		const { order: _, ...kept } = setting.data;
 		return [kept];
 	});
+
+/** What the list of profiles takes from its address. */
+export const profilesApiQuery = apiListing.extend({
+	rig: z.string().trim().max(80).optional().describe('Slug or id of a rig.')
+});
+export type ProfilesApiQuery = z.output<typeof profilesApiQuery>;

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { line, optionalSlug, paragraphs, reference, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 const name = line(160).min(1, 'A rig needs a name.');
 
@@ -50,3 +50,8 @@ export const rigsQuery = listing(['name', 'revised', 'newest']).extend({
 	sample: z.string().trim().max(80).optional()
 });
 export type RigsQuery = z.output<typeof rigsQuery>;
+
+export const rigsApiQuery = apiListing.extend({
+	sample: z.string().trim().max(80).optional().describe('Slug or id of a sample: the rigs that have it now.')
+});
+export type RigsApiQuery = z.output<typeof rigsApiQuery>;

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { partKinds, provenances } from '../domain/stores/words';
 import { line, optionalSlug, reference, unchosen, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 const sampleFields = {
 	serial: line(120).default(''),
@@ -40,3 +40,10 @@ export const samplesQuery = listing(['code', 'part', 'place', 'newest']).extend(
 	part: z.string().trim().max(80).optional()
 });
 export type SamplesQuery = z.output<typeof samplesQuery>;
+
+export const samplesApiQuery = apiListing.extend({
+	provenance: z.enum(provenances).optional(),
+	kind: z.enum(partKinds).optional(),
+	part: z.string().trim().max(80).optional().describe('Slug or id of a part.')
+});
+export type SamplesApiQuery = z.output<typeof samplesApiQuery>;

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { directions, headlines, workloadClasses } from '../domain/bench/words';
 import { line, number, optionalSlug, paragraphs, unchosen, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 const workloadFields = {
 	name: line(160).min(1, 'A workload needs a name.'),
@@ -77,3 +77,6 @@ export const asTyped = (stored: Omit<WorkloadInput, 'slug'>) => ({
 	leastDifferencePercent: String(stored.leastDifferencePercent),
 	headline: stored.headline
 });
+
+export const workloadsApiQuery = apiListing.extend({ class: z.enum(workloadClasses).optional() });
+export type WorkloadsApiQuery = z.output<typeof workloadsApiQuery>;

@@ -1,4 +1,4 @@
-import { and, asc, desc, like, or, type Column, type SQL } from 'drizzle-orm';
+import { and, asc, desc, gt, like, or, type Column, type SQL } from 'drizzle-orm';
 
 /** Rows in which each word is found in one of the columns; undefined when there are no words. */
 export function containsWords(words: string, columns: Column[]): SQL | undefined {
@@ -27,3 +27,7 @@ export interface Window {
 	limit: number;
 	offset: number;
 }
+
+/** Rows behind a cursor, which is the id of the last row seen; all of them without one. */
+export const behind = (id: Column, after: number | undefined): SQL | undefined =>
+	after === undefined ? undefined : gt(id, after);

@@ -2,23 +2,27 @@ import { and, count, eq, inArray, or, sql } from 'drizzle-orm';
 import type { PartKind } from '../../../domain/stores/words';
 import type { Db } from '../client';
 import { part, sample } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface PartFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	kind?: PartKind;
 }
 
-export type PartSort = 'name' | 'kind' | 'newest';
+export type PartSort = 'id' | 'name' | 'kind' | 'newest';
 
 const sorts = {
+	id: [],
 	name: [part.maker, part.model],
 	kind: [part.kind, part.maker, part.model],
 	newest: [part.createdAt]
 } as const;
 
-const matching = ({ q, kind }: PartFilter) =>
+const matching = ({ q, kind, after }: PartFilter) =>
 	and(
+		behind(part.id, after),
 		containsWords(q, [part.maker, part.model, part.slug]),
 		kind === undefined ? undefined : eq(part.kind, kind)
 	);

@@ -1,23 +1,18 @@
-import { and, asc, count, eq, inArray, or, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { campaign, campaignProfile, profile, profileSetting, rig, run } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong } from '../search';
 
 export interface ProfileFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	rigIds?: number[];
 }
 
-export type ProfileSort = 'rig' | 'name' | 'newest';
-
-const sorts = {
-	rig: [rig.name, profile.id],
-	name: [profile.name],
-	newest: [profile.createdAt]
-} as const;
-
-const matching = ({ q, rigIds }: ProfileFilter) =>
+const matching = ({ q, rigIds, after }: ProfileFilter) =>
 	and(
+		behind(profile.id, after),
 		containsWords(q, [profile.name, profile.slug, rig.name]),
 		rigIds === undefined ? undefined : rigIds.length ? inArray(profile.rigId, rigIds) : sql`false`
 	);
@@ -35,24 +30,15 @@ const columns = {
 	version: profile.version
 };
 
-export const list = (db: Db, filter: ProfileFilter & { sort: ProfileSort; way: Way } & Window) =>
+/** Profiles in the order they were written. */
+export const list = (db: Db, filter: ProfileFilter & { limit: number }) =>
 	db
 		.select(columns)
 		.from(profile)
 		.innerJoin(rig, eq(rig.id, profile.rigId))
 		.where(matching(filter))
-		.orderBy(...ordered([...sorts[filter.sort]], filter.way, profile.id))
-		.limit(filter.limit)
-		.offset(filter.offset);
-
-export const total = async (db: Db, filter: ProfileFilter) =>
-	(
-		await db
-			.select({ n: count() })
-			.from(profile)
-			.innerJoin(rig, eq(rig.id, profile.rigId))
-			.where(matching(filter))
-	)[0]?.n ?? 0;
+		.orderBy(asc(profile.id))
+		.limit(filter.limit);
 
 /** Every profile of several rigs, the oldest first, so that a parent comes before its children. */
 export const ofRigs = async (db: Db, rigIds: number[]) =>

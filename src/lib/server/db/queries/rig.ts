@@ -1,23 +1,31 @@
 import { and, count, eq, inArray, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { campaign, profile, rig, rigRevision, rigSample } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface RigFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	/** Rigs whose newest revision has the sample. */
 	sampleId?: number;
 }
 
-export type RigSort = 'name' | 'newest' | 'revised';
+export type RigSort = 'id' | 'name' | 'newest' | 'revised';
 
 /** The newest revision of each rig. */
 const newestRevision = sql`${rigRevision.number} = (select max(newest.number) from rig_revision newest where newest.rig_id = ${rig.id})`;
 
-const sorts = { name: [rig.name], newest: [rig.createdAt], revised: [rigRevision.createdAt] } as const;
+const sorts = {
+	id: [],
+	name: [rig.name],
+	newest: [rig.createdAt],
+	revised: [rigRevision.createdAt]
+} as const;
 
-const matching = ({ q, sampleId }: RigFilter) =>
+const matching = ({ q, sampleId, after }: RigFilter) =>
 	and(
+		behind(rig.id, after),
 		containsWords(q, [rig.name, rig.slug, rigRevision.firmware, rigRevision.os]),
 		sampleId === undefined
 			? undefined

@@ -13,26 +13,30 @@ import {
 	rigSample,
 	sample
 } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface SampleFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	provenance?: Provenance;
 	kind?: PartKind;
 	partIds?: number[];
 }
 
-export type SampleSort = 'code' | 'part' | 'place' | 'newest';
+export type SampleSort = 'id' | 'code' | 'part' | 'place' | 'newest';
 
 const sorts = {
+	id: [],
 	code: [sample.slug],
 	part: [part.maker, part.model, sample.slug],
 	place: [sample.place, sample.slug],
 	newest: [sample.createdAt]
 } as const;
 
-const matching = ({ q, provenance, kind, partIds }: SampleFilter) =>
+const matching = ({ q, provenance, kind, partIds, after }: SampleFilter) =>
 	and(
+		behind(sample.id, after),
 		containsWords(q, [sample.slug, sample.serial, sample.place, part.maker, part.model]),
 		provenance === undefined ? undefined : eq(sample.provenance, provenance),
 		kind === undefined ? undefined : eq(part.kind, kind),

@@ -2,16 +2,19 @@ import { and, asc, count, eq, inArray, or, sql } from 'drizzle-orm';
 import type { WorkloadClass } from '../../../domain/bench/words';
 import type { Db } from '../client';
 import { campaign, campaignWorkload, run, workload } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface WorkloadFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	class?: WorkloadClass;
 }
 
-export type WorkloadSort = 'name' | 'class' | 'newest';
+export type WorkloadSort = 'id' | 'name' | 'class' | 'newest';
 
 const sorts = {
+	id: [],
 	name: [workload.name],
 	class: [workload.class, workload.name],
 	newest: [workload.createdAt]
@@ -19,6 +22,7 @@ const sorts = {
 
 const matching = (filter: WorkloadFilter) =>
 	and(
+		behind(workload.id, filter.after),
 		containsWords(filter.q, [workload.name, workload.slug, workload.quantity, workload.programVersion]),
 		filter.class === undefined ? undefined : eq(workload.class, filter.class)
 	);

@@ -21,7 +21,7 @@ export async function createPart(
 	const early = input.prices.findIndex((price) => notYetSeen(ctx.now, price.observedOn));
 	if (early >= 0)
 		return refuse('invalid', 'A price has a date still to come. Nothing was saved.', {
-			fields: { [`prices[${early}].observedOn`]: ['This day is still to come.'] }
+			fields: { [`prices.${early}.observedOn`]: ['This day is still to come.'] }
 		});
 	const { kind, maker, model, specification } = input;
 	try {

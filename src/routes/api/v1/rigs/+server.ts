@@ -1,0 +1,26 @@
+import { rigInput, rigsApiQuery } from '$lib/schemas/rig';
+import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { guardedApi } from '$lib/server/http/guarded';
+import { page } from '$lib/server/http/paging';
+import { problemFrom } from '$lib/server/http/problem';
+import { createRig } from '$lib/server/services/bench-plan/create-rig';
+import { listRigsForApi, rigForApi } from '$lib/server/services/bench-plan/rig-for-api';
+import type { RequestEvent } from './$types';
+
+export const GET = guardedApi('bench.read', async (event: RequestEvent, ctx) => {
+	const query = readQuery(event.url, rigsApiQuery);
+	if (!query.ok) return query.response;
+	const listed = await listRigsForApi(ctx, query.value);
+	return listed.ok
+		? page(event.url, listed.value, { limit: query.value.limit }, (row) => row.id)
+		: problemFrom(listed);
+});
+
+export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) => {
+	const body = await readJson(event, rigInput);
+	if (!body.ok) return body.response;
+	return idempotent(event, ctx, async (tx) => {
+		const created = await createRig(tx, body.value);
+		return created.ok ? answer(await rigForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+	});
+});

@@ -17,6 +17,12 @@ import { submitArticle } from '../../../src/lib/server/services/articles/submit-
 import { withdrawArticle } from '../../../src/lib/server/services/articles/withdraw-article';
 import { ofArticle as correctionsOf } from '../../../src/lib/server/db/queries/correction';
 import { ofSubject } from '../../../src/lib/server/db/queries/audit';
+import {
+	listArticles,
+	listParts,
+	readArticle,
+	readPlate
+} from '../../../src/lib/server/services/reader/published-pages';
 import { contextFor } from '../../support/context';
 import { emptyTables, testDatabase, type TestDatabase } from '../../support/database';
 import { people, person } from '../../support/people';
@@ -192,6 +198,14 @@ describe('after print', () => {
 		wanted(await reviseArticle(as('editor'), slug, told));
 		expect(await row()).toMatchObject({ stage: 'drafting', liveEditionId: live });
 		expect(await correctionsOf(db, (await row()).id)).toEqual([]);
+		// Readers keep the page, its plates and its place in the lists meanwhile.
+		const reader = { db, actor: null, now, origin: 'https://northlight.example' };
+		const kept = wanted(await readArticle(reader, slug));
+		const [drawn] = await db.select({ key: plate.key }).from(plate);
+		expect(kept.page).toContain('+12.5');
+		expect((await listArticles(reader, { page: 1 })).rows.map((one) => one.slug)).toEqual([slug]);
+		expect(await readPlate(reader, slug, drawn?.key ?? '')).toMatchObject({ ok: true });
+		expect(await listParts(reader)).toHaveLength(1);
 		const base = (await row()).head;
 		wanted(
 			await saveRevision(as('writer'), slug, {
@@ -258,6 +272,9 @@ describe('after print', () => {
 		);
 		expect(await row()).toMatchObject({ stage: 'withdrawn', withdrawReason: 'Measured on another rig.' });
 		expect(await correctionsOf(database.db, (await row()).id)).toMatchObject([{ kind: 'withdrawal' }]);
+		const reader = { db: database.db, actor: null, now, origin: 'https://northlight.example' };
+		expect(wanted(await readArticle(reader, slug)).page).toBeNull();
+		expect((await listArticles(reader, { page: 1 })).total).toBe(0);
 		const saved = await saveRevision(as('writer'), slug, { title, standfirst: '', source: 'x', basedOn: 2 });
 		expect(saved).toMatchObject({ ok: false, reason: 'conflict' });
 		expect((await outbox(database.db)).slice(-2)).toEqual([

@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, inArray, isNotNull, max, type SQL } from 'drizzle-orm';
+import { and, asc, count, desc, eq, inArray, isNotNull, isNull, max, type SQL } from 'drizzle-orm';
 import type { Db } from '../client';
 import {
 	article,
@@ -11,6 +11,11 @@ import {
 	plate,
 	workload
 } from '../schema';
+
+/**
+ * Readers have a page of it: a live edition that was not withdrawn, whatever the desk does to the next one meanwhile.
+ */
+const published: SQL | undefined = and(isNotNull(article.liveEditionId), isNull(article.withdrawnAt));
 
 /** Every query here sees live editions alone: joined on `live_edition_id`, never drafts, never what only waits. */
 const live = eq(article.liveEditionId, edition.id);
@@ -36,7 +41,7 @@ export const articles = (
 		.select(card)
 		.from(article)
 		.innerJoin(edition, live)
-		.where(and(eq(article.stage, 'published'), template ? eq(article.template, template) : undefined))
+		.where(and(published, template ? eq(article.template, template) : undefined))
 		.orderBy(desc(article.firstPublishedAt))
 		.limit(limit)
 		.offset(offset);
@@ -46,7 +51,7 @@ export const countArticles = async (db: Db, template?: string): Promise<number> 
 		await db
 			.select({ n: count() })
 			.from(article)
-			.where(and(eq(article.stage, 'published'), template ? eq(article.template, template) : undefined))
+			.where(and(published, template ? eq(article.template, template) : undefined))
 	)[0]?.n ?? 0;
 
 /** An article readers can reach, with the page of its live edition; also when it was withdrawn. */
@@ -102,7 +107,7 @@ export const plateOf = async (db: Db, slug: string, key: string) =>
 				svg: plate.svg,
 				csv: plate.csv,
 				title: plate.title,
-				stage: article.stage,
+				withdrawnAt: article.withdrawnAt,
 				hash: edition.hash
 			})
 			.from(article)
@@ -111,8 +116,6 @@ export const plateOf = async (db: Db, slug: string, key: string) =>
 			.where(and(eq(article.slug, slug), eq(plate.key, key)))
 			.limit(1)
 	)[0];
-
-const published: SQL | undefined = eq(article.stage, 'published');
 
 /** Parts that live editions have results of, with how many articles. */
 export const parts = (db: Db) =>

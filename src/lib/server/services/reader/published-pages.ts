@@ -31,7 +31,7 @@ export async function readArticle(ctx: OpenContext, slug: string) {
 /** A plate of the printed edition, to download. */
 export async function readPlate(ctx: OpenContext, slug: string, key: string) {
 	const found = await published.plateOf(ctx.db, slug, key);
-	return found?.stage === 'published' ? done(found) : refuse('not_found', 'There is no such plate.');
+	return found && !found.withdrawnAt ? done(found) : refuse('not_found', 'There is no such plate.');
 }
 
 /** Parts that printed articles have results of. */

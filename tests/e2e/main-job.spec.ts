@@ -15,11 +15,11 @@ let token = '';
 
 const source = `## What one core costs
 
-Held to one core, the prime search makes :reading{workload=prime-search profile=single-core} where stock makes :reading{workload=prime-search profile=stock}: :gain{workload=prime-search profile=single-core}. The source build goes the other way, :gain{workload=source-build profile=single-core}.
+Held to one core, the prime search makes :reading{workload=vm-prime-search profile=single-core} where stock makes :reading{workload=vm-prime-search profile=stock}: :gain{workload=vm-prime-search profile=single-core}. The source build goes the other way, :gain{workload=vm-source-build profile=single-core}.
 
-Without its cipher instructions the processor encrypts :reading{workload=aes-gcm-16k profile=no-vector-crypto}. Over all workloads that is :overall{profile=no-vector-crypto}.
+Without its cipher instructions the processor encrypts :reading{workload=vm-aes-gcm-16k profile=no-vector-crypto}. Over all workloads that is :overall{profile=no-vector-crypto}.
 
-::plate{kind=scores workload=aes-gcm-16k}
+::plate{kind=scores workload=vm-aes-gcm-16k}
 
 ::plate{kind=gains over=stock}
 
@@ -133,8 +133,8 @@ test('the other half comes as a CSV file through the browser, and what is wrong 
 		'input[type=file]',
 		file([
 			...lines.slice(0, 3),
-			'huge-pages,prime-search,events/s,higher,all-core,9,fast,',
-			'huge-page,prime-search,events/s,higher,all-core,9,4800,'
+			'huge-pages,vm-prime-search,events/s,higher,all-core,9,fast,',
+			'huge-page,vm-prime-search,events/s,higher,all-core,9,4800,'
 		])
 	);
 	await page.getByRole('button', { name: 'Preview' }).click();
@@ -234,7 +234,7 @@ test('the editor is held back by the preflight, comments, and asks for changes',
 	await page.goto(`/desk/articles/${slug}/review`);
 	// A lent sample without its disclosure on the page.
 	await expect(page.getByText(/disclosure/i).first()).toBeVisible();
-	await page.getByLabel('Comment', { exact: true }).fill('Say where the processor comes from.');
+	await page.locator('#comment-form textarea[name=body]').fill('Say where the processor comes from.');
 	await page.getByLabel('It holds the article back').check();
 	await page.getByRole('button', { name: 'Comment', exact: true }).click();
 	await expect(page.getByText('Say where the processor comes from.').first()).toBeVisible();
@@ -321,9 +321,9 @@ test('each figure on the printed page is R’s, at the printed rounding, also wi
 		);
 	};
 	const readings = page.locator('.reading');
-	near(await readings.nth(0).innerText(), cellByR('single-core', 'prime-search').mean ?? NaN);
-	near(await readings.nth(1).innerText(), cellByR('stock', 'prime-search').mean ?? NaN);
-	near(await readings.nth(2).innerText(), cellByR('no-vector-crypto', 'aes-gcm-16k').mean ?? NaN);
+	near(await readings.nth(0).innerText(), cellByR('single-core', 'vm-prime-search').mean ?? NaN);
+	near(await readings.nth(1).innerText(), cellByR('stock', 'vm-prime-search').mean ?? NaN);
+	near(await readings.nth(2).innerText(), cellByR('no-vector-crypto', 'vm-aes-gcm-16k').mean ?? NaN);
 	const signed = (printed: string, ratio: number) => {
 		const { value, halfStep } = readPrinted(printed);
 		expect(
@@ -331,8 +331,8 @@ test('each figure on the printed page is R’s, at the printed rounding, also wi
 			`${printed} against ${ratio}`
 		).toBeLessThanOrEqual(halfStep * (1 + 1e-9));
 	};
-	signed(await page.locator('.gain').nth(0).innerText(), ratioByR('single-core', 'prime-search'));
-	signed(await page.locator('.gain').nth(1).innerText(), ratioByR('single-core', 'source-build'));
+	signed(await page.locator('.gain').nth(0).innerText(), ratioByR('single-core', 'vm-prime-search'));
+	signed(await page.locator('.gain').nth(1).innerText(), ratioByR('single-core', 'vm-source-build'));
 	signed(await page.locator('.overall').first().innerText(), overallByR('no-vector-crypto'));
 	await expect(page.locator('.plate svg')).toHaveCount(2);
 	await expect(page.getByText('The processor was lent by its maker').first()).toBeVisible();
@@ -343,17 +343,17 @@ test('each figure on the printed page is R’s, at the printed rounding, also wi
 	}
 	await page.goto('/parts/fenwick-duet-2');
 	await expect(page.getByRole('link', { name: title }).first()).toBeVisible();
-	await page.goto('/methods/aes-gcm-16k');
+	await page.goto('/methods/vm-aes-gcm-16k');
 	await expect(page.getByRole('link', { name: title }).first()).toBeVisible();
 	await context.close();
 });
 
 test('what changes on the bench afterwards does not change the page', async ({ request }) => {
 	const before = await (await request.get(`/articles/${slug}`)).text();
-	const rows = measured.filter((row) => row.profile === 'stock' && row.workload === 'prime-search');
+	const rows = measured.filter((row) => row.profile === 'stock' && row.workload === 'vm-prime-search');
 	await send(request, token, '/campaigns/duet-2-four-ways/runs', {
 		profile: 'stock',
-		workload: 'prime-search',
+		workload: 'vm-prime-search',
 		unit: 'events/s',
 		readings: rows.map((row) => row.value * 2)
 	});

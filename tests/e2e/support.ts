@@ -7,8 +7,8 @@ const password = 'measure-then-print';
 /** Signs a person of the demo in through the page, as they would. */
 export async function signIn(page: Page, role: Role): Promise<void> {
 	await page.goto('/sign-in');
-	await page.getByLabel('E-mail').first().fill(address(role));
-	await page.getByLabel('Password', { exact: true }).fill(password);
+	await page.locator('form[action="?/password"] input[name=email]').fill(address(role));
+	await page.locator('input[name=password]').fill(password);
 	await page.getByRole('button', { name: 'Sign in', exact: true }).click();
 	await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
 }

@@ -4,15 +4,20 @@ import { embargoFields } from '../domain/stores/words';
 import { isCurrency } from '../domain/shared/money';
 import { line, paragraphs, versionSeen } from './fields';
 
+// Forms hand on an empty text, which a union of literals would not survive on its way through them.
 const optionalDate = z
-	.union([z.literal(''), z.iso.date('Write the date as year-month-day.')])
+	.string('Write the date as year-month-day.')
+	.trim()
 	.default('')
-	.transform((value) => value || null);
+	.refine((text) => text === '' || z.iso.date().safeParse(text).success, 'Write the date as year-month-day.')
+	.transform((text) => (text === '' ? null : text));
 
 export const partnerInput = z.object({
 	name: line(160).min(1, 'A partner needs a name.'),
 	contactName: line(160).default(''),
-	contactEmail: z.union([z.literal(''), z.email('This is not an e-mail address.').max(254)]).default(''),
+	contactEmail: line(254)
+		.default('')
+		.refine((text) => text === '' || z.email().safeParse(text).success, 'This is not an e-mail address.'),
 	notes: paragraphs(20_000).default('')
 });
 export type PartnerInput = z.output<typeof partnerInput>;

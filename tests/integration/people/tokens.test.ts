@@ -49,7 +49,7 @@ describe('a token', () => {
 		expect(may(actor, 'bench.read')).toBe(true);
 		expect(may(actor, 'run.record')).toBe(false);
 		expect(may(actor, 'account.use')).toBe(false);
-		const answer = await whoAmI(fakeEvent({ path: '/api/v1/me', actor }) as never);
+		const answer = whoAmI(fakeEvent({ path: '/api/v1/me', actor }) as never);
 		expect(await answer.json()).toEqual({
 			name: who.tester.name,
 			email: who.tester.email,

@@ -4,13 +4,12 @@ import { embargoFields } from '../domain/stores/words';
 import { isCurrency } from '../domain/shared/money';
 import { line, paragraphs, versionSeen } from './fields';
 
-// Forms hand on an empty text, which a union of literals would not survive on its way through them.
+/** A day; empty for none. What comes out is what went in, so that a form can check it again. */
 const optionalDate = z
 	.string('Write the date as year-month-day.')
 	.trim()
 	.default('')
-	.refine((text) => text === '' || z.iso.date().safeParse(text).success, 'Write the date as year-month-day.')
-	.transform((text) => (text === '' ? null : text));
+	.refine((text) => text === '' || z.iso.date().safeParse(text).success, 'Write the date as year-month-day.');
 
 export const partnerInput = z.object({
 	name: line(160).min(1, 'A partner needs a name.'),

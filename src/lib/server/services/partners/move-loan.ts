@@ -27,7 +27,7 @@ export async function moveLoan(
 				`“${loanMoveWords[input.move]}” does not follow: the loan is ${loanStageWords[before.stage]}. Nothing was changed.`
 			);
 		const { zone } = await publication(tx);
-		const on = input.on ?? DateTime.fromJSDate(ctx.now, { zone }).toISODate();
+		const on = input.on || DateTime.fromJSDate(ctx.now, { zone }).toISODate();
 		const dates =
 			stage === 'here' ? { receivedOn: on } : closedStages.includes(stage) ? { closedOn: on } : {};
 		if (dates.receivedOn && before.dueOn && dates.receivedOn > before.dueOn) {

@@ -38,14 +38,14 @@ export async function askForLoan(
 			return refuse('invalid', `There is no sample ${missing.join(', ')}.`, {
 				fields: { samples: [`There is no sample ${missing.join(', ')}.`] }
 			});
-		const { terms, disclosure, askedOn, dueOn } = input;
+		const { terms, disclosure } = input;
 		const row = {
 			partnerId: partner.id,
 			stage: 'asked-for' as const,
 			terms,
 			disclosure,
-			askedOn,
-			dueOn,
+			askedOn: input.askedOn || null,
+			dueOn: input.dueOn || null,
 			...value.value,
 			createdBy: ctx.actor.id,
 			createdAt: ctx.now
@@ -86,7 +86,12 @@ export async function editLoan(
 				fields: { dueOn: ['This is before the day it came.'] }
 			});
 		}
-		const change = { dueOn: input.dueOn, terms: input.terms, disclosure: input.disclosure, ...value.value };
+		const change = {
+			dueOn: input.dueOn || null,
+			terms: input.terms,
+			disclosure: input.disclosure,
+			...value.value
+		};
 		if (!(await loans.update(tx, id, input.version, change))) {
 			return refuse(
 				'conflict',

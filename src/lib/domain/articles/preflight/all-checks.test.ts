@@ -160,14 +160,14 @@ describe('preflight', () => {
 	});
 
 	it.each(['loaned', 'given', 'pre-production'] as const)(
-		'stops a %s sample without a disclosure, or without words agreed for it',
+		'stops a %s sample without a disclosure, and a loan without words agreed for it',
 		(provenance) => {
 			const duties = [duty({ provenance })];
 			expect(checks({ duties })).toEqual(['disclosure']);
 			expect(checks({ duties, source: `${reading}\n\n::disclosure` })).toEqual([]);
 			expect(
 				checks({ duties: [duty({ provenance, disclosure: null })], source: `${reading}\n\n::disclosure` })
-			).toEqual(['disclosure']);
+			).toEqual(provenance === 'loaned' ? ['disclosure'] : []);
 		}
 	);
 

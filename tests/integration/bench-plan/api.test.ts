@@ -30,7 +30,7 @@ type Handler = (event: never) => Promise<Response>;
 
 async function ask(handler: Handler, asked: Asked) {
 	const response = await handler(fakeEvent({ actor: staff.tester, ...asked }) as never);
-	return { status: response.status, body: (await response.json()) as Record<string, never>, response };
+	return { status: response.status, body: (await response.json()) as Record<string, unknown>, response };
 }
 const post = (handler: Handler, json: unknown, more: Partial<Asked> = {}) =>
 	ask(handler, { path: '/api/v1/x', json, ...more });
@@ -81,7 +81,7 @@ describe('parts', () => {
 			prices: [{ amount: 'free', currency: 'USD', observedOn: '2026-01-10' }]
 		});
 		expect(wrong.status).toBe(422);
-		expect(Object.keys(wrong.body.errors ?? {}).sort()).toEqual([
+		expect(Object.keys(wrong.body.errors as object).sort()).toEqual([
 			'kind',
 			'maker',
 			'model',
@@ -113,7 +113,7 @@ describe('parts', () => {
 describe('workloads', () => {
 	it('are refused in a way a script can act on', async () => {
 		const wrong = await post(postWorkload, { ...tileRender, repeats: 'many', better: 'nicer', unit: '' });
-		expect(Object.keys(wrong.body.errors ?? {}).sort()).toEqual(['better', 'repeats', 'unit']);
+		expect(Object.keys(wrong.body.errors as object).sort()).toEqual(['better', 'repeats', 'unit']);
 		const made = await post(postWorkload, { ...tileRender, leastDifferencePercent: 1.5 });
 		expect(made).toMatchObject({ status: 201, body: { slug: 'tile-render', leastDifferencePercent: 1.5 } });
 		const list = await get(listWorkloads, '/api/v1/workloads?class=game');

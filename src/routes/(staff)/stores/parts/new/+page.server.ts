@@ -13,7 +13,11 @@ export const load = guarded('stores.edit', async (_event: PageServerLoadEvent, c
 
 export const actions = {
 	default: guarded('stores.edit', async ({ request }: RequestEvent, ctx) => {
-		const { form, value } = await readForm(request, partInput, blankPart('', ''));
+		const { form, value } = await readForm(request, partInput, {
+			...blankPart('', ''),
+			specification: [],
+			prices: []
+		});
 		if (!value) return refuseForm(form);
 		const created = await createPart(ctx, value);
 		if (!created.ok) return refusedForm(form, created);

@@ -32,10 +32,9 @@ const app = spawn(process.execPath, ['scripts/serve.mjs'], {
 	env
 });
 const ended = new Promise((done) => app.once('exit', done));
-await Promise.race([
-	new Promise((done) => app.once('message', done)),
-	ended.then((code) => giveUp(`The application ended with ${code} before it listened.`))
-]);
+const listening = new Promise((done) => app.once('message', () => done(true)));
+if (!(await Promise.race([listening, ended.then(() => false)])))
+	giveUp('The application ended before it listened.');
 
 const tests = spawn(process.execPath, ['node_modules/.bin/playwright', 'test', ...process.argv.slice(2)], {
 	stdio: 'inherit',

@@ -96,10 +96,12 @@ export type CampaignRepeats = z.output<typeof campaignRepeats>;
 export const campaignArchive = z.object({ archived: z.enum(['yes', 'no']), version: versionSeen });
 export type CampaignArchive = z.output<typeof campaignArchive>;
 
-export const campaignsQuery = listing(['created', 'due', 'name'], 'down').extend({
-	rig: z.string().trim().max(80).default(''),
-	state: z.enum(['open', ...campaignStates, 'all']).default('open')
-});
+export const campaignsQuery = listing(['created', 'due', 'name'])
+	.omit({ way: true })
+	.extend({
+		rig: z.string().trim().max(80).default(''),
+		state: z.enum(['open', ...campaignStates, 'all']).default('open')
+	});
 export type CampaignsQuery = z.output<typeof campaignsQuery>;
 
 /** A plan to fill in: all profiles of the rig ticked, the workloads not, each with its own protocol's repeats. */

@@ -38,11 +38,14 @@ export function pasteBlock(text: string, taken: number): Pasted {
 		else faults.push(cell);
 	}
 	const entered = values.length === 1 ? '1 reading entered' : `${values.length} readings entered`;
-	const left = faults.length === 1 ? '1 cell is not a reading' : `${faults.length} cells are not readings`;
+	const left =
+		faults.length === 1
+			? '1 cell is not a reading and waits below to be mended'
+			: `${faults.length} cells are not readings and wait below to be mended`;
 	return {
 		kind: 'block',
 		values,
 		faults,
-		message: faults.length > 0 ? `${entered}; ${left} and wait below to be mended.` : `${entered}.`
+		message: faults.length > 0 ? `${entered}; ${left}.` : `${entered}.`
 	};
 }

@@ -46,7 +46,8 @@ export async function listCampaigns(ctx: Context, query: CampaignsQuery): Promis
 		rig: query.rig,
 		state: query.state,
 		sort: query.sort,
-		way: query.way,
+		// The newest first; the soonest due first; by name from A.
+		way: query.sort === 'created' ? 'down' : 'up',
 		limit: campaignsPerPage,
 		offset: (query.page - 1) * campaignsPerPage
 	};

@@ -52,9 +52,16 @@ module.exports = {
 			'services-know-no-kit',
 			'An outcome is a value; HTTP is at the edge.',
 			{ path: `${lib}/server/services` },
-			{ path: [framework, orm, `${lib}/server/http/`,
+			{
+				path: [
+					framework,
+					orm,
+					`${lib}/server/http/`,
 					// Hashing, secrets and limits are a service's to use; sessions and cookies are not.
-					`${lib}/server/auth/(?!password|secret|limits)`, '^src/routes'] }
+					`${lib}/server/auth/(?!password|secret|limits)`,
+					'^src/routes'
+				]
+			}
 		),
 		rule(
 			'areas-stay-apart',

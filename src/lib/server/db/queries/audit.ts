@@ -16,16 +16,14 @@ export interface AuditEntry {
 /** Appends entries; nothing ever changes or removes one. */
 export async function append(db: Db, entries: AuditEntry[]): Promise<void> {
 	if (entries.length === 0) return;
-	await db
-		.insert(auditEvent)
-		.values(
-			entries.map((entry) => ({
-				...entry,
-				subjectId: String(entry.subjectId),
-				before: entry.before ?? null,
-				after: entry.after ?? null
-			}))
-		);
+	await db.insert(auditEvent).values(
+		entries.map((entry) => ({
+			...entry,
+			subjectId: String(entry.subjectId),
+			before: entry.before ?? null,
+			after: entry.after ?? null
+		}))
+	);
 }
 
 /** What happened to one row, newest first, with the names of those who did it. */

@@ -1,4 +1,4 @@
-import { asc, eq, inArray } from 'drizzle-orm';
+import { asc, eq } from 'drizzle-orm';
 import type { Db } from '../client';
 import { embargo, part, sample } from '../schema';
 
@@ -22,12 +22,6 @@ export const ofLoan = (db: Db, loanId: number) =>
 		.innerJoin(part, eq(part.id, sample.partId))
 		.where(eq(embargo.loanId, loanId))
 		.orderBy(asc(embargo.until));
-
-/** Embargoes on several samples, lifted ones included. */
-export const ofSamples = (db: Db, sampleIds: number[]) =>
-	sampleIds.length === 0
-		? Promise.resolve([])
-		: db.select().from(embargo).where(inArray(embargo.sampleId, sampleIds)).orderBy(asc(embargo.until));
 
 export const lock = async (db: Db, id: number) =>
 	(await db.select().from(embargo).where(eq(embargo.id, id)).for('update'))[0];

@@ -34,6 +34,8 @@ export async function write(
 }
 
 /** A mail as the outbox holds it. */
-export const byId = async (db: Db, id: number) => (await db.select().from(mail).where(eq(mail.id, id)).limit(1))[0];
+export const byId = async (db: Db, id: number) =>
+	(await db.select().from(mail).where(eq(mail.id, id)).limit(1))[0];
 
-export const markSent = (db: Db, id: number, sentAt: Date) => db.update(mail).set({ sentAt }).where(eq(mail.id, id));
+export const markSent = (db: Db, id: number, sentAt: Date) =>
+	db.update(mail).set({ sentAt }).where(eq(mail.id, id));

@@ -1,5 +1,5 @@
 import { fail, redirect } from '@sveltejs/kit';
-import type { Outcome } from '$lib/domain/shared/outcome';
+import type { Refusal } from '$lib/domain/shared/outcome';
 import { importInput, readImportForm } from '$lib/schemas/import';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { statusOf } from '$lib/server/http/problem';
@@ -12,8 +12,8 @@ export const load = guarded('run.record', async ({ params }: PageServerLoadEvent
 	return { title: `Import into ${offer.name}`, offer };
 });
 
-const refused = (outcome: Outcome<unknown>, text: string) =>
-	outcome.ok ? {} : fail(statusOf(outcome.reason), { refused: outcome.message, text });
+const refused = (outcome: Refusal, text: string) =>
+	fail(statusOf(outcome.reason), { refused: outcome.message, text });
 
 const words = ({ readings, runs, left, signaturesRemoved }: Imported) =>
 	new URLSearchParams({

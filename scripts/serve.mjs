@@ -22,6 +22,12 @@ const headers = Object.entries(
 if (process.env.ORIGIN.startsWith('https:'))
 	headers.push(['strict-transport-security', 'max-age=31536000; includeSubDomains']);
 
+// The adapter reads this one before the application's own check of its environment, and in other words.
+if (!/^https?:\/\//.test(process.env.ORIGIN) || !URL.canParse(process.env.ORIGIN)) {
+	console.error('Calipress cannot start: ORIGIN is not a http: or https: address');
+	process.exit(1);
+}
+
 let handler;
 try {
 	({ handler } = await import('../build/handler.js'));

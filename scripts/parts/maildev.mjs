@@ -9,35 +9,46 @@ import { freePort, listens, pause } from './mariadb.mjs';
  */
 export async function startMaildev({ folder, smtpPort, webPort }) {
 	mkdirSync(folder, { recursive: true });
-	const smtp = smtpPort && !(await listens(smtpPort)) ? smtpPort : await freePort();
-	const web = webPort && !(await listens(webPort)) ? webPort : await freePort();
+	for (let left = 2; ; left--) {
+		const smtp = smtpPort && !(await listens(smtpPort)) ? smtpPort : await freePort();
+		const web = webPort && !(await listens(webPort)) ? webPort : await freePort();
+		const service = await tryMaildev(folder, smtp, web);
+		if (service) return service;
+		// A port that was free a moment ago is not: somebody else was quicker. Others are taken the next time.
+		if (left === 0) throw new Error('the mail fake did not start.');
+		smtpPort = webPort = undefined;
+	}
+}
+
+/** @param {string} folder @param {number} smtpPort @param {number} webPort */
+async function tryMaildev(folder, smtpPort, webPort) {
 	const child = startService(process.execPath, [
 		'node_modules/.bin/maildev',
 		'--smtp',
-		String(smtp),
+		String(smtpPort),
 		'--ip',
 		'127.0.0.1',
 		'--web',
-		String(web),
+		String(webPort),
 		'--web-ip',
 		'127.0.0.1',
 		'--mail-directory',
 		folder
 	]);
 	const exited = new Promise((done) => child.once('exit', done));
-	const webUrl = `http://127.0.0.1:${web}`;
-	for (let attempt = 0; ; attempt++) {
-		const up = await fetch(`${webUrl}/api/healthz`).then(
-			(answer) => answer.ok,
-			() => false
-		);
-		if (up) break;
-		if (child.exitCode !== null || attempt > 200) throw new Error('the mail fake did not start.');
-		await pause(100);
-	}
 	const stop = async () => {
 		child.kill('SIGTERM');
 		await exited;
 	};
-	return { smtpUrl: `smtp://127.0.0.1:${smtp}`, webUrl, smtpPort: smtp, webPort: web, stop };
+	const webUrl = `http://127.0.0.1:${webPort}`;
+	for (let attempt = 0; child.exitCode === null && attempt <= 200; attempt++) {
+		const up = await fetch(`${webUrl}/api/healthz`).then(
+			(answer) => answer.ok,
+			() => false
+		);
+		if (up) return { smtpUrl: `smtp://127.0.0.1:${smtpPort}`, webUrl, smtpPort, webPort, stop };
+		await pause(100);
+	}
+	await stop();
+	return undefined;
 }

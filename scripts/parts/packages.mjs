@@ -1,11 +1,9 @@
 // What must be on the machine before anything of ours can be imported: only Node's own modules here.
 import { execFileSync, spawnSync } from 'node:child_process';
-import { createHash } from 'node:crypto';
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { delimiter, join } from 'node:path';
 import { giveUp, say } from './words.mjs';
 
-const stamp = 'node_modules/.calipress-lock';
 const extraPaths = ['/usr/sbin', '/usr/local/sbin', '/sbin'];
 
 export function checkNode() {
@@ -20,17 +18,31 @@ export const program = (name) =>
 		.map((folder) => join(folder, name))
 		.find((file) => existsSync(file));
 
+/**
+ * Whether what npm wrote down of node_modules is what the lock file names, whoever installed it. Packages for other
+ * machines are optional and may be missing.
+ */
+function modulesStand() {
+	const installed = 'node_modules/.package-lock.json';
+	if (!existsSync(installed)) return false;
+	const wanted = JSON.parse(readFileSync('package-lock.json', 'utf8')).packages;
+	const there = JSON.parse(readFileSync(installed, 'utf8')).packages;
+	return Object.entries(wanted).every(
+		([path, { version, optional }]) =>
+			path === '' || there[path]?.version === version || (optional && !there[path])
+	);
+}
+
 /** Installs the modules the lock file names, when they are not there or not those. */
 export function ensureModules() {
-	const lock = createHash('sha256').update(readFileSync('package-lock.json')).digest('hex');
-	if (existsSync(stamp) && readFileSync(stamp, 'utf8') === lock) return;
+	if (modulesStand()) return;
 	say('Installing the packages of package-lock.json …');
-	const { status } = spawnSync('npm', ['ci', '--no-audit', '--no-fund'], {
+	// The build and the mail fake are development packages: they are needed with NODE_ENV=production too.
+	const { status } = spawnSync('npm', ['ci', '--include=dev', '--no-audit', '--no-fund'], {
 		stdio: ['ignore', 'inherit', 'inherit']
 	});
 	if (status !== 0)
 		giveUp('The packages could not be installed: see the lines above. Nothing else was changed.');
-	writeFileSync(stamp, lock);
 }
 
 /**

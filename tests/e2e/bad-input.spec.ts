@@ -14,17 +14,20 @@ test('a wrong password says so, keeps the address, and too many attempts have to
 	await expect(page.locator('input[name=password]')).toHaveValue('');
 });
 
-test('text in a number is refused beside the cell and kept, and the number beside it is taken', async ({
+test('text in a number, or one past all bounds, is refused beside its cell and kept there', async ({
 	browser
 }) => {
 	const page = await pageOf(browser, 'tester');
-	await page.goto('/bench/campaigns/aldermoor-1650-firmware-2-20?profile=switching-78&workload=tile-render');
 	await page.goto('/bench/campaigns/aldermoor-1650-firmware-2-20');
-	const cell = page.locator('main input[inputmode=decimal]').last();
-	await cell.fill('fast');
-	await cell.press('Enter');
-	await expect(page.getByText(/not a number|in figures/i).first()).toBeVisible();
-	await expect(page.locator('main input[inputmode=decimal]').first()).toHaveValue('fast');
+	const cell = page.getByLabel(/^Reading \d+, in /).last();
+	for (const typed of ['fast', '1e400', 'NaN', 'Infinity', '12 W']) {
+		await cell.fill(typed);
+		await cell.press('Enter');
+		await expect(cell).toHaveAccessibleDescription(/number|figures|unit|large/i);
+		await expect(cell).toHaveValue(typed);
+	}
+	await page.reload();
+	await expect(page.getByRole('main')).not.toContainText('NaN');
 	await page.context().close();
 });
 
@@ -71,15 +74,22 @@ test('two people who save at once lose nothing: the second is shown the differen
 	await expect(one.getByText(/Saved \d\d:\d\d.*revision/)).toBeVisible();
 	await write(two, 'Second words.');
 	await expect(two.getByText(/newer revision/).first()).toBeVisible();
-	await expect(two.getByText('First words.').first()).toBeVisible();
+	const conflict = two.getByRole('alert').filter({ hasText: 'Two of you changed this text' });
+	await expect(conflict.locator('del').filter({ hasText: 'First' })).toBeVisible();
+	await expect(conflict.locator('ins').filter({ hasText: 'Second' })).toBeVisible();
 	await expect(two.locator('.cm-content')).toContainText('Second words.');
 	await Promise.all([one.context().close(), two.context().close()]);
 });
 
 test('a link that is no longer good says so', async ({ page }) => {
-	const answer = await page.goto('/invite/not-a-real-token');
-	expect(answer?.status()).toBeGreaterThanOrEqual(400);
-	await expect(page.getByRole('heading').first()).toBeVisible();
+	for (const [path, words] of [
+		['/invite/not-a-real-token', 'This invitation does not work'],
+		['/password/not-a-real-token', 'This link does not work']
+	] as const) {
+		await page.goto(path);
+		await expect(page.getByRole('heading', { name: words })).toBeVisible();
+		await expect(page.locator('input[type=password]')).toHaveCount(0);
+	}
 });
 
 test('another site cannot make a signed-in browser change anything', async ({ page, request }) => {

@@ -64,7 +64,11 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 				markdown({ base: markdownLanguage, addKeymap: true }),
 				autocompletion({ override: [directiveCompletion(options.data)], icons: false }),
 				EditorView.lineWrapping,
-				EditorView.contentAttributes.of({ 'aria-label': options.label, spellcheck: 'true' }),
+				EditorView.contentAttributes.of({
+					'aria-label': options.label,
+					spellcheck: 'true',
+					tabindex: '0'
+				}),
 				editorLook(() => wrong),
 				EditorView.updateListener.of((update) => {
 					if (update.docChanged) options.onchange(update.state.doc.toString());

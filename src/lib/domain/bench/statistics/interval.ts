@@ -12,6 +12,15 @@ export function twoSidedP(t: number, df: number): number {
 }
 
 /**
+ * Share of Student's t above a statistic; one-sided p-value of a test that looks upward. RangeError for df ≤ 0.
+ * @example upperTailP(1.90017487053, 19.1690023743) // 0.03628…
+ */
+export function upperTailP(t: number, df: number): number {
+	if (!(df > 0)) throw new RangeError('Degrees of freedom must be above zero.');
+	return cdf(-t, df);
+}
+
+/**
  * Quantile of Student's t; `df` need not be whole. RangeError outside 0 < p < 1 or for df ≤ 0.
  * @example studentQuantile(0.975, 2) // 4.302652729…
  */

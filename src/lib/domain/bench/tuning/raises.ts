@@ -8,7 +8,9 @@ export type RaiseTopic = 'voltage' | 'power' | 'heat';
 
 const topics: Partial<Record<SettingQuantity, RaiseTopic>> = {
 	'core-voltage': 'voltage',
+	'soc-voltage': 'voltage',
 	'memory-voltage': 'voltage',
+	'memory-io-voltage': 'voltage',
 	'load-line': 'voltage',
 	'power-limit': 'power',
 	'current-limit': 'power',

@@ -4,6 +4,7 @@ import type { SettingQuantity } from '../words';
 
 const clocks = { mhz: 1, ghz: 1000, khz: 0.001 };
 const volts = { v: 1, mv: 0.001 };
+const timings = { '': 1, t: 1, clk: 1, clocks: 1 };
 const ratios = { '': 1, x: 1, '×': 1 };
 
 /** Units of each quantity and what one of them is in the quantity's own: MHz, MT/s, V, W, A, °C, clocks. */
@@ -12,9 +13,17 @@ const units: Partial<Record<SettingQuantity, Record<string, number>>> = {
 	'core-ratio': ratios,
 	'core-clock': clocks,
 	'core-voltage': volts,
+	'soc-voltage': volts,
 	'memory-data-rate': { 'mt/s': 1, 'gt/s': 1000 },
 	'memory-voltage': volts,
-	'cas-latency': { '': 1, t: 1, clk: 1, clocks: 1 },
+	'memory-io-voltage': volts,
+	'cas-latency': timings,
+	'row-to-column-delay': timings,
+	'row-precharge': timings,
+	'row-active': timings,
+	'row-cycle': timings,
+	'refresh-cycle': timings,
+	'command-rate': { '': 1, t: 1, n: 1 },
 	'fabric-clock': clocks,
 	'memory-controller-clock': clocks,
 	'power-limit': { w: 1, kw: 1000, mw: 0.001 },

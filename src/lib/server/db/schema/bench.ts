@@ -22,6 +22,7 @@ import {
 	workloadClasses
 } from '../../../domain/bench/words';
 import { at, id, personId, slug, version } from '../columns';
+import { instrument } from './instrument';
 import { user } from './people';
 import { sample } from './stores';
 
@@ -72,6 +73,8 @@ export const rig = mysqlTable(
 		id: id(),
 		slug: slug(),
 		name: varchar('name', { length: 160 }).notNull(),
+		/** By which the meanings of its settings are looked up, whatever the version. */
+		firmwareFamily: varchar('firmware_family', { length: 80 }).notNull().default(''),
 		createdAt: at('created_at').notNull(),
 		version: version()
 	},
@@ -218,7 +221,9 @@ export const campaignWorkload = mysqlTable(
 			.references(() => workload.id),
 		position: int('position').notNull(),
 		/** Readings each cell of this column needs. */
-		repeats: int('repeats').notNull()
+		repeats: int('repeats').notNull(),
+		/** What the figures are read from; null where the program itself counts them. */
+		instrumentId: int('instrument_id').references(() => instrument.id)
 	},
 	(t) => [
 		primaryKey({ columns: [t.campaignId, t.workloadId] }),
@@ -326,6 +331,7 @@ export const reading = mysqlTable(
 	(t) => [
 		uniqueIndex('reading_position').on(t.runId, t.position),
 		uniqueIndex('reading_client_key').on(t.runId, t.clientKey),
+		index('reading_counted').on(t.runId, t.excludedAt),
 		check('reading_exclusion_has_reason', sql`(${t.excludedAt} is null) = (${t.excludeReason} is null)`)
 	]
 );

@@ -20,6 +20,10 @@ export interface DerivedFact {
 	name: string;
 	value: number;
 	unit: string;
+	/** Decimals to print it with. */
+	decimals: number;
+	/** Printed in the value's place where a number does not say it, such as a ratio of three clocks. */
+	text?: string;
 	/** The formula in words, for the note under it. */
 	how: string;
 }

@@ -1,6 +1,7 @@
 import type { SettingFact } from '../../articles/data';
 import { menusOf } from '../profile';
 import type { SettingQuantity } from '../words';
+import { groupOf } from './group-of';
 
 /** What one family of firmware calls a setting, and what that sets; testers keep the list. */
 export interface MeaningEntry {
@@ -31,16 +32,6 @@ export type MeantSetting = SettingFact & Pick<Meaning, 'group' | 'known'>;
 const plain = (text: string): string => text.toLowerCase().replace(/\s+/g, '');
 const plainPath = (path: string): string => menusOf(path).map(plain).join('>');
 const loneNumber = /(?<![\w.])#?(\d{1,3})(?![\w.])/;
-const numbered = /\b(?:chiplet|die|core\s*group|cluster|group)\s*#?\s*(\d{1,3})\b/i;
-
-/** The group that a setting's name, or else the innermost of its menus, gives. */
-function groupOf({ setting, menuPath }: Row): number | null {
-	for (const text of [setting, ...menusOf(menuPath).toReversed()]) {
-		const number = numbered.exec(text)?.[1];
-		if (number !== undefined) return Number(number);
-	}
-	return null;
-}
 
 /** The entry for a row: by its whole name before its name without a number, with menus before without. */
 function entryFor(row: Row, family: string, entries: readonly MeaningEntry[]) {

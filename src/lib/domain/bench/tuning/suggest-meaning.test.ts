@@ -40,7 +40,10 @@ describe('what a name suggests', () => {
 		expect(suggestMeaning('Chiplet 1 Ratio')).toEqual({ quantity: 'core-ratio', from: 'Ratio' });
 	});
 
-	it.each(['', 'Fans', 'Fabric voltage', 'Clear the screen', 'Boost clock limit'])('nothing for %j', (name) => {
-		expect(suggestMeaning(name)).toBeNull();
-	});
+	it.each(['', 'Fans', 'Fabric voltage', 'Clear the screen', 'Boost clock limit'])(
+		'nothing for %j',
+		(name) => {
+			expect(suggestMeaning(name)).toBeNull();
+		}
+	);
 });

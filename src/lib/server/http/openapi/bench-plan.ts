@@ -115,7 +115,16 @@ const profileWhole = profileItem.extend({
 		.array(z.object({ ...setting, parentValue: z.string().nullable(), stockValue: z.string().nullable() }))
 		.describe('With what it inherits, in menu order.'),
 	derived: z
-		.array(z.object({ name: z.string(), value: z.number(), unit: z.string(), how: z.string() }))
+		.array(
+			z.object({
+				name: z.string(),
+				value: z.number(),
+				unit: z.string(),
+				decimals: z.number().describe('Decimals to print it with.'),
+				text: z.string().optional().describe('Printed in the value’s place, such as 2 : 3 : 3.'),
+				how: z.string()
+			})
+		)
 		.describe('What follows from the settings by arithmetic; nothing is rounded.')
 });
 

@@ -8,7 +8,7 @@ export const attempt = (given: Partial<Attempt> = {}): Attempt => ({
 	stressKind: 'heaviest',
 	durationMin: 30,
 	outcome: 'passed',
-	failure: given.outcome === 'failed' ? 'error' : null,
+	failure: given.outcome === 'failed' ? 'error' : '',
 	errors: 0,
 	peakTempC: null,
 	packageW: null,

@@ -12,10 +12,10 @@ describe('an attempt in words', () => {
 					attempt({ clockMHz: 4900, outcome: 'failed', durationMin: 12, failure: 'error', errors: 3 })
 				)
 			)
-		).toBe('4900 MHz at 1.25 V: failed after 12 min, wrong results (3 errors)');
-		expect(plain(attemptWords(attempt({ outcome: 'failed', failure: 'no-start', durationMin: 0 })))).toBe(
-			'4800 MHz at 1.25 V: failed after 0 min, did not start'
-		);
+		).toBe('4900 MHz at 1.25 V: failed after 12 min, error (3 counted)');
+		expect(
+			plain(attemptWords(attempt({ outcome: 'failed', failure: 'did not start', durationMin: 0 })))
+		).toBe('4800 MHz at 1.25 V: failed after 0 min, did not start');
 		expect(plain(attemptWords(attempt({ outcome: 'stopped', durationMin: 7.5 })))).toBe(
 			'4800 MHz at 1.25 V: stopped by hand after 7.5 min'
 		);

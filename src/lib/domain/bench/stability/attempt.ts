@@ -1,25 +1,5 @@
 import { printed, printedWithUnit } from '../../shared/quantity';
-
-export const stressKinds = ['heaviest', 'everyday'] as const;
-/** Whether a stress loads the part as nothing else does, or as work and play do. */
-export type StressKind = (typeof stressKinds)[number];
-
-export const attemptOutcomes = ['passed', 'failed', 'stopped'] as const;
-/** How an attempt ended; stopped by hand says nothing either way. */
-export type AttemptOutcome = (typeof attemptOutcomes)[number];
-
-export const failures = [
-	'no-start',
-	'crash',
-	'freeze',
-	'restart',
-	'error',
-	'throttle',
-	'too-hot',
-	'other'
-] as const;
-/** What was seen first when an attempt failed. */
-export type Failure = (typeof failures)[number];
+import type { AttemptOutcome, StressKind } from './words';
 
 /** One try of one stress at one setting. */
 export interface Attempt {
@@ -32,15 +12,26 @@ export interface Attempt {
 	/** How long it ran; on a failure, until then. */
 	durationMin: number;
 	outcome: AttemptOutcome;
-	/** Null unless it failed. */
-	failure: Failure | null;
+	/** What was seen when it failed, in words; empty unless it did. */
+	failure: string;
 	/** Errors that the stress itself counted. */
 	errors: number;
 	peakTempC: number | null;
 	packageW: number | null;
-	/** ISO time, all in one zone. */
+	/** When it began, as ISO time. */
 	at: string;
 }
+
+/** What is usually seen when an attempt fails, for a form to offer; other words are as good. Common practice, no source. */
+export const usualFailures = [
+	'did not start',
+	'crash',
+	'freeze',
+	'restart',
+	'error',
+	'throttle',
+	'too hot'
+] as const;
 
 export const stressKindWords: Record<StressKind, string> = {
 	heaviest: 'heaviest load',
@@ -53,28 +44,17 @@ export const outcomeWords: Record<AttemptOutcome, string> = {
 	stopped: 'stopped by hand'
 };
 
-export const failureWords: Record<Failure, string> = {
-	'no-start': 'did not start',
-	crash: 'program crashed',
-	freeze: 'froze',
-	restart: 'restarted by itself',
-	error: 'wrong results',
-	throttle: 'throttled',
-	'too-hot': 'too hot',
-	other: 'other'
-};
-
 /** A clock and its voltage in print. @example settingWords({ clockMHz: 4900, volts: 1.25 }) // '4900 MHz at 1.25 V' */
 export const settingWords = ({ clockMHz, volts }: Pick<Attempt, 'clockMHz' | 'volts'>): string =>
 	`${printedWithUnit(clockMHz, 'MHz')} at ${printedWithUnit(volts, 'V')}`;
 
 /**
  * An attempt in one line.
- * @example attemptWords(attempt) // '4900 MHz at 1.25 V: failed after 12 min, wrong results (3 errors)'
+ * @example attemptWords(attempt) // '4900 MHz at 1.25 V: failed after 12 min, error (3 counted)'
  */
 export function attemptWords(attempt: Attempt): string {
 	const { durationMin, errors, failure, outcome } = attempt;
-	const cause = outcome === 'failed' && failure ? `, ${failureWords[failure]}` : '';
-	const counted = errors > 0 ? ` (${errors === 1 ? '1 error' : `${printed(errors)} errors`})` : '';
+	const cause = failure === '' ? '' : `, ${failure}`;
+	const counted = errors > 0 ? ` (${printed(errors)} counted)` : '';
 	return `${settingWords(attempt)}: ${outcomeWords[outcome]} after ${printedWithUnit(durationMin, 'min')}${cause}${counted}`;
 }

@@ -1,6 +1,7 @@
-import type { Attempt, StressKind } from './attempt';
+import type { Attempt } from './attempt';
 import { type Contradiction, contradictions } from './contradictions';
 import { type Demands, verdictOf } from './verdict';
+import type { StressKind } from './words';
 
 export interface StressResult {
 	stress: string;

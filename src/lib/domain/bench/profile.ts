@@ -31,7 +31,8 @@ export const menusOf = (menuPath: string): string[] =>
 		.map((menu) => menu.trim())
 		.filter((menu) => menu !== '');
 
-const keyOf = (setting: OwnSetting): string =>
+/** What a setting is known by: its menus and its name, whatever the spacing. */
+export const settingKey = (setting: Pick<OwnSetting, 'menuPath' | 'setting'>): string =>
 	JSON.stringify([menusOf(setting.menuPath), setting.setting.trim()]);
 
 const sharedMenus = (a: OwnSetting, b: OwnSetting): number => {
@@ -53,7 +54,7 @@ function placeFor(setting: OwnSetting, among: readonly OwnSetting[]): number {
 function merge(inherited: readonly OwnSetting[], own: readonly OwnSetting[]): OwnSetting[] {
 	const merged = [...inherited];
 	for (const setting of own) {
-		const known = merged.findIndex((other) => keyOf(other) === keyOf(setting));
+		const known = merged.findIndex((other) => settingKey(other) === settingKey(setting));
 		if (known >= 0) merged[known] = setting;
 		else merged.splice(placeFor(setting, merged), 0, setting);
 	}
@@ -62,7 +63,7 @@ function merge(inherited: readonly OwnSetting[], own: readonly OwnSetting[]): Ow
 
 /** The other's value, with its unit where that is not the setting's own. */
 function valueIn(settings: readonly OwnSetting[], setting: OwnSetting): string | null {
-	const other = settings.find((candidate) => keyOf(candidate) === keyOf(setting));
+	const other = settings.find((candidate) => settingKey(candidate) === settingKey(setting));
 	if (!other) return null;
 	return other.unit === setting.unit ? other.value : `${other.value} ${other.unit}`.trim();
 }

@@ -1,5 +1,5 @@
 import type { DerivedFact } from '../../articles/data';
-import { menusOf } from '../profile';
+import { menusOf, settingKey } from '../profile';
 import { changePercent, clockMHz } from './clocks';
 import { decimalsUpTo, short } from './figures';
 import { asIn, ofGroup, valuesOf, type GroupedSetting, type SettingValue } from './setting-values';
@@ -15,8 +15,6 @@ export interface CoreClock {
 	product: string | null;
 }
 
-const keyOf = ({ fact }: SettingValue) => JSON.stringify([menusOf(fact.menuPath), fact.setting]);
-
 function labelOf({ fact }: SettingValue, among: readonly SettingValue[]): string {
 	const named = among.filter((other) => other.fact.setting === fact.setting).length;
 	const menu = menusOf(fact.menuPath).at(-1);
@@ -28,7 +26,7 @@ export function coreClocks(settings: readonly GroupedSetting[]): CoreClock[] {
 	const ratios = valuesOf(settings, 'core-ratio');
 	const set = valuesOf(settings, 'core-clock');
 	const clock = (value: SettingValue, mhz: number, product: string | null): CoreClock => ({
-		key: keyOf(value),
+		key: settingKey(value.fact),
 		label: labelOf(value, [...ratios, ...set]),
 		group: value.group,
 		mhz,

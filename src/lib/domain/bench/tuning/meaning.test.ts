@@ -4,9 +4,9 @@ import { fact } from './setting-fact.fixture';
 
 // An invented family; the names are nobody's.
 const entries: MeaningEntry[] = [
-	{ family: 'Plainboard 4', setting: 'Multiplier', quantity: 'core-ratio' },
+	{ family: 'Plainboard 4', setting: 'Multiplier', quantity: 'core-ratio', coreGroup: 0 },
 	{ family: 'Plainboard 4', setting: 'Core group ratio', quantity: 'core-ratio' },
-	{ family: 'Plainboard 4', setting: 'Island B multiplier', quantity: 'core-ratio', group: 2 },
+	{ family: 'Plainboard 4', setting: 'Island B multiplier', quantity: 'core-ratio', coreGroup: 2 },
 	{ family: 'Plainboard 4', menuPath: 'Memory', setting: 'Multiplier', quantity: 'memory-data-rate' },
 	{ family: 'Other', setting: 'Speed', quantity: 'core-clock' }
 ];

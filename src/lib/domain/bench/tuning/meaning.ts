@@ -12,8 +12,8 @@ export interface MeaningEntry {
 	/** The setting's name; a lone number in a row's name, as in “Core group 2 ratio”, may be missing here. */
 	setting: string;
 	quantity: SettingQuantity;
-	/** Chiplet or core group, where this very name stands for one. */
-	group?: number;
+	/** Chiplet or core group, where this very name stands for one; 0 or left out, for all. */
+	coreGroup?: number;
 }
 
 export interface Meaning {
@@ -54,7 +54,7 @@ function entryFor(row: Row, family: string, entries: readonly MeaningEntry[]) {
  */
 export function meaningOf(row: Row, family: string, entries: readonly MeaningEntry[]): Meaning {
 	const found = entryFor(row, family, entries);
-	const group = found?.entry.group ?? found?.number ?? groupOf(row);
+	const group = (found?.entry.coreGroup || found?.number) ?? groupOf(row);
 	if (row.quantity !== 'other') return { quantity: row.quantity, group, known: 'row' };
 	return found
 		? { quantity: found.entry.quantity, group, known: 'mapping' }

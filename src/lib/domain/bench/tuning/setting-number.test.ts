@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { asStock, settingNumber } from './setting-number';
+import { asStock, hasUnits, settingNumber } from './setting-number';
 import { fact } from './setting-fact.fixture';
 
 describe('the number of a setting', () => {
@@ -38,6 +38,14 @@ describe('the number of a setting', () => {
 		['core-ratio', '', '']
 	] as const)('guesses nothing from %s %j %j', (quantity, value, unit) => {
 		expect(settingNumber(quantity, value, unit)).toBeNull();
+	});
+
+	it('knows what is written with a unit', () => {
+		expect([hasUnits('core-voltage'), hasUnits('load-line'), hasUnits('other')]).toEqual([
+			true,
+			false,
+			false
+		]);
 	});
 
 	it('compares with stock by number where there is one', () => {

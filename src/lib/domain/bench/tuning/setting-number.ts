@@ -54,6 +54,9 @@ export function settingNumber(quantity: SettingQuantity, value: string, unit: st
 	return { value: (sign === '' || sign === '+' ? 1 : -1) * parsed.value * factor, offset: sign !== '' };
 }
 
+/** Whether a quantity is one that is written as a number with a unit. */
+export const hasUnits = (quantity: SettingQuantity): boolean => quantity in units;
+
 /** Whether a setting is as stock has it, by its number where it has one, else by its words. */
 export function asStock({ quantity, value, stockValue, unit }: SettingFact): boolean {
 	if (stockValue === null || value === stockValue) return value === stockValue;

@@ -2,7 +2,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { countedReadings, summariseCampaign, type CampaignMatrix, type CampaignRun } from './campaign';
 import type { WorkloadFacts } from './figures';
-import { welch } from './statistics/compare';
+import { welch } from './statistics/welch';
 import { relative } from './statistics/nearly.fixture';
 
 const workload = (slug: string, given: Partial<WorkloadFacts> = {}): WorkloadFacts & { needed: number } => ({

@@ -1,0 +1,29 @@
+export interface EwmaPoint {
+	ewma: number;
+	lower: number;
+	upper: number;
+}
+
+/**
+ * Exponentially weighted moving average with its limits, which widen from the first point on:
+ * centre ± L σ √(λ/(2 − λ) · (1 − (1 − λ)^2t)). Unit: that of the readings.
+ * RangeError for a weight outside 0 < λ ≤ 1. Source: NIST/SEMATECH e-Handbook §6.3.2.4; Lucas & Saccucci 1990.
+ * @param lambda weight of the newest reading, such as 0.2
+ * @param width L, such as 2.7
+ */
+export function ewma(
+	values: readonly number[],
+	{ centre, sigma }: { centre: number; sigma: number },
+	lambda: number,
+	width: number
+): EwmaPoint[] {
+	if (!(lambda > 0 && lambda <= 1))
+		throw new RangeError('The weight of the newest reading lies above 0, up to 1.');
+	let average = centre;
+	return values.map((value, index) => {
+		average = lambda * value + (1 - lambda) * average;
+		const share = (lambda / (2 - lambda)) * (1 - (1 - lambda) ** (2 * (index + 1)));
+		const half = width * sigma * Math.sqrt(share);
+		return { ewma: average, lower: centre - half, upper: centre + half };
+	});
+}

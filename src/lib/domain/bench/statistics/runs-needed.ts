@@ -1,0 +1,117 @@
+import type { Direction } from '../words';
+import { studentQuantile, upperTailP } from './interval';
+import { satterthwaite, type Spread } from './sides';
+
+/** Beyond this many readings a side nobody goes on (common practice, no source). */
+const mostPerSide = 200;
+const power = 0.8;
+
+export type RunsNeeded =
+	| {
+			kind: 'runs';
+			/** What the present figures point to. */
+			outcome: 'difference' | 'equivalence';
+			/** Readings a side that would settle it in four of five campaigns. */
+			perSide: number;
+			moreOfSubject: number;
+			moreOfBaseline: number;
+	  }
+	| { kind: 'too-near' }
+	| { kind: 'unknown' };
+
+/**
+ * Chance that every one of the one-sided tests rejects, by shifting Student's t (the usual iteration between quantile
+ * and degrees of freedom; a little cautious against the non-central t). Bonferroni's bound where there are two.
+ */
+function chance(distances: readonly number[], se: number, df: number, alpha: number): number {
+	const critical = studentQuantile(1 - alpha, df);
+	return 1 - distances.reduce((sum, distance) => sum + upperTailP(distance / se - critical, df), 0);
+}
+
+/** Smallest whole number from 2 on for which `enough` holds, where it holds for all above; null beyond `most`. */
+function smallest(most: number, enough: (n: number) => boolean): number | null {
+	if (!enough(most)) return null;
+	let [low, high] = [2, most];
+	while (low < high) {
+		const middle = Math.floor((low + high) / 2);
+		if (enough(middle)) high = middle;
+		else low = middle + 1;
+	}
+	return low;
+}
+
+/**
+ * Readings a side for `chance` to reach a power, where both sides have as many.
+ * @param sds standard deviations of one reading of each side, as they enter the test
+ * @param distances from the estimate to each margin that a one-sided test must exclude, all above zero
+ * @param alpha one-sided
+ */
+export function readingsPerSide(
+	sds: readonly [number, number],
+	distances: readonly number[],
+	alpha: number,
+	wanted = power,
+	most = mostPerSide
+): number | null {
+	const [a, b] = [sds[0] ** 2, sds[1] ** 2];
+	return smallest(most, (n) => {
+		const df = satterthwaite(a, n - 1, b, n - 1);
+		return chance(distances, Math.sqrt((a + b) / n), df, alpha) >= wanted;
+	});
+}
+
+/**
+ * How many readings would settle a comparison that says *not enough runs*, if means and scatter stay what they are:
+ * to show a difference beyond m, or equivalence within m, whichever the present ratio points to; power 0.8.
+ * Unknown where a side has fewer than two readings, neither varies, or a mean is not above zero.
+ * @param leastDifferencePercent m, in percent
+ */
+export function runsNeeded(
+	subject: Spread,
+	baseline: Spread,
+	better: Direction,
+	leastDifferencePercent: number
+): RunsNeeded {
+	const [top, bottom] = better === 'higher' ? [subject, baseline] : [baseline, subject];
+	if (top.sd === null || bottom.sd === null || top.sd + bottom.sd === 0) return { kind: 'unknown' };
+	if (!(top.mean > 0 && bottom.mean > 0)) return { kind: 'unknown' };
+	const upper = 1 + leastDifferencePercent / 100;
+	const margins = [1 / upper, upper];
+	const ratio = top.mean / bottom.mean;
+	const inside = ratio > 1 / upper && ratio < upper;
+	const tested = inside ? margins : [ratio >= upper ? upper : 1 / upper];
+	// In units of the bottom mean; the widest of the tested margins weighs the bottom side's scatter.
+	const theta = Math.max(...tested);
+	const sds = [top.sd / bottom.mean, (theta * bottom.sd) / bottom.mean] as const;
+	const distances = tested.map((margin) => Math.abs(ratio - margin));
+	const perSide = distances.every((distance) => distance > 0)
+		? readingsPerSide(sds, distances, inside ? 0.05 : 0.025)
+		: null;
+	if (perSide === null) return { kind: 'too-near' };
+	return {
+		kind: 'runs',
+		outcome: inside ? 'equivalence' : 'difference',
+		perSide,
+		moreOfSubject: Math.max(0, perSide - subject.n),
+		moreOfBaseline: Math.max(0, perSide - baseline.n)
+	};
+}
+
+const readings = (n: number): string => `${n} more reading${n === 1 ? '' : 's'}`;
+
+/** The answer in words, for the screen. */
+export function runsNeededWords(needed: RunsNeeded): string {
+	if (needed.kind === 'unknown') return 'Take two readings or more on each side first.';
+	if (needed.kind === 'too-near') {
+		return `More than ${mostPerSide} readings a side would not settle it: the two lie too near the edge of what matters.`;
+	}
+	const { outcome, moreOfSubject, moreOfBaseline } = needed;
+	const end = outcome === 'difference' ? 'show a difference that matters' : 'show that none matters';
+	const parts = [
+		...(moreOfSubject > 0 ? [`${readings(moreOfSubject)} here`] : []),
+		...(moreOfBaseline > 0 ? [`${readings(moreOfBaseline)} of the baseline`] : [])
+	];
+	return parts.length > 0
+		? `About ${parts.join(' and ')} would likely ${end}, if the scatter stays as it is.`
+		: `One more reading on each side would likely ${end}.`;
+}

@@ -7,7 +7,10 @@ export const readingsPerRun = 1000;
 
 const finite = z
 	.number('Each reading must be a finite number.')
-	.refine(isReading, 'A reading is zero, or between 1e-100 and 1e100 in size.');
+	.refine(
+		isReading,
+		'A reading is at most 1e15 in size: this is larger than anything a bench measures, or too small to be told from zero.'
+	);
 
 const ambientC = z
 	.number('The ambient temperature is a number, in °C.')

@@ -5,11 +5,11 @@ export type ParsedNumber = { ok: true; value: number } | { ok: false; message: s
 /** How a file writes decimals, where that is known; typed numbers may use either. */
 export type DecimalMark = 'point' | 'comma' | 'either';
 
-/** Between these the statistics neither overflow nor vanish; nothing that is measured comes near them. */
-const greatest = 1e100;
+/** Larger than anything a bench measures, bytes and hertz included; below the least the statistics would vanish. */
+const greatest = 1e15;
 const least = 1e-100;
 
-/** Whether a number can be kept as a reading: finite, and zero or between 1e-100 and 1e100 in size. */
+/** Whether a number can be kept as a reading: finite, and zero or between 1e-100 and 1e15 in size. */
 export const isReading = (value: number): boolean =>
 	value === 0 || (Math.abs(value) >= least && Math.abs(value) <= greatest);
 
@@ -68,7 +68,10 @@ export function parseReading(typed: string, decimal: DecimalMark = 'either'): Pa
 	}
 	const digits = whole.replace(/\D/g, '');
 	const value = Number(`${sign}${digits || '0'}.${fraction || '0'}e${power}`);
-	if (Math.abs(value) > greatest) return refused(`${quoted(text)} is too large to be a reading.`);
+	if (Math.abs(value) > greatest)
+		return refused(
+			`${quoted(text)} is too large: larger than anything a bench measures (1e15). Check its unit and its decimal mark.`
+		);
 	if (!isReading(value) || (value === 0 && /[1-9]/.test(digits + fraction))) {
 		return refused(`${quoted(text)} is too small to be a reading.`);
 	}

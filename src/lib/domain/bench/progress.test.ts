@@ -1,5 +1,6 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { currentProfile, progress, toRun } from './progress';
+import { byProfile, currentProfile, progress, restartsOf, toRun } from './progress';
 import { summarise } from './statistics/summary';
 
 const cell = (profile: string, workload: string, needed: number, taken: number) => ({
@@ -67,5 +68,73 @@ describe('the profile the rig is in', () => {
 			])
 		).toBe('tuned');
 		expect(currentProfile([])).toBeNull();
+	});
+});
+
+describe('a list to run', () => {
+	const plan = fc
+		.record({
+			profiles: fc.uniqueArray(fc.stringMatching(/^[a-e]{1,2}$/), { minLength: 1, maxLength: 8 }),
+			workloads: fc.uniqueArray(fc.stringMatching(/^[v-z]{1,2}$/), { minLength: 1, maxLength: 8 })
+		})
+		.chain(({ profiles, workloads }) =>
+			fc.record({
+				cells: fc
+					.array(
+						fc.record({ needed: fc.integer({ min: 1, max: 9 }), taken: fc.integer({ min: 0, max: 12 }) }),
+						{
+							minLength: profiles.length * workloads.length,
+							maxLength: profiles.length * workloads.length
+						}
+					)
+					.map((counts) =>
+						profiles.flatMap((profile, row) =>
+							workloads.map((workload, column) => {
+								const { needed = 1, taken = 0 } = counts[row * workloads.length + column] ?? {};
+								return { profile, workload, needed, summary: taken === 0 ? null : { n: taken } };
+							})
+						)
+					),
+				current: fc.option(fc.constantFrom(...profiles, 'elsewhere'))
+			})
+		);
+	const open = (cell: { needed: number; summary: { n: number } | null }) =>
+		(cell.summary?.n ?? 0) < cell.needed;
+
+	it('holds each unfinished cell once, with what it wants', () => {
+		fc.assert(
+			fc.property(plan, ({ cells, current }) => {
+				const list = toRun(cells, current);
+				const name = (cell: { profile: string; workload: string }) => `${cell.profile}/${cell.workload}`;
+				expect(list.map(name).sort()).toEqual(cells.filter(open).map(name).sort());
+				const { taken, needed } = progress(cells);
+				expect(list.reduce((sum, cell) => sum + cell.remaining, 0)).toBe(needed - taken);
+			})
+		);
+	});
+
+	it('takes one restart for each unfinished profile but the one the rig is in', () => {
+		fc.assert(
+			fc.property(plan, ({ cells, current }) => {
+				const profiles = new Set(cells.filter(open).map((cell) => cell.profile));
+				expect(restartsOf(toRun(cells, current))).toBe(
+					profiles.size - (current !== null && profiles.has(current) ? 1 : 0)
+				);
+			})
+		);
+	});
+
+	it('is gathered by profile without losing any of it', () => {
+		fc.assert(
+			fc.property(plan, ({ cells, current }) => {
+				const list = toRun(cells, current);
+				const groups = byProfile(list);
+				expect(new Set(groups.map((group) => group.profile)).size).toBe(groups.length);
+				expect(groups.filter((group) => group.restart)).toHaveLength(restartsOf(list));
+				expect(
+					groups.flatMap(({ profile, cells: wanted }) => wanted.map((cell) => ({ profile, ...cell })))
+				).toEqual(list.map(({ profile, workload, remaining }) => ({ profile, workload, remaining })));
+			})
+		);
 	});
 });

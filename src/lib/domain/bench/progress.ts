@@ -1,6 +1,9 @@
-import type { CellFigures } from './figures';
+import type { CellFigures, Summary } from './figures';
 
-type CellProgress = Pick<CellFigures, 'profile' | 'workload' | 'needed' | 'summary'>;
+/** A cell as far as progress is concerned: only how many readings of it count. */
+export type CellProgress = Pick<CellFigures, 'profile' | 'workload' | 'needed'> & {
+	summary: Pick<Summary, 'n'> | null;
+};
 
 export interface Progress {
 	/** Readings taken, a cell never counting for more than it needs. */
@@ -56,6 +59,34 @@ export function toRun(cells: readonly CellProgress[], current: string | null): T
 				};
 			})
 	);
+}
+
+/** How often the rig must be restarted into another profile to run a list in its order. */
+export const restartsOf = (list: readonly ToRun[]): number =>
+	list.filter((cell) => cell.changesProfile).length;
+
+/** What is left of one profile, of a list to run. */
+export interface ProfileToRun {
+	profile: string;
+	/** Whether the rig is restarted into it first. */
+	restart: boolean;
+	/** Readings wanted in all its cells. */
+	remaining: number;
+	cells: { workload: string; remaining: number }[];
+}
+
+/** A list to run, gathered by profile in its order: between two of them lies a restart. */
+export function byProfile(list: readonly ToRun[]): ProfileToRun[] {
+	const groups: ProfileToRun[] = [];
+	for (const { profile, workload, remaining, changesProfile } of list) {
+		const last = groups.at(-1);
+		const group =
+			last?.profile === profile ? last : { profile, restart: changesProfile, remaining: 0, cells: [] };
+		if (group !== last) groups.push(group);
+		group.remaining += remaining;
+		group.cells.push({ workload, remaining });
+	}
+	return groups;
 }
 
 /**

@@ -36,10 +36,3 @@ export function findCell(
 	if (!workload) fields.workload = [missing('workload', refs.workload, plan.workloads)];
 	return refuse('invalid', `${Object.values(fields).flat().join(' ')} Nothing was stored.`, { fields });
 }
-
-/** The words for a unit that is not the workload's; null where it is. The micro sign and the Greek letter are one. */
-export function unitFault(unit: string, workload: { slug: string; unit: string }): string | null {
-	const plain = (text: string) => text.trim().replaceAll('\u00b5', '\u03bc');
-	if (plain(unit) === plain(workload.unit)) return null;
-	return `${workload.slug} is measured in ${workload.unit}, not in “${unit.slice(0, 40)}”. Convert the readings and send them in ${workload.unit}.`;
-}

@@ -1,3 +1,4 @@
+import { unitFault } from '../../../domain/bench/unit-fault';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { readingsPerRun, type GridInput } from '../../../schemas/run';
@@ -8,7 +9,7 @@ import * as readings from '../../db/queries/reading';
 import * as runs from '../../db/queries/run';
 import * as settings from '../../db/queries/settings';
 import { findOpenCampaign } from './find-campaign';
-import { findCell, unitFault } from './find-cell';
+import { findCell } from './find-cell';
 import { lockCell } from './lock-cell';
 import { readStarted } from './read-started';
 import { storeReadings, storeRun } from './store-run';

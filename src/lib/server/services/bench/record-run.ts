@@ -1,3 +1,4 @@
+import { unitFault } from '../../../domain/bench/unit-fault';
 import { may } from '../../../domain/people/policy';
 import type { Summary } from '../../../domain/bench/figures';
 import { summarise } from '../../../domain/bench/statistics/summary';
@@ -7,7 +8,7 @@ import type { Context } from '../../context';
 import { inTransaction } from '../../db/client';
 import * as readings from '../../db/queries/reading';
 import { findOpenCampaign } from './find-campaign';
-import { findCell, unitFault } from './find-cell';
+import { findCell } from './find-cell';
 import { lockCell } from './lock-cell';
 import { storeReadings, storeRun } from './store-run';
 

@@ -108,6 +108,7 @@ export const access: Record<string, Record<string, Need>> = {
 		load: 'bench.plan',
 		'?/default': 'bench.plan'
 	},
+	'/(staff)/bench/rigs/[rig=slug]/profiles/compare': { load: 'bench.read' },
 	'/(staff)/bench/rigs/[rig=slug]/profiles/new': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/bench/rigs/[rig=slug]/revise': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/bench/rigs/new': { load: 'bench.plan', '?/default': 'bench.plan' },

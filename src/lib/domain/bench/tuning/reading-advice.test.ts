@@ -8,8 +8,8 @@ const rate = (setting: string, value: string, unit = 'MT/s') =>
 	fact({ setting, quantity: 'memory-data-rate', unit, value });
 
 describe('a ratio beside automatic boost', () => {
-	it('is pointed out while boost is on', () => {
-		expect(boostAdvice([ratio, boost('Auto')])).toMatchObject([
+	it.each(['On', 'Auto', 'Standard'])('is pointed out while boost is %s', (value) => {
+		expect(boostAdvice([ratio, boost(value)])).toMatchObject([
 			{ kind: 'boost-left-on', settings: ['Core ratio', 'Boost'] }
 		]);
 	});

@@ -5,12 +5,12 @@ import { practice, type Advice } from './advice';
 import { asStock, hasUnits, settingNumber } from './setting-number';
 import { valuesOf, type GroupedSetting } from './setting-values';
 
-const switchedOn = /^(on|enabled|auto|automatic|yes|1)\b/i;
+const switchedOff = /^(off|disabled|none|no|0)\b/i;
 
 /** A core ratio or clock that is set over stock while automatic boost is left on. */
 export function boostAdvice(settings: readonly SettingFact[]): Advice[] {
 	const boost = settings.find(
-		(fact) => fact.quantity === 'automatic-boost' && switchedOn.test(fact.value.trim())
+		(fact) => fact.quantity === 'automatic-boost' && !switchedOff.test(fact.value.trim())
 	);
 	const set = settings.filter(
 		(fact) =>

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { directions } from '../domain/bench/words';
 import { verdicts } from '../domain/bench/figures';
+import { ladderResults } from '../domain/articles/plates/ladder-spec';
 
 const words = z.string().max(1000);
 const name = z.string().max(200);
@@ -72,9 +73,63 @@ const gains = z.object({
 		.max(100)
 });
 
+const ladder = z.object({
+	...base,
+	kind: z.literal('ladder'),
+	ladder: name,
+	limits: z.object({ clockMHz: figure, volts: figure }),
+	series: z
+		.array(
+			z.object({
+				stress: name,
+				name,
+				demand: name,
+				series: z.number().int().min(0),
+				tries: z
+					.array(
+						z.object({
+							clockMHz: figure,
+							volts: figure,
+							durationMin: figure,
+							result: z.enum(ladderResults),
+							failure: name,
+							peakTempC: figure.nullable(),
+							packageW: figure.nullable()
+						})
+					)
+					.max(2000),
+				need: z.array(z.object({ clockMHz: figure, volts: figure })).max(2000)
+			})
+		)
+		.max(20)
+});
+
+const sweep = z.object({
+	...base,
+	kind: z.literal('sweep'),
+	sweep: name,
+	wantedMHz: figure,
+	passes: z
+		.array(
+			z.object({
+				number: z.number().int().min(1),
+				series: z.number().int().min(0),
+				points: z
+					.array(z.object({ threads: z.number().int().min(1), currentA: figure, clockMHz: figure }))
+					.max(500)
+			})
+		)
+		.max(60),
+	fit: z.array(z.object({ currentA: figure, clockMHz: figure })).max(30_000),
+	crossingA: figure.nullable(),
+	ci95: interval,
+	setA: figure.nullable(),
+	answer: name
+});
+
 /** The plates an editor's page asks to have drawn: what the renderer made of its directives. */
 export const platesAsk = z.object({
 	specs: z
-		.array(z.discriminatedUnion('kind', [scores, gains]))
+		.array(z.discriminatedUnion('kind', [scores, gains, ladder, sweep]))
 		.max(60, 'A page can have sixty plates at most.')
 });

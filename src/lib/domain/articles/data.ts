@@ -1,4 +1,6 @@
 import type { CellFigures, Overall, WorkloadFacts } from '../bench/figures';
+import type { LadderFacts } from '../bench/stability/ladder-facts';
+import type { SweepFacts } from '../bench/stability/sweep-facts';
 import type { SettingQuantity } from '../bench/words';
 import type { EmbargoField, PartKind, Provenance } from '../stores/words';
 
@@ -78,6 +80,9 @@ export interface SampleDuty {
 export interface ArticleData {
 	campaigns: CampaignData[];
 	duties: SampleDuty[];
+	/** Ladders and sweeps of the rigs of those campaigns; left out of editions from before there were any. */
+	ladders?: LadderFacts[];
+	sweeps?: SweepFacts[];
 	/** The publication's zone for the dates it prints, such as Europe/Oslo. */
 	zone: string;
 }

@@ -5,6 +5,7 @@ import { plateKinds, type PlateSpec } from '../plates/spec';
 import { unknownName } from '../names-near';
 import type { ArticleData, CampaignData } from '../data';
 import { attribute, findBaseline, findCampaign, findWorkload } from './lookup';
+import { ladderPlate, sweepPlate } from './plate-of-bench';
 import { directive, found, missing, type Call, type Lookup, type UsedCell } from './shape';
 
 /** `profiles=a,b` in the campaign's names; undefined for all of them. */
@@ -60,6 +61,7 @@ function gains(call: Call, data: ArticleData): Lookup<PlateSpec> {
 /** The cells whose readings a plate shows. */
 function cellsOf(spec: PlateSpec): UsedCell[] {
 	const { campaign } = spec;
+	if (spec.kind === 'ladder' || spec.kind === 'sweep') return [];
 	if (spec.kind === 'scores') {
 		return spec.rows.map(({ profile }) => ({ campaign, profile, workload: spec.workload }));
 	}
@@ -69,13 +71,30 @@ function cellsOf(spec: PlateSpec): UsedCell[] {
 	]);
 }
 
-/** `::plate{kind=scores workload=}` and `::plate{kind=gains over=}`: a chart of stored runs. */
+const byKind: Record<PlateSpec['kind'], (call: Call, data: ArticleData) => Lookup<PlateSpec>> = {
+	scores,
+	gains,
+	ladder: ladderPlate,
+	sweep: sweepPlate
+};
+
+const isKind = (kind: string): kind is PlateSpec['kind'] => kind in byKind;
+
+/**
+ * `::plate{kind=scores workload=}`, `::plate{kind=gains over=}`, `::plate{kind=ladder ladder=}` and
+ * `::plate{kind=sweep sweep=}`: a chart of what is stored.
+ */
 export const plate = directive<PlateSpec>({
 	name: 'plate',
 	level: 'block',
-	words: 'A chart: the scores of one workload, or the gains over a profile.',
+	words: 'A chart: the scores of one workload, the gains over a profile, a ladder, or a sweep.',
 	attributes: [
-		attribute.oneOf('kind', 'scores of one workload, or gains over a profile', plateKinds, true),
+		attribute.oneOf(
+			'kind',
+			'scores of one workload, gains over a profile, a ladder, or a sweep',
+			plateKinds,
+			true
+		),
 		attribute.workload(false),
 		attribute.over(),
 		attribute.campaign(),
@@ -86,13 +105,29 @@ export const plate = directive<PlateSpec>({
 			values: () => null
 		},
 		{ ...attribute.profile(false), name: 'subject', words: 'the profile drawn in blue' },
+		{
+			name: 'ladder',
+			required: false,
+			words: 'the ladder, for a plate of one',
+			values: (data) => (data.ladders ?? []).map((one) => one.slug)
+		},
+		{
+			name: 'sweep',
+			required: false,
+			words: 'the sweep, for a plate of one',
+			values: (data) => (data.sweeps ?? []).map((one) => one.slug)
+		},
 		{ name: 'title', required: false, words: 'a title of your own, in quotes', values: () => null }
 	],
-	resolve: (call, data) => (call.attributes.kind === 'gains' ? gains(call, data) : scores(call, data)),
+	resolve: (call, data) => {
+		const { kind = 'scores' } = call.attributes;
+		return isKind(kind) ? byKind[kind](call, data) : missing(`There is no plate of the kind “${kind}”.`);
+	},
 	render: (spec, { draw, call, platesAt }) => ({
 		html: plateFigure(spec, draw(spec), call.line, platesAt),
 		plain: spec.title,
 		plate: spec,
-		cells: cellsOf(spec)
+		cells: cellsOf(spec),
+		...(spec.campaign === '' ? {} : { campaigns: [spec.campaign] })
 	})
 });

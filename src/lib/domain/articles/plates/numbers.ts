@@ -1,6 +1,9 @@
 import { verdictWords } from '../../bench/figures';
 import { halfWidthOf, printed, printedRange, printedRatio } from '../../shared/quantity';
 import { table } from '../html';
+import { csv, type Field } from './csv';
+import { ladderCsv, ladderTable } from './ladder-numbers';
+import { sweepCsv, sweepTable } from './sweep-numbers';
 import type { GainsSpec, PlateSpec, ScoresSpec } from './spec';
 
 const scoresTable = (spec: ScoresSpec): string =>
@@ -60,21 +63,11 @@ const gainsTable = (spec: GainsSpec): string =>
 	);
 
 /** The numbers of a plate as a table, at printed rounding. */
-export const plateTable = (spec: PlateSpec): string =>
-	spec.kind === 'scores' ? scoresTable(spec) : gainsTable(spec);
-
-type Field = string | number | null;
-
-/** One field: quoted where it must be, doubled quotes inside (RFC 4180, rules 5 to 7). */
-function field(value: Field): string {
-	if (value === null) return '';
-	if (typeof value === 'number') return String(value);
-	// A text that a spreadsheet would run as a formula is shown as text (common practice, no source).
-	const text = /^[=+\-@\t\r]/.test(value) ? `'${value}` : value;
-	return /[",\r\n]/.test(text) ? `"${text.replace(/"/g, '""')}"` : text;
+export function plateTable(spec: PlateSpec): string {
+	if (spec.kind === 'scores') return scoresTable(spec);
+	if (spec.kind === 'gains') return gainsTable(spec);
+	return spec.kind === 'ladder' ? ladderTable(spec) : sweepTable(spec);
 }
-
-const csv = (rows: Field[][]): string => rows.map((row) => `${row.map(field).join(',')}\r\n`).join('');
 
 /** The numbers of a plate at full precision, as CSV by RFC 4180 with a header line. */
 export function plateCsv(spec: PlateSpec): string {
@@ -95,6 +88,8 @@ export function plateCsv(spec: PlateSpec): string {
 			])
 		]);
 	}
+	if (spec.kind === 'ladder') return ladderCsv(spec);
+	if (spec.kind === 'sweep') return sweepCsv(spec);
 	return csv([
 		[
 			'workload',

@@ -1,15 +1,8 @@
 import type { Verdict } from '../../bench/figures';
 import type { Direction } from '../../bench/words';
-
-/** What every plate says of itself, in print already. */
-interface PlateBase {
-	title: string;
-	/** Under the title: what is shown and which way is better. */
-	sub: string;
-	/** Under the drawing: what was measured, n, what the whisker is, rig and dates. */
-	foot: string[];
-	campaign: string;
-}
+import type { LadderSpec } from './ladder-spec';
+import type { PlateBase } from './plate-base';
+import type { SweepSpec } from './sweep-spec';
 
 /** One bar. Figures at full precision in the plate's unit; texts as printed. */
 export interface ScoreRow {
@@ -67,9 +60,14 @@ export interface GainsSpec extends PlateBase {
 }
 
 /** All that a plate is drawn from: plain data, so that the same plate is drawn the same way everywhere. */
-export type PlateSpec = ScoresSpec | GainsSpec;
+export type PlateSpec = ScoresSpec | GainsSpec | LadderSpec | SweepSpec;
 
-export const plateKinds = ['scores', 'gains'] as const satisfies readonly PlateSpec['kind'][];
+export const plateKinds = [
+	'scores',
+	'gains',
+	'ladder',
+	'sweep'
+] as const satisfies readonly PlateSpec['kind'][];
 
 /** A 53-bit hash of a text, enough to tell the plates of an article apart; not for secrets. */
 function hashOf(text: string): string {
@@ -85,12 +83,17 @@ function hashOf(text: string): string {
 	return (4294967296 * (2097151 & low) + (high >>> 0)).toString(36).padStart(11, '0');
 }
 
+function subjectOf(spec: PlateSpec): string {
+	if (spec.kind === 'scores') return spec.workload;
+	if (spec.kind === 'gains') return `over-${spec.baseline.profile}`;
+	return spec.kind === 'ladder' ? spec.ladder : spec.sweep;
+}
+
 /**
  * A plate's name: the same for the same figures, another for others. It is the key of the preview's drawings
  * and the name of the edition's files; at most 60 characters.
  * @example plateKey(spec) // 'scores-tile-render-0f3k2m9x1ab'
  */
 export function plateKey(spec: PlateSpec): string {
-	const subject = spec.kind === 'scores' ? spec.workload : `over-${spec.baseline.profile}`;
-	return `${spec.kind}-${subject.slice(0, 38).replace(/-+$/, '')}-${hashOf(JSON.stringify(spec))}`;
+	return `${spec.kind}-${subjectOf(spec).slice(0, 38).replace(/-+$/, '')}-${hashOf(JSON.stringify(spec))}`;
 }

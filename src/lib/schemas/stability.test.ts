@@ -129,6 +129,13 @@ describe('a pass of a sweep', () => {
 		]);
 	});
 
+	it('refuses a pass at one current alone, which no line can be drawn through', () => {
+		const level = points.map((point) => ({ ...point, currentA: '66' }));
+		expect(faults(sweepPassInput, { points: level, sure: true })).toEqual({
+			points: 'All points have the same current, so no switch point can be told. Check the currents.'
+		});
+	});
+
 	it('comes in passes', () => {
 		expect(sweepInput.parse({ passes: [{ points }, { points }] }).passes).toHaveLength(2);
 		expect(faults(sweepInput, { passes: [] })).toEqual({ passes: 'Send at least one pass.' });

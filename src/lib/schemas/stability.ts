@@ -175,6 +175,12 @@ export const sweepPassInput = z
 		key
 	})
 	.superRefine(({ points, sure }, ctx) => {
+		if (new Set(points.map(({ currentA }) => currentA)).size < 2)
+			ctx.addIssue({
+				code: 'custom',
+				path: ['points'],
+				message: 'All points have the same current, so no switch point can be told. Check the currents.'
+			});
 		for (const finding of checkSweep(points)) {
 			if (finding.kind === 'asked' && sure) continue;
 			const message =

@@ -80,10 +80,14 @@ export const access: Record<string, Record<string, Need>> = {
 		'?/void': 'run.void',
 		'?/edit': 'run.record',
 		'?/sign': 'cell.sign',
-		'?/unsign': 'cell.sign'
+		'?/sign-chosen': 'cell.sign',
+		'?/unsign': 'cell.sign',
+		'?/unsign-chosen': 'cell.sign'
 	},
 	'/(staff)/bench/campaigns/[campaign]/compare.csv': { GET: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/compare': { load: 'bench.read' },
+	'/(staff)/bench/campaigns/[campaign]/export.csv': { GET: 'bench.read' },
+	'/(staff)/bench/campaigns/[campaign]/events': { GET: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/history': { load: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/import': {
 		load: 'run.record',

@@ -1,7 +1,9 @@
 import fc from 'fast-check';
 import Papa from 'papaparse';
 import { describe, expect, it } from 'vitest';
-import { readReadingsCsv } from './readings-csv';
+import { columns, readReadingsCsv } from './readings-csv';
+
+const empty = Object.fromEntries(columns.map((column) => [column, '']));
 
 // RFC 4180: quotes around a field with the delimiter, a line break or a quote in it; a quote inside is doubled.
 describe('a CSV of readings', () => {
@@ -17,13 +19,10 @@ describe('a CSV of readings', () => {
 					line: 2,
 					raw: 'stock,build,"1,5","a ""b"", c\nd"',
 					cells: {
+						...empty,
 						profile: 'stock',
 						workload: 'build',
 						value: '1,5',
-						unit: '',
-						repeat: '',
-						started_at: '',
-						ambient_c: '',
 						notes: 'a "b", c\nd'
 					},
 					overflows: false
@@ -65,7 +64,7 @@ describe('a CSV of readings', () => {
 				(rows, delimiter) => {
 					const table = readReadingsCsv(Papa.unparse(rows, { delimiter }));
 					expect(table.ok && table.lines.map(({ cells }) => cells)).toEqual(
-						rows.map((given) => ({ ...given, unit: '', repeat: '', started_at: '', ambient_c: '' }))
+						rows.map((given) => ({ ...empty, ...given }))
 					);
 				}
 			)

@@ -6,9 +6,14 @@ export const columns = [
 	'workload',
 	'value',
 	'unit',
+	'run',
 	'repeat',
 	'started_at',
 	'ambient_c',
+	'tester',
+	'source',
+	'excluded_reason',
+	'voided_reason',
 	'notes'
 ] as const;
 export type Column = (typeof columns)[number];
@@ -108,16 +113,7 @@ function byColumn({ line, raw, cells }: CsvRecord, at: Record<Column, number>, w
 	return {
 		line,
 		raw,
-		cells: {
-			profile: cell('profile'),
-			workload: cell('workload'),
-			value: cell('value'),
-			unit: cell('unit'),
-			repeat: cell('repeat'),
-			started_at: cell('started_at'),
-			ambient_c: cell('ambient_c'),
-			notes: cell('notes')
-		},
+		cells: Object.fromEntries(columns.map((column) => [column, cell(column)])) as Record<Column, string>,
 		overflows: cells.slice(width).some((extra) => extra.trim() !== '')
 	};
 }

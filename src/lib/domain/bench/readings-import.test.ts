@@ -57,9 +57,14 @@ describe('preview of an import', () => {
 				profile: 'stock',
 				workload: 'prime-search',
 				value: 4568.98,
+				run: null,
 				repeat: 1,
 				startedAt: '2026-12-01T03:55:13.032Z',
 				ambientC: null,
+				tester: '',
+				source: '',
+				excludedReason: '',
+				voidedReason: '',
 				notes: ''
 			}
 		});
@@ -112,7 +117,7 @@ describe('preview of an import', () => {
 		['stock,prime-search,1,,,,warm', 'Ambient temperature'],
 		['stock,prime-search,1,,,,400', 'between'],
 		['stock,prime-search,1,,,,,note,more', 'more cells'],
-		[`stock,prime-search,1,,,,,${'x'.repeat(2001)}`, 'longer than']
+		[`stock,prime-search,1,,,,,${'x'.repeat(5001)}`, 'longer than']
 	])('refuses %s', (row, reason) => {
 		expect(only(row)).toMatchObject({
 			line: 2,
@@ -174,5 +179,35 @@ describe('preview of an import', () => {
 
 	it('takes ten thousand rows', () => {
 		expect(preview(`profile,workload,value\n${'stock,source-build,1\n'.repeat(10_000)}`).taken).toBe(10_000);
+	});
+});
+
+describe('a file that numbers its runs', () => {
+	const head = 'profile,workload,value,run,repeat,excluded_reason,voided_reason';
+	const rowsOf = (...lines: string[]) => preview([head, ...lines].join('\n')).rows;
+
+	it('may number the same repeats in each', () => {
+		expect(
+			rowsOf('stock,prime-search,1,1,1,,', 'stock,prime-search,2,2,1,,', 'stock,prime-search,3,2,1,,')
+		).toMatchObject([
+			{ taken: { run: 1, repeat: 1 } },
+			{ taken: { run: 2, repeat: 1 } },
+			{ refused: 'Repeat 1 of run 2 of this cell is on line 3 already.' }
+		]);
+	});
+
+	it('voids a run as a whole or not at all', () => {
+		expect(
+			rowsOf('stock,prime-search,1,1,1,,wrong profile', 'stock,prime-search,2,1,2,slipped,')
+		).toMatchObject([
+			{ taken: { voidedReason: 'wrong profile' } },
+			{ refused: expect.stringContaining('differs from that on line 2') }
+		]);
+	});
+
+	it('is refused a run that is no number', () => {
+		expect(rowsOf('stock,prime-search,1,first,1,,')).toMatchObject([
+			{ refused: 'The run “first” is not a whole number from 1 to 999999.' }
+		]);
 	});
 });

@@ -3,6 +3,9 @@ import { nearest } from '../shared/nearest';
 import type { Refusal } from '../shared/outcome';
 import { decimalMarkOf, parseReading, quoted, type DecimalMark } from './numbers';
 import { readReadingsCsv, type CsvLine } from './readings-csv';
+import { plainText } from './readings-writer';
+import { seenRows } from './seen-rows';
+import { unitFault } from './unit-fault';
 
 /** What the file's names are held against. */
 export interface ImportTarget {
@@ -18,11 +21,19 @@ export interface TakenReading {
 	workload: string;
 	/** In the workload's unit. */
 	value: number;
-	/** As the file numbers it; null where it does not. */
+	/** The run's number in the file; null where all of a cell is one run. */
+	run: number | null;
+	/** As the file numbers it within its run, or its cell where runs are not numbered; null where it does not. */
 	repeat: number | null;
 	/** ISO time in UTC; null where the file gives none. */
 	startedAt: string | null;
 	ambientC: number | null;
+	/** Who took it and how, as the file says; empty where it does not. */
+	tester: string;
+	source: string;
+	/** Why it does not count, or why its whole run does not; empty where it does. */
+	excludedReason: string;
+	voidedReason: string;
 	notes: string;
 }
 
@@ -39,6 +50,8 @@ export interface ImportPreview {
 	ignored: string[];
 	decimalMark: DecimalMark;
 }
+
+type Words = Pick<TakenReading, 'tester' | 'source' | 'excludedReason' | 'voidedReason' | 'notes'>;
 
 type Checked<T> = { value: T } | { reason: string };
 
@@ -69,15 +82,29 @@ function readValue(text: string, decimalMark: DecimalMark): Checked<number> {
 	return parsed.ok ? parsed : reason(parsed.message);
 }
 
-// The micro sign and the Greek letter look the same and are both typed.
-const sameUnit = (a: string, b: string): boolean =>
-	a.replaceAll('\u00b5', '\u03bc') === b.replaceAll('\u00b5', '\u03bc');
-
-function readRepeat(text: string): Checked<number | null> {
+/** A number that counts runs or repeats; null where the cell is empty. */
+function readCount(kind: 'run' | 'repeat', text: string, most: number): Checked<number | null> {
 	if (text === '') return { value: null };
-	return /^[1-9]\d{0,3}$/.test(text)
+	return /^[1-9]\d{0,8}$/.test(text) && Number(text) <= most
 		? { value: Number(text) }
-		: reason(`The repeat ${quoted(text)} is not a whole number from 1 to 9999.`);
+		: reason(`The ${kind} ${quoted(text)} is not a whole number from 1 to ${most}.`);
+}
+
+/** What stands in words beside a reading. */
+function readWords(cells: CsvLine['cells']): Checked<Words> {
+	const words = {
+		tester: plainText(cells.tester),
+		source: plainText(cells.source),
+		excludedReason: plainText(cells.excluded_reason),
+		voidedReason: plainText(cells.voided_reason),
+		notes: plainText(cells.notes)
+	};
+	if (words.notes.length > 5000) return reason('The notes are longer than 5,000 characters.');
+	if (words.excludedReason.length > 500 || words.voidedReason.length > 500)
+		return reason('A reason is longer than 500 characters.');
+	return words.tester.length > 200 || words.source.length > 200
+		? reason('The tester or the source is longer than 200 characters.')
+		: { value: words };
 }
 
 function readStart(text: string, zone: string): Checked<string | null> {
@@ -115,26 +142,28 @@ function check(row: CsvLine, target: ImportTarget, decimalMark: DecimalMark): Ch
 	if ('reason' in workload) return workload;
 	const value = readValue(cells.value, decimalMark);
 	if ('reason' in value) return value;
-	const { unit } = workload.value;
-	if (cells.unit !== '' && !sameUnit(cells.unit, unit)) {
-		return reason(`The unit is ${quoted(cells.unit)}, but ${workload.value.slug} is measured in ${unit}.`);
-	}
-	const repeat = readRepeat(cells.repeat);
+	const fault = cells.unit === '' ? null : unitFault(plainText(cells.unit), workload.value);
+	if (fault) return reason(fault);
+	const run = readCount('run', cells.run, 999_999);
+	if ('reason' in run) return run;
+	const repeat = readCount('repeat', cells.repeat, 9999);
 	if ('reason' in repeat) return repeat;
 	const startedAt = readStart(cells.started_at, target.zone);
 	if ('reason' in startedAt) return startedAt;
 	const ambientC = readAmbient(cells.ambient_c, decimalMark);
 	if ('reason' in ambientC) return ambientC;
-	if (cells.notes.length > 2000) return reason('The notes are longer than 2,000 characters.');
+	const words = readWords(cells);
+	if ('reason' in words) return words;
 	return {
 		value: {
 			profile: profile.value.slug,
 			workload: workload.value.slug,
 			value: value.value,
+			run: run.value,
 			repeat: repeat.value,
 			startedAt: startedAt.value,
 			ambientC: ambientC.value,
-			notes: cells.notes
+			...words.value
 		}
 	};
 }
@@ -150,8 +179,9 @@ function markOf(lines: readonly CsvLine[], delimiter: string): DecimalMark {
 
 /**
  * What an import of a CSV of readings would do, row by row: each that it takes, and each that it refuses with the
- * reason in words. Columns: profile, workload, value, and if wanted unit, repeat, started_at, ambient_c, notes.
- * The same profile, workload and repeat twice: the first is taken. A file that cannot be read at all is refused.
+ * reason in words. Columns: profile, workload, value, and if wanted unit, run, repeat, started_at, ambient_c, tester,
+ * source, excluded_reason, voided_reason, notes. The same profile, workload, run and repeat twice: the first is taken.
+ * A file that cannot be read at all is refused.
  */
 export function previewImport(
 	text: string,
@@ -160,20 +190,13 @@ export function previewImport(
 	const table = readReadingsCsv(text);
 	if (!table.ok) return table;
 	const decimalMark = markOf(table.lines, table.delimiter);
-	const firstLines = new Map<string, number>();
+	const seen = seenRows();
 	const rows = table.lines.map((row): PreviewRow => {
 		const { line, raw } = row;
 		const checked = check(row, target, decimalMark);
 		if ('reason' in checked) return { line, refused: checked.reason, raw };
-		const taken = checked.value;
-		if (taken.repeat === null) return { line, taken };
-		const key = `${taken.profile}/${taken.workload}/${taken.repeat}`;
-		const first = firstLines.get(key);
-		if (first !== undefined) {
-			return { line, refused: `Repeat ${taken.repeat} of this cell is on line ${first} already.`, raw };
-		}
-		firstLines.set(key, line);
-		return { line, taken };
+		const fault = seen(line, checked.value);
+		return fault === null ? { line, taken: checked.value } : { line, refused: fault, raw };
 	});
 	const taken = rows.filter((row) => 'taken' in row).length;
 	return { ok: true, rows, taken, refused: rows.length - taken, ignored: table.ignored, decimalMark };

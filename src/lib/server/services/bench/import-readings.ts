@@ -35,11 +35,11 @@ function refuseWhole(preview: ReadingsPreview, leaveRefused: boolean): Outcome<n
 			'invalid',
 			`${preview.refused} of ${preview.rows.length} rows are refused, so nothing was imported. Mend them in the file, or say that the others are to be taken without them.`
 		);
-	const long = preview.runs.find((run) => run.values.length > readingsPerRun);
+	const long = preview.runs.find((run) => run.readings.length > readingsPerRun);
 	if (long)
 		return refuse(
 			'too_large',
-			`${long.profile}, ${long.workload} has ${long.values.length} readings; a run has at most ${readingsPerRun}. Nothing was imported; split the file.`
+			`${long.profile}, ${long.workload} has ${long.readings.length} readings; a run has at most ${readingsPerRun}. Nothing was imported; split the file.`
 		);
 	return null;
 }
@@ -51,11 +51,24 @@ const cellOf = (plan: CampaignPlan, run: ImportedRun) => ({
 	name: `${run.profile}/${run.workload}`
 });
 
+/** A run for the history: what the file says of who took it, and of what does not count. */
+function told(run: ImportedRun) {
+	const excluded = run.readings.flatMap(({ excludedReason }, at) =>
+		excludedReason === '' ? [] : [`reading ${at + 1}: ${excludedReason}`]
+	);
+	return {
+		readings: run.readings.map((reading) => reading.value),
+		...(run.tester !== '' && { 'taken by': run.tester }),
+		...(run.source !== '' && { 'came by': run.source }),
+		...(excluded.length > 0 && { excluded }),
+		...(run.voidedReason !== '' && { voided: run.voidedReason })
+	};
+}
+
 async function store(ctx: Context, plan: CampaignPlan, preview: ReadingsPreview): Promise<Imported> {
-	const cells = preview.runs.map((run) => {
+	const cells = preview.runs.map((run, at) => {
 		const cell = cellOf(plan, run);
-		const clientKey = `${preview.fileKey}:${cell.profileId}:${cell.workloadId}:${preview.attempts}`;
-		return { run, cell, clientKey };
+		return { run, cell, clientKey: `${preview.fileKey}:${at + 1}:${preview.attempts}` };
 	});
 	await plans.lockCells(
 		ctx.db,
@@ -73,17 +86,27 @@ async function store(ctx: Context, plan: CampaignPlan, preview: ReadingsPreview)
 			startedAt: run.startedAt === null ? ctx.now : new Date(run.startedAt),
 			ambientC: run.ambientC,
 			notes: run.notes,
-			createdAt: ctx.now
+			createdAt: ctx.now,
+			...(run.voidedReason !== '' && {
+				voidedAt: ctx.now,
+				voidedBy: ctx.actor.id,
+				voidReason: run.voidedReason
+			})
 		}))
 	);
 	await readings.insertMany(
 		ctx.db,
 		cells.flatMap(({ run, clientKey }) =>
-			run.values.map((value, at) => ({
+			run.readings.map(({ value, excludedReason }, at) => ({
 				runId: ids.get(clientKey) ?? 0,
 				position: at + 1,
 				value,
-				createdAt: ctx.now
+				createdAt: ctx.now,
+				...(excludedReason !== '' && {
+					excludedAt: ctx.now,
+					excludedBy: ctx.actor.id,
+					excludeReason: excludedReason
+				})
 			}))
 		)
 	);
@@ -95,7 +118,7 @@ async function store(ctx: Context, plan: CampaignPlan, preview: ReadingsPreview)
 			act: 'run.import',
 			subjectKind: 'campaign',
 			subjectId: plan.head.id,
-			after: { cell: cell.name, run: ids.get(clientKey), readings: run.values }
+			after: { cell: cell.name, run: ids.get(clientKey), ...told(run) }
 		}))
 	);
 	const signaturesRemoved = await takeSignaturesOff(
@@ -107,7 +130,8 @@ async function store(ctx: Context, plan: CampaignPlan, preview: ReadingsPreview)
 }
 
 /**
- * Imports a file's readings: one run for each cell, all in one transaction. The preview is made anew from the text,
+ * Imports a file's readings: the runs it numbers, or one for each cell, all in one transaction; what the file says is
+ * excluded or voided is so, with its reason. The preview is made anew from the text,
  * and whatever it refuses stops the import unless the person said to leave those rows.
  */
 export async function importReadings(

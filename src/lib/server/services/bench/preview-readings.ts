@@ -18,7 +18,7 @@ export interface Double {
 }
 
 export interface ReadingsPreview extends ImportPreview {
-	/** One for each cell the file fills. */
+	/** One for each run of the file, or each cell where it numbers no runs. */
 	runs: ImportedRun[];
 	/** Set when this very file was imported before, and not all of it was voided since. */
 	importedBefore: { by: string; at: Date } | null;
@@ -41,7 +41,9 @@ const same = (values: number[], others: number[]) =>
 async function findDoubles(ctx: Context, campaignId: number, imported: ImportedRun[]): Promise<Double[]> {
 	const all = (await recorded.forCampaigns(ctx.db, [campaignId])).get(campaignId)?.runs ?? [];
 	const standing = all.filter((run) => run.voidedAt === null);
-	return imported.flatMap(({ profile, workload, values }) => {
+	return imported.flatMap(({ profile, workload, readings, voidedReason }) => {
+		if (voidedReason !== '') return [];
+		const values = readings.map((reading) => reading.value);
 		const twin = standing.find(
 			(run) =>
 				run.profile === profile &&

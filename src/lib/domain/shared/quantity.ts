@@ -1,3 +1,5 @@
+import { roundHalfUp } from './round-half-up';
+
 /**
  * Printed rounding. Every figure on a page, in a plate or in a table passes through here, once, from the
  * stored value; nothing is rounded before it is stored and nothing printed is rounded again.
@@ -21,11 +23,10 @@ export interface Precision {
 /** Power of ten of the first significant digit. @example exponentOf(4686.7) === 3 */
 const exponentOf = (value: number): number => Number(Math.abs(value).toExponential().split('e')[1]);
 
-/** The number's own shortest decimal digits as an integer and the places behind its point. */
-function digitsOf(value: number): { digits: bigint; places: number } {
-	const [mantissa = '0', exponent = '0'] = Math.abs(value).toExponential().split('e');
-	const [whole = '0', fraction = ''] = mantissa.split('.');
-	return { digits: BigInt(whole + fraction), places: fraction.length - Number(exponent) };
+/** Places behind the point of the number's own shortest decimal digits. @example placesOf(0.125) === 3 */
+function placesOf(value: number): number {
+	const [mantissa = '0', exponent = '0'] = value.toExponential().split('e');
+	return (mantissa.split('.')[1] ?? '').length - Number(exponent);
 }
 
 /**
@@ -35,15 +36,7 @@ function digitsOf(value: number): { digits: bigint; places: number } {
  */
 export function roundedDecimal(value: number, decimals: number): string {
 	if (!Number.isFinite(value)) throw new RangeError('Only a finite number can be printed.');
-	const { digits, places } = digitsOf(value);
-	const drop = places - decimals;
-	const unit = 10n ** BigInt(Math.abs(drop));
-	const kept = drop > 0 ? (digits + unit / 2n) / unit : digits * unit;
-	const scaled = decimals < 0 ? kept * 10n ** BigInt(-decimals) : kept;
-	const text = scaled.toString().padStart(Math.max(decimals, 0) + 1, '0');
-	const cut = text.length - Math.max(decimals, 0);
-	const sign = value < 0 && scaled !== 0n ? '-' : '';
-	return sign + text.slice(0, cut) + (decimals > 0 ? `.${text.slice(cut)}` : '');
+	return roundHalfUp(value.toExponential(), decimals);
 }
 
 /** Half the width of an interval; null where there is none. Unit: that of its ends. */
@@ -60,7 +53,7 @@ export function decimalsFor(value: number, { decimals, halfWidth }: Precision = 
 	if (decimals !== undefined) return decimals;
 	const first = value === 0 ? 0 : exponentOf(value);
 	if (!halfWidth || !Number.isFinite(halfWidth)) {
-		return Math.max(0, Math.min(digitsOf(value).places, 5 - first));
+		return Math.max(0, Math.min(placesOf(value), 5 - first));
 	}
 	// Rounded to two digits before its place is read: 9.96 is 10, so its second digit is the ones.
 	const place = 1 - exponentOf(Number(halfWidth.toPrecision(2)));

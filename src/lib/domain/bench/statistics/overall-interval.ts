@@ -30,6 +30,11 @@ function weightsOf(inputs: readonly OverallInput[]): Map<Spread, number> {
 	return weights;
 }
 
+/** Whether a mean's 95 % interval ends above zero, without which its logarithm has no such variance (as Fieller's g). */
+const clearOfZero = (relativeVariance: number, n: number): boolean =>
+	// Below this not even a single degree of freedom (t 12.7) reaches zero, and the quantile can be spared.
+	relativeVariance < 0.006 || studentQuantile(0.975, n - 1) ** 2 * relativeVariance < 1;
+
 /**
  * Geometric mean of a profile's ratios with its 95 % interval: delta method on the logarithms, so that a mean's
  * relative variance s² / (n x̄²) is that of its logarithm; variances of independent sides add with their squared
@@ -52,8 +57,7 @@ export function overallInterval(inputs: readonly OverallInput[]): OverallInterva
 		if (!(mean > 0)) throw new RangeError('A ratio needs means above zero.');
 		if (sd === null) return { ratio, ci95: null, df: null };
 		const relative = sd ** 2 / n / mean ** 2;
-		// Where the mean is not clear of zero its logarithm has no such variance; Fieller's g says the same.
-		if (sd > 0 && studentQuantile(0.975, n - 1) ** 2 * relative >= 1) return { ratio, ci95: null, df: null };
+		if (!clearOfZero(relative, n)) return { ratio, ci95: null, df: null };
 		const term = weight ** 2 * relative;
 		variance += term;
 		squares += term ** 2 / (n - 1);

@@ -1,0 +1,2 @@
+export const intervalMethods = ['mean', 'ratio', 'overall', 'ratio-of-medians'] as const;
+export type IntervalMethod = (typeof intervalMethods)[number];

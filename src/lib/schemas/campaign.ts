@@ -34,7 +34,8 @@ const chosenWorkload = z
 		if (message) ctx.addIssue({ code: 'custom', message, path: ['repeats'] });
 	});
 
-const workloads = z
+/** Workloads ticked in a list, with the readings each needs; null takes the workload's own protocol. */
+export const chosenWorkloads = z
 	.array(chosenWorkload)
 	.max(1000, 'That is too long a list.')
 	.transform((rows) =>
@@ -45,10 +46,10 @@ const workloads = z
 				repeats: row.repeats === '' ? null : repeats.parse(row.repeats)
 			}))
 	)
-	.refine((rows) => rows.length <= most, `A campaign has at most ${most} workloads.`)
+	.refine((rows) => rows.length <= most, `Choose at most ${most} workloads.`)
 	.refine(
 		(rows) => new Set(rows.map((row) => row.workload)).size === rows.length,
-		'A workload is in a campaign once.'
+		'A workload is in it once.'
 	);
 
 /** A plan: one rig as it is now, profiles of it, and workloads with the readings each cell needs. */
@@ -57,7 +58,7 @@ export const campaignInput = z.object({
 	slug: optionalSlug,
 	rig: reference('Choose a rig.'),
 	profiles: profiles.min(1, 'Choose at least one profile.'),
-	workloads: workloads.refine((rows) => rows.length > 0, 'Choose at least one workload.'),
+	workloads: chosenWorkloads.refine((rows) => rows.length > 0, 'Choose at least one workload.'),
 	purpose,
 	dueOn: day
 });
@@ -72,7 +73,7 @@ export type CampaignEditTyped = z.input<typeof campaignEdit>;
 /** Rows and columns added to a plan under way. */
 export const campaignExtend = z.object({
 	profiles: profiles.default([]),
-	workloads: workloads.default([]),
+	workloads: chosenWorkloads.default([]),
 	version: versionSeen
 });
 export type CampaignExtend = z.output<typeof campaignExtend>;
@@ -93,6 +94,14 @@ export const campaignRepeats = z.object({
 });
 export type CampaignRepeats = z.output<typeof campaignRepeats>;
 
+/** What the figures of a column are read from; empty for the program itself. */
+export const campaignInstrument = z.object({
+	workload: reference('Choose a workload.'),
+	instrument: z.string().trim().max(80).default(''),
+	version: versionSeen
+});
+export type CampaignInstrument = z.output<typeof campaignInstrument>;
+
 export const campaignArchive = z.object({ archived: z.enum(['yes', 'no']), version: versionSeen });
 export type CampaignArchive = z.output<typeof campaignArchive>;
 
@@ -104,18 +113,33 @@ export const campaignsQuery = listing(['created', 'due', 'name'])
 	});
 export type CampaignsQuery = z.output<typeof campaignsQuery>;
 
-/** A plan to fill in: all profiles of the rig ticked, the workloads not, each with its own protocol's repeats. */
+/** What a plan begins with: another campaign's, or a suite's, whose profiles are null. */
+export interface PlanBeginning {
+	name: string;
+	purpose: string;
+	profiles: readonly string[] | null;
+	workloads: readonly { slug: string; repeats: number }[];
+}
+
+/**
+ * A plan to fill in: all profiles of the rig ticked and the workloads not, each with its own protocol's repeats;
+ * or ticked as what it begins with has them.
+ */
 export const blankCampaign = (
 	rig: string,
 	offered: readonly { slug: string }[],
-	workloads: readonly { repeats: number }[]
+	workloads: readonly { slug: string; repeats: number }[],
+	begin: PlanBeginning | null = null
 ): CampaignTyped => ({
-	name: '',
+	name: begin?.name ?? '',
 	slug: '',
 	rig,
-	profiles: offered.map((profile) => profile.slug),
-	workloads: workloads.map(({ repeats: own }) => ({ workload: '', repeats: String(own) })),
-	purpose: '',
+	profiles: offered.map(({ slug }) => slug).filter((slug) => begin?.profiles?.includes(slug) ?? true),
+	workloads: workloads.map(({ slug, repeats: own }) => {
+		const chosen = begin?.workloads.find((one) => one.slug === slug);
+		return { workload: chosen ? slug : '', repeats: String(chosen?.repeats ?? own) };
+	}),
+	purpose: begin?.purpose ?? '',
 	dueOn: ''
 });
 
@@ -152,4 +176,14 @@ export const cellQuery = z.object({
 export const historyQuery = z.object({
 	cell: z.string().trim().max(170).default(''),
 	page: z.coerce.number().int().min(1).max(100_000).default(1)
+});
+
+/** The last entry of the history that a watcher's page had; null for the newest. */
+export const watchQuery = z.object({
+	after: z
+		.string()
+		.regex(/^\d{1,15}$/)
+		.transform(Number)
+		.nullable()
+		.catch(null)
 });

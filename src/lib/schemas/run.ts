@@ -61,6 +61,11 @@ export const gridInput = z.object({
 	/** Local time in the publication's zone, as typed; it goes before `startedAt`. */
 	started: localTime,
 	notes,
+	/**
+	 * Counted readings of others in this cell that the sender had seen; readings that would take the cell beyond its
+	 * need over newer ones are held. Null sends them without asking.
+	 */
+	othersSeen: z.int().min(0).nullable().default(null),
 	/** Empty to bring only the circumstances up to date. */
 	readings: list(z.object({ key, value: finite }))
 });
@@ -118,3 +123,21 @@ export const cellUnsign = z.object({
 	reason
 });
 export type CellUnsign = z.output<typeof cellUnsign>;
+
+/** Chosen cells of the board, a line each as profile/workload: what its ticked boxes send. */
+const chosenCells = z
+	.string('Choose at least one cell.')
+	.transform((text) =>
+		[...new Set(text.split('\n'))].flatMap((row) => {
+			const [profile = '', workload = ''] = row.trim().split('/');
+			return profile === '' ? [] : [{ profile, workload }];
+		})
+	)
+	.refine((cells) => cells.length > 0, 'Choose at least one cell.')
+	.refine((cells) => cells.length <= 3600, 'Choose at most 3600 cells.');
+
+export const chosenSign = z.object({ cell: chosenCells });
+export type ChosenSign = z.output<typeof chosenSign>;
+
+export const chosenUnsign = z.object({ cell: chosenCells, reason });
+export type ChosenUnsign = z.output<typeof chosenUnsign>;

@@ -2,6 +2,7 @@ import { openMailer } from './jobs/mailer';
 import { startRunner, type Runner } from './jobs/runner';
 import { database } from './app';
 import { env } from './env';
+import { endWatches } from './live/campaign-hub';
 import { log } from './log';
 
 interface Life {
@@ -26,6 +27,8 @@ export function startWork(): void {
 	// The server script tells: first to take no more visitors, then, when the last is served, to close.
 	process.once('calipress:drain', () => {
 		life.draining = true;
+		// A watched board would keep its connection open for as long as it is looked at.
+		void endWatches();
 	});
 	process.once('calipress:close', (done: () => void) => {
 		void endWork().finally(done);

@@ -46,6 +46,7 @@ const typed = (more: Partial<GridInput> = {}): GridInput => ({
 	startedAt: null,
 	started: '',
 	notes: '',
+	othersSeen: null,
 	readings: [{ key: 'reading-0001', value: 4568.98 }],
 	...more
 });
@@ -67,6 +68,26 @@ describe('a run sent by a script', () => {
 		expect(refused).toMatchObject({ ok: false, reason: 'invalid' });
 		expect(refused.ok ? '' : refused.fields?.unit?.[0]).toContain('events/s');
 		expect(await stored()).toEqual([]);
+	});
+
+	it('in a unit that measures something else is refused with both kinds named', async () => {
+		const refused = await recordRun(ctx, campaign, sent({ unit: 'W' }));
+		expect(refused.ok ? '' : refused.message).toContain(
+			'W is a power, but prime-search is measured in events/s'
+		);
+	});
+
+	it('a thousand times off is stored, with a warning', async () => {
+		expect(valueOf(await recordRun(ctx, campaign, sent())).warnings).toEqual([]);
+		const off = valueOf(await recordRun(ctx, campaign, sent({ readings: [4701, 4_701_000] })));
+		expect(off.warnings).toEqual([expect.stringMatching(/^Reading 2: .*about 1000 times the others/)]);
+		expect(await stored()).toHaveLength(4);
+	});
+
+	it('into an empty cell is held against the baseline’s', async () => {
+		valueOf(await recordRun(ctx, campaign, sent()));
+		const off = valueOf(await recordRun(ctx, campaign, sent({ profile: 'huge-pages', readings: [4.7] })));
+		expect(off.warnings).toHaveLength(1);
 	});
 
 	it('is refused for names that the campaign does not have, with the nearest', async () => {

@@ -13,12 +13,14 @@ export interface RefusedForm {
 /**
  * Reads a small form of texts, such as a reason in a dialog, through its schema. `value` is absent when it is refused;
  * `refused` then goes back to the page.
+ * @param lists names of boxes of which several may be ticked: they come as lines of one text
  */
-export async function readPlainForm<S extends z.ZodType>(request: Request, schema: S) {
+export async function readPlainForm<S extends z.ZodType>(request: Request, schema: S, lists: string[] = []) {
 	const posted = await request.formData();
 	const typed = Object.fromEntries(
 		[...posted].flatMap(([name, value]) => (typeof value === 'string' ? [[name, value]] : []))
 	) as Record<string, string>;
+	for (const name of lists) typed[name] = posted.getAll(name).join('\n');
 	const checked = schema.safeParse(typed);
 	if (checked.success) return { typed, value: checked.data as z.output<S> };
 	const fields = errorsOf(checked.error);

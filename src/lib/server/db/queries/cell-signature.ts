@@ -8,6 +8,23 @@ export interface Cell {
 	workloadId: number;
 }
 
+/** Standing signatures of some cells, as they are now, locked until the transaction ends; other cells stay free. */
+export const standingOf = (db: Db, cells: readonly Cell[]) =>
+	db
+		.select({
+			id: cellSignature.id,
+			profileId: cellSignature.profileId,
+			workloadId: cellSignature.workloadId
+		})
+		.from(cellSignature)
+		.where(
+			inArray(
+				cellSignature.standing,
+				cells.map((cell) => `${cell.campaignId}/${cell.profileId}/${cell.workloadId}`)
+			)
+		)
+		.for('update');
+
 /** Standing signatures of a campaign, as they are now, locked until the transaction ends. */
 export const standing = (db: Db, campaignId: number) =>
 	db

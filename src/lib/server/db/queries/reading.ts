@@ -31,7 +31,7 @@ export const setExclusion = (
 /** The readings of one cell that count, in the order they were recorded: as they stand now, whatever was read before. */
 export const countedOfCell = (db: Db, cell: { campaignId: number; profileId: number; workloadId: number }) =>
 	db
-		.select({ id: reading.id, value: reading.value })
+		.select({ id: reading.id, value: reading.value, runId: reading.runId, createdAt: reading.createdAt })
 		.from(run)
 		.innerJoin(reading, and(eq(reading.runId, run.id), isNull(reading.excludedAt)))
 		.where(
@@ -53,3 +53,23 @@ export const countsOfCells = (db: Db, campaignId: number) =>
 		.innerJoin(reading, and(eq(reading.runId, run.id), isNull(reading.excludedAt)))
 		.where(and(eq(run.campaignId, campaignId), isNull(run.voidedAt)))
 		.groupBy(run.profileId, run.workloadId);
+
+/** The values of one cell that count, without a lock: what a new one is held against. */
+export const valuesOfCell = async (
+	db: Db,
+	cell: { campaignId: number; profileId: number; workloadId: number }
+): Promise<number[]> =>
+	(
+		await db
+			.select({ value: reading.value })
+			.from(run)
+			.innerJoin(reading, and(eq(reading.runId, run.id), isNull(reading.excludedAt)))
+			.where(
+				and(
+					eq(run.campaignId, cell.campaignId),
+					eq(run.profileId, cell.profileId),
+					eq(run.workloadId, cell.workloadId),
+					isNull(run.voidedAt)
+				)
+			)
+	).map((row) => row.value);

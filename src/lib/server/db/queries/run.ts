@@ -100,3 +100,14 @@ export async function update(
 		.where(and(eq(run.id, id), eq(run.version, version)));
 	return result.affectedRows === 1;
 }
+
+/** Who made some runs, by run. */
+export async function testersOf(db: Db, ids: number[]): Promise<Map<number, string>> {
+	if (ids.length === 0) return new Map();
+	const rows = await db
+		.select({ id: run.id, tester: user.name })
+		.from(run)
+		.innerJoin(user, eq(user.id, run.testerId))
+		.where(inArray(run.id, ids));
+	return new Map(rows.map((row) => [row.id, row.tester]));
+}

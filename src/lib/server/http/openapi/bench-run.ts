@@ -126,7 +126,10 @@ const recordedRun = z.object({
 		.object({ ...spread, flagged: z.array(z.number()), headline: z.number() })
 		.nullable()
 		.describe('The cell as it stands now, with all its runs.'),
-	signatureRemoved: z.boolean().describe('Whether the cell was signed off, which new readings undo.')
+	signatureRemoved: z.boolean().describe('Whether the cell was signed off, which new readings undo.'),
+	warnings: z
+		.array(z.string())
+		.describe('Readings a hundred times and more from those there were, stored all the same: look at their unit.')
 });
 
 /** Campaigns, runs and what they say. */

@@ -36,3 +36,17 @@ export function findCell(
 	if (!workload) fields.workload = [missing('workload', refs.workload, plan.workloads)];
 	return refuse('invalid', `${Object.values(fields).flat().join(' ')} Nothing was stored.`, { fields });
 }
+
+/** As findCell, of several; refused whole at the first that the plan does not have. */
+export function findCells(
+	plan: CampaignPlan,
+	refs: readonly { profile: string; workload: string }[]
+): Outcome<FoundCell[], 'invalid'> {
+	const cells: FoundCell[] = [];
+	for (const ref of refs) {
+		const found = findCell(plan, ref);
+		if (!found.ok) return found;
+		cells.push(found.value);
+	}
+	return done(cells);
+}

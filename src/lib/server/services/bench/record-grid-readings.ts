@@ -10,6 +10,7 @@ import * as runs from '../../db/queries/run';
 import * as settings from '../../db/queries/settings';
 import { findOpenCampaign } from './find-campaign';
 import { findCell } from './find-cell';
+import { holdOver } from './hold-over';
 import { lockCell } from './lock-cell';
 import { readStarted } from './read-started';
 import { storeReadings, storeRun } from './store-run';
@@ -55,7 +56,12 @@ async function amend(ctx: Context, cell: NamedCell, run: SittingRun, input: Grid
 	]);
 }
 
-async function record(ctx: Context, cell: NamedCell, input: GridInput): Promise<Outcome<GridAnswer>> {
+async function record(
+	ctx: Context,
+	cell: NamedCell,
+	needed: number,
+	input: GridInput
+): Promise<Outcome<GridAnswer>> {
 	const existing = await runs.lockByKey(ctx.db, ctx.actor.id, input.runKey);
 	if (existing && !isOf(existing, cell)) return refuse('invalid', theirs);
 	if (existing?.voidedAt) return refuse('conflict', voided);
@@ -70,6 +76,13 @@ async function record(ctx: Context, cell: NamedCell, input: GridInput): Promise<
 			'too_large',
 			`A run has at most ${readingsPerRun} readings. Nothing of this sending was stored; load the page again to begin a new run.`
 		);
+	const held = await holdOver(ctx, cell, {
+		run: existing?.id ?? null,
+		fresh: fresh.length,
+		needed,
+		othersSeen: input.othersSeen
+	});
+	if (held) return held;
 	if (existing) await amend(ctx, cell, existing, input);
 	const run =
 		existing?.id ??
@@ -95,7 +108,8 @@ async function record(ctx: Context, cell: NamedCell, input: GridInput): Promise<
 
 /**
  * Takes readings from the entry grid. The run and each reading carry the client's own keys, so that whatever is sent
- * again, after a lost answer or from a second tab, is stored once.
+ * again, after a lost answer or from a second tab, is stored once. What would go over another tester's readings that
+ * the sender had not seen is held.
  */
 export async function recordGridReadings(
 	ctx: Context,
@@ -118,6 +132,6 @@ export async function recordGridReadings(
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
 		const cell = await lockCell(tx, found.value, at.value);
-		return cell.ok ? record(tx, cell.value, whole) : cell;
+		return cell.ok ? record(tx, cell.value, at.value.workload.needed, whole) : cell;
 	});
 }

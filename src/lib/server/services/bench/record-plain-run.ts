@@ -40,6 +40,8 @@ export async function recordPlainRun(
 		notes: input.notes,
 		started: input.started,
 		startedAt: null,
+		// Without scripts nothing can be held and asked about: it is stored, and shows.
+		othersSeen: null,
 		ambientC: ambientC.value,
 		readings: list.value.map((value, at) => ({ key: `${input.runKey}-${at}`, value }))
 	});

@@ -7,6 +7,7 @@ import type { RunInput } from '../../../schemas/run';
 import type { Context } from '../../context';
 import { inTransaction } from '../../db/client';
 import * as readings from '../../db/queries/reading';
+import { doubtReadings } from './doubt-readings';
 import { findOpenCampaign } from './find-campaign';
 import { findCell } from './find-cell';
 import { lockCell } from './lock-cell';
@@ -22,6 +23,8 @@ export interface RecordedRun {
 	/** The cell as it stands now, with all its runs. */
 	summary: Summary | null;
 	signatureRemoved: boolean;
+	/** Readings that stand so far from the others that a unit may be wrong; they are stored all the same. */
+	warnings: string[];
 }
 
 /** Records one run of a cell as a script sends it. */
@@ -40,6 +43,7 @@ export async function recordRun(
 	const fault = unitFault(input.unit, workload);
 	if (fault) return refuse('invalid', `${fault} Nothing was stored.`, { fields: { unit: [fault] } });
 
+	const warnings = await doubtReadings(ctx, plan, at.value, input.readings);
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
 		const locked = await lockCell(tx, plan, at.value);
@@ -68,7 +72,8 @@ export async function recordRun(
 				counted.map((row) => row.value),
 				workload.headline
 			),
-			signatureRemoved
+			signatureRemoved,
+			warnings
 		});
 	});
 }

@@ -1,6 +1,6 @@
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
-import type { CellSign } from '../../../schemas/run';
+import type { CellSign, ChosenSign } from '../../../schemas/run';
 import type { Context } from '../../context';
 import { inTransaction } from '../../db/client';
 import * as audit from '../../db/queries/audit';
@@ -9,7 +9,7 @@ import * as plans from '../../db/queries/campaign-plan';
 import * as signatures from '../../db/queries/cell-signature';
 import * as readings from '../../db/queries/reading';
 import { findOpenCampaign } from './find-campaign';
-import { cellName, findCell, type FoundCell } from './find-cell';
+import { cellName, findCell, findCells, type FoundCell } from './find-cell';
 
 export interface MissingCell {
 	profile: string;
@@ -58,11 +58,14 @@ async function sort(ctx: Context, campaignId: number, cells: FoundCell[]) {
 function nothingToSign(missing: MissingCell[], cells: number) {
 	const [first] = missing;
 	if (!first)
-		return refuse('conflict', cells === 1 ? 'This cell is signed already.' : 'Every cell is signed already.');
+		return refuse(
+			'conflict',
+			cells === 1 ? 'This cell is signed already.' : 'Every one of these cells is signed already.'
+		);
 	const words =
 		cells === 1
 			? `This cell has ${first.taken} of ${first.needed} readings. Nothing was signed; take the other ${first.needed - first.taken} first.`
-			: `None of the unsigned cells is complete yet. Nothing was signed.`;
+			: 'None of the unsigned cells is complete yet. Nothing was signed.';
 	return refuse('invalid', words, { detail: { missing } });
 }
 
@@ -95,17 +98,16 @@ async function sign(ctx: Context, plan: CampaignPlan, cells: FoundCell[]): Promi
 	return done({ signed: ready.map(cellName), missing });
 }
 
-/** Signs a cell off, or with none named every complete cell of the campaign; says which cells want readings. */
-export async function signCells(
+async function signFound(
 	ctx: Context,
 	campaignRef: string,
-	input: CellSign
+	choose: (plan: CampaignPlan) => Outcome<FoundCell[], 'invalid'>
 ): Promise<Outcome<Signed>> {
 	if (!may(ctx.actor, 'cell.sign')) return refuse('forbidden', 'Only a tester signs data off.');
 	const found = await findOpenCampaign(ctx, campaignRef);
 	if (!found.ok) return found;
 	const plan = found.value;
-	const cells = wanted(plan, input);
+	const cells = choose(plan);
 	if (!cells.ok) return cells;
 	return inTransaction(ctx.db, async (db) => {
 		await plans.lockCells(
@@ -117,3 +119,11 @@ export async function signCells(
 		return sign({ ...ctx, db }, plan, cells.value);
 	});
 }
+
+/** Signs a cell off, or with none named every complete cell of the campaign; says which cells want readings. */
+export const signCells = (ctx: Context, campaignRef: string, input: CellSign) =>
+	signFound(ctx, campaignRef, (plan) => wanted(plan, input));
+
+/** Signs the complete ones of chosen cells off; says which of them want readings. */
+export const signChosenCells = (ctx: Context, campaignRef: string, input: ChosenSign) =>
+	signFound(ctx, campaignRef, (plan) => findCells(plan, input.cell));

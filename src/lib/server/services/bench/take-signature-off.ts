@@ -16,9 +16,8 @@ export async function takeSignaturesOff(
 	cells: readonly NamedCell[],
 	reason: string
 ): Promise<number> {
-	const [first] = cells;
-	if (!first) return 0;
-	const standing = await signatures.standing(ctx.db, first.campaignId);
+	if (cells.length === 0) return 0;
+	const standing = await signatures.standingOf(ctx.db, cells);
 	const signed = standing.flatMap((row) => {
 		const cell = cells.find((one) => one.profileId === row.profileId && one.workloadId === row.workloadId);
 		return cell ? [{ id: row.id, cell }] : [];

@@ -3,10 +3,12 @@
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { measureCoverage } from './parts/bench/coverage.mjs';
 import { lineOf } from './parts/bench/figure.mjs';
 import { measureJobs } from './parts/bench/jobs.mjs';
 import { measurePages } from './parts/bench/pages.mjs';
 import { measureStatistics } from './parts/bench/statistics.mjs';
+import { measureTable } from './parts/bench/table.mjs';
 import { ensureBuild } from './parts/build.mjs';
 import { startMaildev } from './parts/maildev.mjs';
 import { startMariadb } from './parts/mariadb.mjs';
@@ -32,6 +34,8 @@ const server = await startMariadb({ folder: join(folder, 'mariadb') });
 const mail = await startMaildev({ folder: join(folder, 'mail') });
 try {
 	await measureStatistics(print);
+	await measureTable(print);
+	await measureCoverage(print);
 	await measurePages(server, mail, folder, print);
 	await measureJobs(server, mail, folder, print);
 } finally {

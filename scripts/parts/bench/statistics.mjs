@@ -1,8 +1,8 @@
 // All figures of 10,000 cells with ten readings each, as the campaign's page asks for them. The control is the
 // statistics library alone, asked for mean, median and sample deviation of the same readings.
 import { mean, median, sampleStandardDeviation } from 'simple-statistics';
-import { createServer } from 'vite';
 import { scatter, upTo } from '../fill/insert.mjs';
+import { withDomain } from './domain.mjs';
 
 const campaigns = 200;
 const profiles = 5;
@@ -61,15 +61,9 @@ function campaignOf(c) {
 }
 
 /** @param {(figure: import('./figure.mjs').Figure) => void} print */
-export async function measureStatistics(print) {
-	const vite = await createServer({
-		server: { middlewareMode: true, hmr: false, ws: false },
-		appType: 'custom',
-		logLevel: 'error',
-		optimizeDeps: { noDiscovery: true, include: [] }
-	});
-	try {
-		const { summariseCampaign } = await vite.ssrLoadModule('/src/lib/domain/bench/campaign.ts');
+export const measureStatistics = (print) =>
+	withDomain(async (load) => {
+		const { summariseCampaign } = await load('campaign.ts');
 		const all = upTo(campaigns).map(campaignOf);
 		const value = leastMs(() => all.forEach((campaign) => summariseCampaign(campaign)));
 		let sink = 0;
@@ -89,7 +83,4 @@ export async function measureStatistics(print) {
 			goal: '<20',
 			met: perCampaign < 20
 		});
-	} finally {
-		await vite.close();
-	}
-}
+	});

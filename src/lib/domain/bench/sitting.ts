@@ -3,11 +3,27 @@ export interface TypedReading {
 	/** Made by the browser and sent along, so that sending it twice stores it once. */
 	key: string;
 	value: number;
-	/** waiting: to be sent; stored: the server said so; refused: the server would not have it, and why. */
-	state: 'waiting' | 'stored' | 'refused';
+	/**
+	 * waiting: to be sent; stored: the server said so; refused: the server would not have it, and why; held: another
+	 * tester's readings came in between, and its writer decides.
+	 */
+	state: 'waiting' | 'stored' | 'refused' | 'held';
 	message?: string;
 	/** The row it became. */
 	id?: number;
+	/** Others' readings of the cell that stood on the screen when it was typed; absent where nobody asks. */
+	seen?: number;
+	/** Whether it went out once: the server may have it, though it did not say so. */
+	sent?: boolean;
+}
+
+/** What stands against held readings: the others' that their writer had not seen. */
+export interface HeldOver {
+	kind: 'over';
+	needed: number;
+	/** Counted readings of others now: sent back as seen, it says that both are to be kept. */
+	othersSeen: number;
+	theirs: { id: number; value: number; by: string; at: string }[];
 }
 
 /** What was typed into one cell since the page was opened: one run in the making. Plain data, kept in the browser. */
@@ -29,6 +45,8 @@ export interface Sitting {
 	readings: TypedReading[];
 	/** Texts in the cells that are not readings yet. */
 	drafts: { id: string; text: string }[];
+	/** Set while readings of it are held. */
+	held?: HeldOver | null;
 }
 
 export const newSitting = (
@@ -57,7 +75,7 @@ export const isOpen = (sitting: Sitting): boolean =>
 /** Whether it is worth keeping over a reload. */
 export const isWorthKeeping = (sitting: Sitting): boolean =>
 	isOpen(sitting) ||
-	sitting.readings.some((reading) => reading.state === 'refused') ||
+	sitting.readings.some((reading) => reading.state === 'refused' || reading.state === 'held') ||
 	sitting.drafts.some((draft) => draft.text.trim() !== '');
 
 /** The readings after the server said which of them it has. */
@@ -84,6 +102,25 @@ export function withRefused(
 			: reading
 	);
 }
+
+/** Others' readings that the writer of all waiting ones had seen; null where one of them asks nothing. */
+export function othersSeenOf(sitting: Sitting): number | null {
+	const seen = waitingOf(sitting).map((reading) => reading.seen);
+	const told = seen.flatMap((count) => count ?? []);
+	return told.length === 0 || told.length < seen.length ? null : Math.min(...told);
+}
+
+/** The readings after the server held those sent. */
+export const withHeld = (readings: readonly TypedReading[], sent: readonly string[]): TypedReading[] =>
+	readings.map((reading) =>
+		sent.includes(reading.key) && reading.state === 'waiting' ? { ...reading, state: 'held' } : reading
+	);
+
+/** The held readings made ready to be sent again, their writer having seen the others'. */
+export const withBothKept = (readings: readonly TypedReading[], othersSeen: number): TypedReading[] =>
+	readings.map((reading) =>
+		reading.state === 'held' ? { ...reading, state: 'waiting', seen: othersSeen } : reading
+	);
 
 const isText = (value: unknown): value is string => typeof value === 'string';
 

@@ -1,17 +1,9 @@
+import type { HeldOver } from '../../../domain/bench/sitting';
 import { refuse, type Refusal } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as readings from '../../db/queries/reading';
 import * as runs from '../../db/queries/run';
 import type { NamedCell } from './take-signature-off';
-
-/** What stands against a held sending: the others' readings that the sender had not seen. */
-export interface HeldOver {
-	kind: 'over';
-	needed: number;
-	/** Counted readings of others now: sent back as seen, it says that both are to be kept. */
-	othersSeen: number;
-	theirs: { id: number; value: number; by: string; at: string }[];
-}
 
 interface Sending {
 	/** Run of the sender's own sitting; null before its first reading. */

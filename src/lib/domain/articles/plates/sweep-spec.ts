@@ -1,5 +1,6 @@
-import { sweepReport, type SweepFacts, type SweepPoint } from '../../bench/stability/sweep-facts';
+import { sweepReport, type SweepFacts } from '../../bench/stability/sweep-facts';
 import type { SwitchPoint } from '../../bench/stability/switch-point';
+import type { SweepPoint } from '../../bench/stability/thread-sweep';
 import { halfWidthOf, printed, printedRange, printedWithUnit, withUnit } from '../../shared/quantity';
 import { printedDates } from '../dates';
 import type { PlateBase } from './plate-base';

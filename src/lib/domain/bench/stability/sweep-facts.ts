@@ -1,11 +1,6 @@
 import { type SwitchPoint, switchPoint } from './switch-point';
 import { switchWords } from './switch-words';
-
-export interface SweepPoint {
-	threads: number;
-	currentA: number;
-	clockMHz: number;
-}
+import type { SweepPoint } from './thread-sweep';
 
 export interface SweepPass {
 	number: number;

@@ -1,0 +1,26 @@
+import { ladderInput, laddersApiQuery } from '$lib/schemas/ladder';
+import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { guardedApi } from '$lib/server/http/guarded';
+import { page } from '$lib/server/http/paging';
+import { problemFrom } from '$lib/server/http/problem';
+import { createLadder } from '$lib/server/services/stability/create-ladder';
+import { listLaddersForApi, ladderForApi } from '$lib/server/services/stability/ladder-for-api';
+import type { RequestEvent } from './$types';
+
+export const GET = guardedApi('bench.read', async (event: RequestEvent, ctx) => {
+	const query = readQuery(event.url, laddersApiQuery);
+	if (!query.ok) return query.response;
+	const listed = await listLaddersForApi(ctx, query.value);
+	return listed.ok
+		? page(event.url, listed.value, { limit: query.value.limit }, (row) => row.id)
+		: problemFrom(listed);
+});
+
+export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) => {
+	const body = await readJson(event, ladderInput);
+	if (!body.ok) return body.response;
+	return idempotent(event, ctx, async (tx) => {
+		const created = await createLadder(tx, body.value);
+		return created.ok ? answer(await ladderForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+	});
+});

@@ -22,6 +22,8 @@ export interface World {
 	loans: Map<string, number>;
 	/** Numbers of comments, by the demo's own name for them. */
 	comments: Map<string, number>;
+	/** Numbers of attempts, by the slug of their ladder. */
+	attempts: Map<string, number>;
 }
 
 /** A number an earlier act left behind. */

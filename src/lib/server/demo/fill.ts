@@ -16,6 +16,8 @@ import { rigN12 } from './profiles/rig-n-12';
 import { treeActs } from './profiles/tree';
 import { rigActs } from './rigs';
 import { samples } from './samples';
+import { ladderActs } from './stability/ladder';
+import { sweepActs } from './stability/sweep';
 import { insertStaff } from './staff';
 import { workloads } from './workloads';
 
@@ -32,6 +34,8 @@ const story = (world: World) => [
 	...workloads(world),
 	...rigActs(world),
 	...[rigN12, rigM4, rigG2].flatMap((tree) => treeActs(world, tree)),
+	...sweepActs(world),
+	...ladderActs(world),
 	...campaigns(world),
 	...printedArticles(world),
 	...articlesInHand(world)
@@ -40,7 +44,13 @@ const story = (world: World) => [
 /** Fills within one transaction; false where another fill was there first. */
 async function fill(tx: Transaction, now: Date, origin: string): Promise<boolean> {
 	const calendar = calendarAround(now);
-	const world: World = { calendar, runs: new Map(), loans: new Map(), comments: new Map() };
+	const world: World = {
+		calendar,
+		runs: new Map(),
+		loans: new Map(),
+		comments: new Map(),
+		attempts: new Map()
+	};
 	const staff = await insertStaff(tx, calendar.at(-70, '09:00'));
 	if (!staff) return false;
 	await tx.insert(setting).values({ key: 'publication', isDemo: true, value: publication });

@@ -1,5 +1,7 @@
 import { z } from 'zod';
 import { campaignStates } from '../domain/bench/campaign-state';
+import { cellStates } from '../domain/bench/board-filter';
+import { workloadClasses } from '../domain/bench/words';
 import { line, number, optionalSlug, paragraphs, reference, versionSeen } from './fields';
 import { listing } from './listing';
 
@@ -166,11 +168,22 @@ export const summaryQuery = z.object({
 		.describe('Slug or id of the profile the others are held against; stock when left out.')
 });
 
-/** Which cell of a board an address selects. */
-export const cellQuery = z.object({
+/** Which cell of a board an address selects, which cells it shows, and whether several are being chosen. */
+export const boardQuery = z.object({
 	profile: z.string().trim().max(80).catch('').default(''),
-	workload: z.string().trim().max(80).catch('').default('')
+	workload: z.string().trim().max(80).catch('').default(''),
+	show: z
+		.enum(['', ...cellStates])
+		.catch('')
+		.default(''),
+	row: z.string().trim().max(80).catch('').default(''),
+	class: z
+		.enum(['', ...workloadClasses])
+		.catch('')
+		.default(''),
+	choose: z.enum(['', '1']).catch('').default('')
 });
+export type BoardQuery = z.output<typeof boardQuery>;
 
 /** A page of a campaign's history, of one cell (profile/workload) or of all. */
 export const historyQuery = z.object({

@@ -3,6 +3,8 @@ import { line, optionalSlug, paragraphs, reference, versionSeen } from './fields
 import { apiListing, listing } from './listing';
 
 const name = line(160).min(1, 'A rig needs a name.');
+/** By which the meanings of its settings are looked up; empty where its firmware is of no family of the list. */
+const firmwareFamily = line(80).default('');
 
 const revisionFields = {
 	/** Slugs or ids, in the order the parts list prints them. */
@@ -17,7 +19,7 @@ const revisionFields = {
 };
 
 /** A rig with its first revision. Its profile tree starts with stock. */
-export const rigInput = z.object({ name, slug: optionalSlug, ...revisionFields });
+export const rigInput = z.object({ name, slug: optionalSlug, firmwareFamily, ...revisionFields });
 export type RigInput = z.output<typeof rigInput>;
 export type RigTyped = z.input<typeof rigInput>;
 
@@ -31,13 +33,14 @@ export type RigRevise = z.output<typeof rigRevise>;
 export type RigReviseTyped = z.input<typeof rigRevise>;
 
 /** A correction of the newest revision while nothing was measured on it. */
-export const rigCorrect = z.object({ version: versionSeen, name, ...revisionFields });
+export const rigCorrect = z.object({ version: versionSeen, name, firmwareFamily, ...revisionFields });
 export type RigCorrect = z.output<typeof rigCorrect>;
 export type RigCorrectTyped = z.input<typeof rigCorrect>;
 
 export const blankRig = (): RigTyped => ({
 	name: '',
 	slug: '',
+	firmwareFamily: '',
 	samples: [],
 	firmware: '',
 	driver: '',

@@ -5,6 +5,7 @@ export const actWords: Record<string, string> = {
 	'campaign.extend': 'added to the plan',
 	'campaign.trim': 'removed from the plan',
 	'campaign.repeats': 'changed the readings needed',
+	'campaign.instrument': 'named what a column is read from',
 	'campaign.archive': 'archived it, or took it out again',
 	'run.record': 'recorded readings',
 	'run.import': 'imported readings',

@@ -36,6 +36,7 @@ const columns = {
 	id: rig.id,
 	slug: rig.slug,
 	name: rig.name,
+	firmwareFamily: rig.firmwareFamily,
 	createdAt: rig.createdAt,
 	version: rig.version,
 	revisionId: rigRevision.id,

@@ -25,14 +25,14 @@ const same = (a: Revision, b: Revision) =>
 	a.sampleIds.length === b.sampleIds.length &&
 	a.sampleIds.every((id) => b.sampleIds.includes(id));
 
-/** Renames a rig, and mends its newest revision as long as nothing was measured on it; afterwards only a new revision can differ. */
+/** Renames a rig or names its firmware family, and mends its newest revision as long as nothing was measured on it; afterwards only a new revision can differ. */
 export async function correctRig(
 	ctx: Context,
 	ref: string,
 	input: RigCorrect
 ): Promise<Outcome<{ slug: string }, 'forbidden' | 'not_found' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'bench.plan')) return refuse('forbidden', 'Only testers change rigs.');
-	const { version, name, firmware, driver, os } = input;
+	const { version, name, firmwareFamily, firmware, driver, os } = input;
 	return inTransaction(ctx.db, async (tx) => {
 		const [rig] = await rigs.byRefs(tx, [ref]);
 		if (!rig) return refuse('not_found', `There is no rig “${ref}” on the bench.`);
@@ -47,7 +47,8 @@ export async function correctRig(
 				'conflict',
 				`Nothing was saved: runs were measured on revision ${rig.revision}, so it stays as it is. Revise the rig to write down what is different now.`
 			);
-		if (!(await rigs.update(tx, rig.id, version, { name }))) return changedMeanwhile('rig', rig.version);
+		if (!(await rigs.update(tx, rig.id, version, { name, firmwareFamily })))
+			return changedMeanwhile('rig', rig.version);
 		if (mends) await revisions.correct(tx, rig.revisionId, { firmware, driver, os }, units.value);
 		await audit.append(tx, [
 			{
@@ -56,8 +57,8 @@ export async function correctRig(
 				act: 'rig.correct',
 				subjectKind: 'rig',
 				subjectId: rig.id,
-				before: { name: rig.name, ...before },
-				after: { name, ...after }
+				before: { name: rig.name, firmwareFamily: rig.firmwareFamily, ...before },
+				after: { name, firmwareFamily, ...after }
 			}
 		]);
 		return done({ slug: rig.slug });

@@ -19,13 +19,13 @@ export async function createRig(
 	if (!may(ctx.actor, 'bench.plan')) return refuse('forbidden', 'Only testers put rigs together.');
 	const slug = input.slug || slugOf(input.name);
 	if (slug === '' || isReserved(slug)) return slugMissing();
-	const { name, firmware, driver, os } = input;
+	const { name, firmwareFamily, firmware, driver, os } = input;
 	const by = { createdBy: ctx.actor.id, createdAt: ctx.now };
 	try {
 		return await inTransaction(ctx.db, async (tx) => {
 			const units = await sampleIdsOf(tx, input.samples);
 			if (!units.ok) return units;
-			const id = await rigs.insert(tx, { slug, name, createdAt: ctx.now });
+			const id = await rigs.insert(tx, { slug, name, firmwareFamily, createdAt: ctx.now });
 			const first = { rigId: id, number: 1, firmware, driver, os, change: 'First put together.', ...by };
 			await revisions.insert(tx, first, units.value);
 			const stock = { rigId: id, slug: 'stock', name: 'Stock', notes: '', createdAt: ctx.now };

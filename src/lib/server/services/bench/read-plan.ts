@@ -3,6 +3,7 @@ import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import type { CampaignHead } from '../../db/queries/campaign-facts';
+import * as instruments from '../../db/queries/instrument';
 import * as plans from '../../db/queries/campaign-plan';
 import * as settings from '../../db/queries/settings';
 import { findCampaign } from './find-campaign';
@@ -17,7 +18,12 @@ export interface PlanRow {
 export interface ReadPlan {
 	head: CampaignHead;
 	profiles: PlanRow[];
-	workloads: (PlanRow & { unit: string; needed: number })[];
+	/** With the slug of the instrument its figures are read from; empty for the program itself. */
+	workloads: (PlanRow & { unit: string; needed: number; instrument: string })[];
+	/** To name: those in use, and those that a column names already. */
+	instruments: Awaited<ReturnType<typeof instruments.all>>;
+	/** ISO day in the publication's zone, by which a calibration is overdue. */
+	today: string;
 	/** What could be added. */
 	moreProfiles: Awaited<ReturnType<typeof plans.profileChoices>>;
 	moreWorkloads: Awaited<ReturnType<typeof plans.workloadChoices>>;
@@ -31,10 +37,12 @@ export async function readPlan(ctx: Context, campaignRef: string): Promise<Outco
 	const found = await findCampaign(ctx, campaignRef);
 	if (!found.ok) return found;
 	const { head, profiles, workloads } = found.value;
-	const [counts, offeredProfiles, offeredWorkloads, { zone }] = await Promise.all([
+	const [counts, offeredProfiles, offeredWorkloads, named, all, { zone }] = await Promise.all([
 		plans.runCounts(ctx.db, head.id),
 		plans.profileChoices(ctx.db, head.rigId),
 		plans.workloadChoices(ctx.db),
+		instruments.ofCampaign(ctx.db, head.id),
+		instruments.all(ctx.db),
 		settings.publication(ctx.db)
 	]);
 	const runsOf = (of: (row: (typeof counts)[number]) => boolean) =>
@@ -51,8 +59,11 @@ export async function readPlan(ctx: Context, campaignRef: string): Promise<Outco
 			name,
 			unit,
 			needed,
+			instrument: named.find((one) => one.workloadId === id)?.slug ?? '',
 			runs: runsOf((row) => row.workloadId === id)
 		})),
+		instruments: all.filter((one) => !one.retiredAt || named.some((use) => use.slug === one.slug)),
+		today: DateTime.fromJSDate(ctx.now).setZone(zone).toISODate() ?? '',
 		moreProfiles: offeredProfiles.filter((row) => !profiles.some((one) => one.id === row.id)),
 		moreWorkloads: offeredWorkloads.filter((row) => !workloads.some((one) => one.id === row.id)),
 		dueOn: head.dueAt ? (DateTime.fromJSDate(head.dueAt).setZone(zone).toISODate() ?? '') : ''

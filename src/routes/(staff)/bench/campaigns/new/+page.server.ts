@@ -8,10 +8,12 @@ import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 /** First the rig, then its profiles and the workloads: two steps, so that it works without scripts. */
 export const load = guarded('bench.plan', async ({ url }: PageServerLoadEvent, ctx) => {
-	const rig = url.searchParams.get('rig') ?? '';
-	const offer = valueOrError(await offerPlan(ctx, rig));
+	const asked = (name: string) => url.searchParams.get(name)?.slice(0, 80) ?? '';
+	const offer = valueOrError(
+		await offerPlan(ctx, { rig: asked('rig'), from: asked('from'), suite: asked('suite') })
+	);
 	const chosen = offer.rig?.slug ?? '';
-	const blank = blankCampaign(chosen, offer.profiles, offer.workloads);
+	const blank = blankCampaign(chosen, offer.profiles, offer.workloads, offer.begin);
 	return { title: 'Plan a campaign', offer, form: await blankForm(campaignInput, blank) };
 });
 

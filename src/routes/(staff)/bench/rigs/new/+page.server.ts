@@ -3,12 +3,14 @@ import { blankRig, rigInput } from '$lib/schemas/rig';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { blankForm, readForm, refusedForm, refuseForm } from '$lib/server/http/read-form';
 import { chooseSamples } from '$lib/server/services/bench-plan/choose-samples';
+import { offerFamilies } from '$lib/server/services/bench-plan/offer-families';
 import { createRig } from '$lib/server/services/bench-plan/create-rig';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 export const load = guarded('bench.plan', async (_event: PageServerLoadEvent, ctx) => ({
 	title: 'New rig',
 	samples: valueOrError(await chooseSamples(ctx)),
+	families: valueOrError(await offerFamilies(ctx)),
 	form: await blankForm(rigInput, blankRig())
 }));
 

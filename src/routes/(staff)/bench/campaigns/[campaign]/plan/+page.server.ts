@@ -4,6 +4,7 @@ import {
 	campaignArchive,
 	campaignEdit,
 	campaignExtend,
+	campaignInstrument,
 	campaignRepeats,
 	campaignTrim
 } from '$lib/schemas/campaign';
@@ -13,6 +14,7 @@ import { readPlainForm } from '$lib/server/http/read-plain-form';
 import { statusOf } from '$lib/server/http/problem';
 import { archiveCampaign, editCampaign } from '$lib/server/services/bench/edit-campaign';
 import { extendCampaign, setRepeats, trimCampaign } from '$lib/server/services/bench/extend-campaign';
+import { nameInstrument } from '$lib/server/services/bench/name-instrument';
 import { readPlan } from '$lib/server/services/bench/read-plan';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
@@ -60,6 +62,11 @@ export const actions = {
 		const { value, refused } = await readPlainForm(request, campaignRepeats);
 		if (!value) return fail(422, { refused: refused?.data.refused.message ?? '' });
 		return answer(await setRepeats(ctx, params.campaign, value));
+	}),
+	instrument: guarded('bench.plan', async ({ request, params }: RequestEvent, ctx) => {
+		const { value, refused } = await readPlainForm(request, campaignInstrument);
+		if (!value) return fail(422, { refused: refused?.data.refused.message ?? '' });
+		return answer(await nameInstrument(ctx, params.campaign, value));
 	}),
 	archive: guarded('bench.plan', async ({ request, params }: RequestEvent, ctx) => {
 		const { value, refused } = await readPlainForm(request, campaignArchive);

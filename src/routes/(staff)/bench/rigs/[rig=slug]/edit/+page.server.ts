@@ -3,21 +3,27 @@ import { rigCorrect } from '$lib/schemas/rig';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { blankForm, readForm, refusedForm, refuseForm } from '$lib/server/http/read-form';
 import { chooseSamples } from '$lib/server/services/bench-plan/choose-samples';
+import { offerFamilies } from '$lib/server/services/bench-plan/offer-families';
 import { correctRig } from '$lib/server/services/bench-plan/correct-rig';
 import { showRig } from '$lib/server/services/bench-plan/show-rig';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 export const load = guarded('bench.plan', async ({ params }: PageServerLoadEvent, ctx) => {
-	const [shown, offered] = await Promise.all([showRig(ctx, params.rig), chooseSamples(ctx)]);
+	const [shown, offered, families] = await Promise.all([
+		showRig(ctx, params.rig),
+		chooseSamples(ctx),
+		offerFamilies(ctx)
+	]);
 	const { rig, revisions } = valueOrError(shown);
-	const { version, name, firmware, driver, os } = rig;
+	const { version, name, firmwareFamily, firmware, driver, os } = rig;
 	const samples = (revisions[0]?.samples ?? []).map((sample) => sample.slug);
 	return {
 		title: `Change ${name}`,
 		rig: { slug: rig.slug, name, revision: rig.revision },
 		measured: revisions[0]?.measured ?? false,
 		samples: valueOrError(offered),
-		form: await blankForm(rigCorrect, { version, name, samples, firmware, driver, os })
+		families: valueOrError(families),
+		form: await blankForm(rigCorrect, { version, name, firmwareFamily, samples, firmware, driver, os })
 	};
 });
 

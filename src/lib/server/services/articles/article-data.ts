@@ -14,7 +14,10 @@ import type { Context } from '../../context';
 import * as facts from '../../db/queries/campaign-facts';
 import * as recorded from '../../db/queries/campaign-readings';
 import * as duties from '../../db/queries/sample-duties';
+import * as ladders from '../../db/queries/ladder';
 import { publication } from '../../db/queries/settings';
+import * as stability from '../../db/queries/stability-facts';
+import * as sweeps from '../../db/queries/sweep';
 
 function kitOf(rows: facts.KitRow[]): KitLine[] {
 	return rows.map(({ part, maker, model, kind, sample, provenance, price }) => ({
@@ -97,6 +100,21 @@ function dutyOf({
 	};
 }
 
+/** What was climbed and swept on the rigs of the campaigns, without what was put away. */
+async function stabilityOf(db: Context['db'], rigIds: number[]) {
+	const [climbed, swept] = await Promise.all([ladders.ofRigs(db, rigIds), sweeps.ofRigs(db, rigIds)]);
+	const standing = <T extends { archivedAt: Date | null }>(rows: T[]) =>
+		rows.filter((row) => row.archivedAt === null);
+	const [allLadders, allSweeps] = await Promise.all([
+		stability.ofLadders(db, standing(climbed)),
+		stability.ofSweeps(db, standing(swept))
+	]);
+	return {
+		ladders: allLadders.map(({ facts: ladder }) => ladder),
+		sweeps: allSweeps.map(({ facts: sweep }) => sweep)
+	};
+}
+
 /**
  * Everything an article's directives may name, of the campaigns it is bound to, in the order given. The number
  * of queries does not depend on how much was measured. The service that asks has checked that its actor may.
@@ -111,13 +129,18 @@ export async function articleData(
 		publication(db)
 	]);
 	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
-	const rows = await duties.ofRigRevisions(db, revisions, now);
+	const rigIds = [...new Set(plans.map(({ head }) => head.rigId))];
+	const [rows, climbedAndSwept] = await Promise.all([
+		duties.ofRigRevisions(db, revisions, now),
+		stabilityOf(db, rigIds)
+	]);
 	const ordered = campaignIds.flatMap((id) => plans.find(({ head }) => head.id === id) ?? []);
 	return {
 		campaigns: ordered.map((plan) =>
 			campaignOf(plan, readings.get(plan.head.id) ?? { runs: [], signatures: [] })
 		),
 		duties: rows.map(dutyOf),
+		...climbedAndSwept,
 		zone
 	};
 }

@@ -6,6 +6,7 @@ import type { LaddersQuery } from '../../../schemas/ladder';
 import { paged, pageSize, type Paged } from '../../../schemas/listing';
 import type { Context } from '../../context';
 import * as ladders from '../../db/queries/ladder';
+import * as settings from '../../db/queries/settings';
 import * as facts from '../../db/queries/stability-facts';
 
 export interface LadderListRow extends Pick<
@@ -37,12 +38,15 @@ async function rowsOf(ctx: Context, rows: ladders.LadderRow[]): Promise<LadderLi
 export async function listLadders(
 	ctx: Context,
 	query: LaddersQuery
-): Promise<Outcome<{ list: Paged<LadderListRow>; rigs: { slug: string; name: string }[] }, 'forbidden'>> {
+): Promise<
+	Outcome<{ list: Paged<LadderListRow>; rigs: { slug: string; name: string }[]; zone: string }, 'forbidden'>
+> {
 	if (!may(ctx.actor, 'bench.read')) return refuse('forbidden', 'Your roles do not include the bench.');
-	const [rows, total, rigs] = await Promise.all([
+	const [rows, total, rigs, { zone }] = await Promise.all([
 		ladders.list(ctx.db, { ...query, limit: pageSize, offset: (query.page - 1) * pageSize }),
 		ladders.total(ctx.db, query),
-		ladders.rigsUsed(ctx.db)
+		ladders.rigsUsed(ctx.db),
+		settings.publication(ctx.db)
 	]);
-	return done({ list: paged(await rowsOf(ctx, rows), total, query.page), rigs });
+	return done({ list: paged(await rowsOf(ctx, rows), total, query.page), rigs, zone });
 }

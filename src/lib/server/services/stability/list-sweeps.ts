@@ -5,6 +5,7 @@ import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { paged, pageSize, type Paged } from '../../../schemas/listing';
 import type { SweepsQuery } from '../../../schemas/sweep';
 import type { Context } from '../../context';
+import * as settings from '../../db/queries/settings';
 import * as facts from '../../db/queries/stability-facts';
 import * as sweeps from '../../db/queries/sweep';
 
@@ -41,12 +42,15 @@ async function rowsOf(ctx: Context, rows: sweeps.SweepRow[]): Promise<SweepListR
 export async function listSweeps(
 	ctx: Context,
 	query: SweepsQuery
-): Promise<Outcome<{ list: Paged<SweepListRow>; rigs: { slug: string; name: string }[] }, 'forbidden'>> {
+): Promise<
+	Outcome<{ list: Paged<SweepListRow>; rigs: { slug: string; name: string }[]; zone: string }, 'forbidden'>
+> {
 	if (!may(ctx.actor, 'bench.read')) return refuse('forbidden', 'Your roles do not include the bench.');
-	const [rows, total, rigs] = await Promise.all([
+	const [rows, total, rigs, { zone }] = await Promise.all([
 		sweeps.list(ctx.db, { ...query, limit: pageSize, offset: (query.page - 1) * pageSize }),
 		sweeps.total(ctx.db, query),
-		sweeps.rigsUsed(ctx.db)
+		sweeps.rigsUsed(ctx.db),
+		settings.publication(ctx.db)
 	]);
-	return done({ list: paged(await rowsOf(ctx, rows), total, query.page), rigs });
+	return done({ list: paged(await rowsOf(ctx, rows), total, query.page), rigs, zone });
 }

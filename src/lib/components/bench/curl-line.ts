@@ -1,0 +1,15 @@
+/** Text in single quotes for a POSIX shell: a quote inside ends them, stands escaped, and begins them again. */
+const quoted = (text: string): string => `'${text.replaceAll("'", `'\\''`)}'`;
+
+/**
+ * The command that sends JSON to the API with a personal token, ready to be pasted into a shell.
+ * @example curlLine('https://lab.example', '/api/v1/ladders/first/attempts', { attempts: [] })
+ */
+export const curlLine = (origin: string, path: string, body: unknown): string =>
+	[
+		`curl -X POST ${quoted(origin + path)}`,
+		'  -H "Authorization: Bearer $TOKEN"',
+		"  -H 'Content-Type: application/json'",
+		'  -H "Idempotency-Key: $(uuidgen)"',
+		`  -d ${quoted(JSON.stringify(body))}`
+	].join(' \\\n');

@@ -5,9 +5,12 @@ export const address = (role: Role) => `${role}@northlight.example`;
 const password = 'measure-then-print';
 
 /** Signs a person of the demo in through the page, as they would. */
-export async function signIn(page: Page, role: Role): Promise<void> {
+export const signIn = (page: Page, role: Role): Promise<void> => signInAs(page, address(role));
+
+/** As signIn, of somebody by their address. */
+export async function signInAs(page: Page, email: string): Promise<void> {
 	await page.goto('/sign-in');
-	await page.locator('form[action="?/password"] input[name=email]').fill(address(role));
+	await page.locator('form[action="?/password"] input[name=email]').fill(email);
 	await page.locator('input[name=password]').fill(password);
 	await page.getByRole('button', { name: 'Sign in', exact: true }).click();
 	await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));

@@ -35,5 +35,6 @@ export function readingRows(runs: readonly CellRun[], typed: readonly TypedReadi
 	return [...stored, ...coming].map((row) => ({ ...row, number: counts(row) ? ++number : null }));
 }
 
-/** Whether a line goes into the figures: not excluded, and not refused by the server. */
-export const counts = (row: Counted): boolean => row.excluded === null && row.typed?.state !== 'refused';
+/** Whether a line goes into the figures: not excluded, and neither refused by the server nor held for a choice. */
+export const counts = (row: Counted): boolean =>
+	row.excluded === null && row.typed?.state !== 'refused' && row.typed?.state !== 'held';

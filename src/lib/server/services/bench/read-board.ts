@@ -6,8 +6,10 @@ import { currentProfile, progress, toRun, type Progress, type ToRun } from '../.
 import { may } from '../../../domain/people/policy';
 import { done, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
+import * as campaigns from '../../db/queries/campaign';
 import * as articles from '../../db/queries/campaign-articles';
 import type { CampaignHead } from '../../db/queries/campaign-facts';
+import * as live from '../../db/queries/live';
 import * as settings from '../../db/queries/settings';
 import { readCampaign, type MeasuredCampaign } from './read-campaign';
 
@@ -21,26 +23,20 @@ export interface Board {
 	cells: CellFigures[];
 	progress: Progress;
 	signed: number;
-	/** What to run now and how many readings are left before the next restart of the rig; null when nothing is left. */
-	next: (ToRun & { leftInProfile: number }) | null;
+	/** Profile of the latest run: what the rig is in; null before the first. */
+	current: string | null;
+	/** Newest entry of the history that is surely in these figures: what comes after it is told live. */
+	newest: number;
 	selected: { profile: string; workload: string; runs: CellRun[]; baselineValues: number[] | null };
 	zone: string;
 	may: { plan: boolean; record: boolean; sign: boolean };
-}
-
-function nextToRun({ matrix, figures }: MeasuredCampaign): Board['next'] {
-	const left = toRun(figures.cells, currentProfile(matrix.runs));
-	const [first] = left;
-	if (!first) return null;
-	const inProfile = left.filter((cell) => cell.profile === first.profile);
-	return { ...first, leftInProfile: inProfile.reduce((sum, cell) => sum + cell.remaining, 0) };
 }
 
 /** The cell the address names; else the next to run, else the first. */
 function select(
 	{ plan }: MeasuredCampaign,
 	wanted: { profile: string; workload: string },
-	next: Board['next']
+	next: ToRun | undefined
 ) {
 	const slugOf = (rows: { slug: string }[], ...refs: (string | undefined)[]) =>
 		refs.find((ref) => rows.some((row) => row.slug === ref)) ?? rows[0]?.slug ?? '';
@@ -74,9 +70,10 @@ function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workloa
 function boardOf(
 	measured: MeasuredCampaign,
 	wanted: { profile: string; workload: string }
-): Omit<Board, 'articles' | 'zone' | 'may'> {
+): Omit<Board, 'articles' | 'zone' | 'may' | 'newest'> {
 	const { plan, matrix, figures, recorded } = measured;
-	const next = nextToRun(measured);
+	const current = currentProfile(matrix.runs);
+	const [next] = toRun(figures.cells, current);
 	const cell = select(measured, wanted, next);
 	const signed = figures.cells.filter((one) => one.signedAt !== null).length;
 	return {
@@ -93,7 +90,7 @@ function boardOf(
 		cells: figures.cells,
 		progress: progress(figures.cells),
 		signed,
-		next,
+		current,
 		selected: {
 			...cell,
 			runs: runsOf(measured, cell),
@@ -113,6 +110,9 @@ export async function readBoard(
 	campaignRef: string,
 	wanted: { profile: string; workload: string }
 ): Promise<Outcome<Board>> {
+	const id = await campaigns.idOf(ctx.db, campaignRef);
+	// Before the figures, so that what comes in between is told once more rather than never.
+	const newest = id === undefined ? 0 : await live.newestOf(ctx.db, id);
 	const measured = await readCampaign(ctx, campaignRef);
 	if (!measured.ok) return measured;
 	const [bound, { zone }] = await Promise.all([
@@ -123,6 +123,7 @@ export async function readBoard(
 		...boardOf(measured.value, wanted),
 		articles: bound.map(({ slug, title }) => ({ slug, title })),
 		zone,
+		newest,
 		may: {
 			plan: may(ctx.actor, 'bench.plan'),
 			record: may(ctx.actor, 'run.record'),

@@ -1,7 +1,16 @@
 import { fail } from '@sveltejs/kit';
 import type { Outcome } from '$lib/domain/shared/outcome';
-import { cellQuery } from '$lib/schemas/campaign';
-import { cellSign, cellUnsign, plainRun, readingCount, runEdit, runVoid } from '$lib/schemas/run';
+import { boardQuery } from '$lib/schemas/campaign';
+import {
+	cellSign,
+	cellUnsign,
+	chosenSign,
+	chosenUnsign,
+	plainRun,
+	readingCount,
+	runEdit,
+	runVoid
+} from '$lib/schemas/run';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { statusOf } from '$lib/server/http/problem';
 import { readPlainForm } from '$lib/server/http/read-plain-form';
@@ -9,15 +18,16 @@ import { excludeReading, includeReading } from '$lib/server/services/bench/count
 import { editRun } from '$lib/server/services/bench/edit-run';
 import { readBoard } from '$lib/server/services/bench/read-board';
 import { recordPlainRun } from '$lib/server/services/bench/record-plain-run';
-import { signCells, type Signed } from '$lib/server/services/bench/sign-cells';
+import { signCells, signChosenCells, type Signed } from '$lib/server/services/bench/sign-cells';
 import { unsignCell } from '$lib/server/services/bench/unsign-cell';
+import { unsignChosenCells } from '$lib/server/services/bench/unsign-chosen-cells';
 import { voidRun } from '$lib/server/services/bench/void-run';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 export const load = guarded('bench.read', async ({ params, url }: PageServerLoadEvent, ctx) => {
-	const wanted = cellQuery.parse(Object.fromEntries(url.searchParams));
-	const board = valueOrError(await readBoard(ctx, params.campaign, wanted));
-	return { title: board.head.name, board, freshKey: crypto.randomUUID(), me: ctx.actor.id };
+	const query = boardQuery.parse(Object.fromEntries(url.searchParams));
+	const board = valueOrError(await readBoard(ctx, params.campaign, query));
+	return { title: board.head.name, board, query, freshKey: crypto.randomUUID(), me: ctx.actor.id };
 });
 
 /** What the page says when an act is done, or the refusal with what was typed. */
@@ -41,6 +51,11 @@ function signedWords({ signed, missing }: Signed): string {
 	const more = missing.length > 3 ? ` and ${missing.length - 3} more` : '';
 	return `${done} Readings are still wanted in ${first}${more}.`;
 }
+
+const unsignedWords = ({ removed, chosen }: { removed: number; chosen: number }) =>
+	`${removed === 1 ? 'One signature was' : `${removed} signatures were`} taken off${
+		removed < chosen ? `; ${chosen - removed} of the chosen cells had none` : ''
+	}.`;
 
 export const actions = {
 	record: guarded('run.record', async ({ request, params }: RequestEvent, ctx) => {
@@ -81,5 +96,15 @@ export const actions = {
 		const { typed, value, refused } = await readPlainForm(request, cellUnsign);
 		if (!value) return refused;
 		return say(await unsignCell(ctx, params.campaign, value), typed, () => 'The signature was taken off.');
+	}),
+	'sign-chosen': guarded('cell.sign', async ({ request, params }: RequestEvent, ctx) => {
+		const { typed, value, refused } = await readPlainForm(request, chosenSign, ['cell']);
+		if (!value) return refused;
+		return say(await signChosenCells(ctx, params.campaign, value), typed, signedWords);
+	}),
+	'unsign-chosen': guarded('cell.sign', async ({ request, params }: RequestEvent, ctx) => {
+		const { typed, value, refused } = await readPlainForm(request, chosenUnsign, ['cell']);
+		if (!value) return refused;
+		return say(await unsignChosenCells(ctx, params.campaign, value), typed, unsignedWords);
 	})
 };

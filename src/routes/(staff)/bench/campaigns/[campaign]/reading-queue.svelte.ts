@@ -4,10 +4,13 @@ import {
 	newSitting,
 	readSittings,
 	waitingOf,
+	withBothKept,
+	withHeld,
 	withRefused,
 	withStored,
 	type Sitting
 } from '$lib/domain/bench/sitting';
+import { SvelteSet } from 'svelte/reactivity';
 import type { Sent } from './send-readings';
 
 /** Where the queue keeps what is not on record yet: the browser's storage, of which it needs these. */
@@ -20,7 +23,7 @@ interface Setup {
 	newKey: () => string;
 	send: (sitting: Sitting) => Promise<Sent>;
 	/** Called when readings reached the server, so that the page can read them anew. */
-	onstored: () => Promise<void>;
+	onstored: () => void;
 	now: () => Date;
 }
 
@@ -37,6 +40,8 @@ export class ReadingQueue {
 	trouble = $state('');
 	/** False where the browser keeps nothing: then a reload would lose what waits. */
 	keeps = $state(true);
+	/** Ids of stored readings that the board of the page counts already. */
+	readonly #known = new SvelteSet<number>();
 	#sending = false;
 	#timer: ReturnType<typeof setTimeout> | undefined;
 	readonly #setup: Setup;
@@ -70,15 +75,81 @@ export class ReadingQueue {
 		return this.of(cell);
 	}
 
-	/** Takes typed values into a cell's sitting and sends them. */
-	add(cell: Pick<Sitting, 'profile' | 'workload' | 'unit'>, values: number[]): void {
+	/** Ids of what the server said it has, in all cells. */
+	get storedIds(): number[] {
+		return this.sittings.flatMap((sitting) => sitting.readings.flatMap((reading) => reading.id ?? []));
+	}
+
+	/** Takes note that the page's board was read after these were stored. */
+	know(ids: readonly number[]): void {
+		for (const id of ids) this.#known.add(id);
+	}
+
+	/** Readings of a cell that will count and that the page's board does not show yet. */
+	comingTo(cell: Pick<Sitting, 'profile' | 'workload'>): number {
+		return (this.find(cell)?.readings ?? []).filter(
+			(reading) =>
+				reading.state === 'waiting' ||
+				(reading.state === 'stored' && reading.id !== undefined && !this.#known.has(reading.id))
+		).length;
+	}
+
+	/** Readings of a cell's sitting that the page's board counts already. */
+	ownKnown(cell: Pick<Sitting, 'profile' | 'workload'>): number {
+		const readings = this.find(cell)?.readings ?? [];
+		return readings.filter((reading) => reading.id !== undefined && this.#known.has(reading.id)).length;
+	}
+
+	/**
+	 * Takes typed values into a cell's sitting and sends them.
+	 * @param seen others' readings of the cell on the screen; null where nobody is to be asked about newer ones
+	 */
+	add(cell: Pick<Sitting, 'profile' | 'workload' | 'unit'>, values: number[], seen: number | null): void {
 		const sitting = this.of(cell);
 		sitting.firstAt ??= this.#setup.now().toISOString();
 		for (const value of values) {
-			sitting.readings.push({ key: this.#setup.newKey(), value, state: 'waiting' });
+			sitting.readings.push({
+				key: this.#setup.newKey(),
+				value,
+				state: 'waiting',
+				...(seen === null ? {} : { seen })
+			});
 		}
 		this.keep();
 		void this.flush();
+	}
+
+	/** Keeps texts that are not readings yet for a cell. */
+	draft(cell: Pick<Sitting, 'profile' | 'workload' | 'unit'>, texts: readonly string[]): void {
+		if (texts.length === 0) return;
+		const { drafts } = this.of(cell);
+		drafts.push(...texts.map((text, at) => ({ id: String(drafts.length + at), text })));
+		this.keep();
+	}
+
+	/** Sends held readings again beside the others', which their writer has now seen. */
+	keepBoth(sitting: Sitting): void {
+		sitting.readings = withBothKept(sitting.readings, sitting.held?.othersSeen ?? 0);
+		sitting.held = null;
+		this.keep();
+		void this.flush();
+	}
+
+	/** Lets the others' stand alone. */
+	dropHeld(sitting: Sitting): void {
+		sitting.readings = sitting.readings.filter((reading) => reading.state !== 'held');
+		sitting.held = null;
+		this.keep();
+	}
+
+	/** Takes the last reading of a cell back while it cannot have reached the server; null where it can. */
+	takeBack(cell: Pick<Sitting, 'profile' | 'workload'>): number | null {
+		const sitting = this.find(cell);
+		const last = sitting?.readings.at(-1);
+		if (!sitting || !last || last.state !== 'waiting' || last.sent) return null;
+		sitting.readings = sitting.readings.slice(0, -1);
+		this.keep();
+		return last.value;
 	}
 
 	/** Throws a refused reading away. */
@@ -94,17 +165,11 @@ export class ReadingQueue {
 		for (const reading of refused) {
 			reading.state = 'waiting';
 			delete reading.message;
+			// Its run is another now, so that what was stored before would count as somebody else's.
+			delete reading.seen;
 		}
 		this.keep();
 		void this.flush();
-	}
-
-	/** Forgets what the page now shows from the record. */
-	settle(ids: ReadonlySet<number>): void {
-		for (const sitting of this.sittings) {
-			const left = sitting.readings.filter((one) => one.id === undefined || !ids.has(one.id));
-			if (left.length < sitting.readings.length) sitting.readings = left;
-		}
 	}
 
 	keep(): void {
@@ -134,12 +199,15 @@ export class ReadingQueue {
 		} finally {
 			this.#sending = false;
 		}
-		if (stored) await this.#setup.onstored();
+		if (stored) this.#setup.onstored();
 	}
 
 	async #sendOne(sitting: Sitting): Promise<Sent['kind']> {
-		const keys = waitingOf(sitting).map((reading) => reading.key);
+		const waiting = waitingOf(sitting);
+		const keys = waiting.map((reading) => reading.key);
+		for (const reading of waiting) reading.sent = true;
 		sitting.changed = false;
+		this.keep();
 		const sent = await this.#setup.send($state.snapshot(sitting));
 		if (sent.kind === 'stored') {
 			const left = withStored(sitting.readings, sent.stored);
@@ -147,6 +215,9 @@ export class ReadingQueue {
 			this.trouble = '';
 		} else if (sent.kind === 'refused') {
 			sitting.readings = withRefused(sitting.readings, keys, sent.message);
+		} else if (sent.kind === 'held') {
+			sitting.readings = withHeld(sitting.readings, keys);
+			sitting.held = sent.held;
 		} else {
 			sitting.changed = true;
 			this.trouble = sent.message;

@@ -1,0 +1,101 @@
+import { goto, preloadData } from '$app/navigation';
+import type { PageData } from './$types';
+
+interface Cell {
+	profile: string;
+	workload: string;
+}
+
+interface Setup {
+	/** What the page was given last. */
+	given: () => PageData;
+	/** Address of the page with a cell opened. */
+	href: (cell: Cell) => string;
+	/** Ids of readings that are stored; the board counts them once it was read after they were. */
+	storedIds: () => number[];
+	onread: (ids: number[]) => void;
+}
+
+/** What happens within so many milliseconds is read together. */
+const gatherMs = 250;
+
+/**
+ * Reads the board anew, and opens other cells of it, without ever leaving the page: an entry can go on at once in the
+ * cell gone to, and a server that cannot be reached costs nothing but newer figures.
+ */
+export class BoardReader {
+	/** The cell gone to, until the page has it. */
+	wanted = $state.raw<Cell | null>(null);
+	#fresh = $state.raw<{ over: PageData; data: PageData } | null>(null);
+	#line: Promise<void> = Promise.resolve();
+	#timer: ReturnType<typeof setTimeout> | undefined;
+	#count = 0;
+	readonly #setup: Setup;
+
+	constructor(setup: Setup) {
+		this.#setup = setup;
+	}
+
+	/** The newest the page has. */
+	get data(): PageData {
+		const given = this.#setup.given();
+		return this.#fresh?.over === given ? this.#fresh.data : given;
+	}
+
+	get at(): Cell {
+		return this.wanted ?? this.data.board.selected;
+	}
+
+	/** Reads the board soon. */
+	refresh(): void {
+		this.#timer ??= setTimeout(() => {
+			this.#timer = undefined;
+			this.#line = this.#line.then(() => (this.wanted ? this.#open(this.wanted) : this.#read()));
+		}, gatherMs);
+	}
+
+	/** Opens another cell. */
+	go(cell: Cell): void {
+		this.wanted = cell;
+		this.#line = this.#line.then(() => this.#open(cell));
+	}
+
+	async #load(address: string): Promise<PageData | null> {
+		try {
+			const got = await preloadData(address);
+			return got.type === 'loaded' && got.status === 200 && 'board' in got.data
+				? (got.data as PageData)
+				: null;
+		} catch {
+			return null;
+		}
+	}
+
+	async #read(): Promise<void> {
+		const ids = this.#setup.storedIds();
+		// An address of its own each time: the framework keeps what it loaded for one.
+		const address = `${this.#setup.href(this.at)}&read=${++this.#count}`;
+		const data = await this.#load(address);
+		if (!data) return;
+		this.#fresh = { over: this.#setup.given(), data };
+		this.#setup.onread(ids);
+	}
+
+	async #open(cell: Cell): Promise<void> {
+		if (this.wanted !== cell) return;
+		const ids = this.#setup.storedIds();
+		const href = this.#setup.href(cell);
+		// Loaded first: the framework shows an error page for an address that it cannot reach.
+		if (!(await this.#load(href)) || this.wanted !== cell) return;
+		// The address is the campaign's own, made by the page.
+		// eslint-disable-next-line svelte/no-navigation-without-resolve
+		await goto(href, { keepFocus: true, noScroll: true });
+		this.#setup.onread(ids);
+		if (this.wanted === cell) this.wanted = null;
+	}
+
+	stop(): void {
+		clearTimeout(this.#timer);
+		this.#timer = undefined;
+	}
+}

@@ -90,6 +90,18 @@ export const byRefs = async (db: Db, refs: string[]) => {
 				.where(or(inArray(sample.slug, refs), ids.length ? inArray(sample.id, ids) : undefined));
 };
 
+/** Samples with a serial number, spaces and case aside, by code. */
+export const bySerial = (db: Db, serial: string, limit = 20) =>
+	db
+		.select(columns)
+		.from(sample)
+		.innerJoin(part, eq(part.id, sample.partId))
+		.where(
+			sql`${sample.serial} <> '' and replace(lower(${sample.serial}), ' ', '') = ${serial.toLowerCase().replace(/\s+/g, '')}`
+		)
+		.orderBy(asc(sample.slug))
+		.limit(limit);
+
 /** The samples of several parts, by code. */
 export const ofParts = async (db: Db, partIds: number[]) =>
 	partIds.length === 0

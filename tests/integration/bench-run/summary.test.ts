@@ -95,4 +95,23 @@ describe('the summary of a campaign', () => {
 		expect(cellOf(byApi, 'stock/prime-search').comparison).toBeNull();
 		expect(forth).toBeCloseTo(1.04020383411, 10);
 	});
+
+	it('corrects the verdicts of all its comparisons together, and says of how many', () => {
+		const held = byApi.cells.flatMap(({ comparison }) => comparison ?? []);
+		expect([byApi.together, held.length]).toEqual([21, 21]);
+		expect(held.filter(({ alone, verdict }) => verdict !== alone).map(({ verdict }) => verdict)).toEqual(
+			held.flatMap(({ alone, verdict }) => (verdict === alone ? [] : ['not-enough' as const]))
+		);
+		// Holm's least step: what is beyond the band at 0.05 / 21 by itself stays beyond it in the table.
+		const clear = held.filter(({ ci95 }) => ci95 && (ci95[1] < 0.9 || ci95[0] > 1.2));
+		expect(clear.length).toBeGreaterThan(0);
+		for (const { verdict, alone } of clear) expect(verdict).toBe(alone);
+	});
+
+	it('gives each overall figure an interval around it', () => {
+		for (const { ratio, ci95 } of byApi.overall) {
+			expect(ci95?.[0]).toBeLessThan(ratio);
+			expect(ci95?.[1]).toBeGreaterThan(ratio);
+		}
+	});
 });

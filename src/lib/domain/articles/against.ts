@@ -1,10 +1,29 @@
-import { compareSummaries } from '../bench/statistics/compare';
-import { overall } from '../bench/statistics/overall';
 import type { Comparison, Overall, WorkloadFacts } from '../bench/figures';
+import { heldAgainst, overallAgainst } from '../bench/held-against';
 import type { CampaignData } from './data';
-import { figuresOf } from './directives/lookup';
 
-/** A cell against the same workload of another profile; null where a side has no readings or no mean above zero. */
+type HeldCells = CampaignData['cells'];
+
+/** Tables over other profiles than the baseline, so that a page of many gains computes each once. */
+const tables = new WeakMap<CampaignData, Map<string, HeldCells>>();
+
+function cellsOver(campaign: CampaignData, over: string): HeldCells {
+	if (over === campaign.baseline) return campaign.cells;
+	const known = tables.get(campaign) ?? new Map<string, HeldCells>();
+	tables.set(campaign, known);
+	const before = known.get(over);
+	if (before) return before;
+	const standings = heldAgainst(campaign.cells, campaign.workloads, over);
+	const cells = campaign.cells.map((cell, at) => ({
+		...cell,
+		comparison: standings[at]?.comparison ?? null,
+		difference: standings[at]?.difference ?? null
+	}));
+	known.set(over, cells);
+	return cells;
+}
+
+/** A cell against the same workload of another profile; null where a side has no readings or a ratio says nothing. */
 export function comparisonOver(
 	campaign: CampaignData,
 	workload: WorkloadFacts,
@@ -12,21 +31,14 @@ export function comparisonOver(
 	over: string
 ): Comparison | null {
 	if (profile === over) return null;
-	const cell = figuresOf(campaign, profile, workload.slug);
-	if (over === campaign.baseline) return cell?.comparison ?? null;
-	const ours = cell?.summary;
-	const theirs = figuresOf(campaign, over, workload.slug)?.summary;
-	if (!ours || !theirs || !(ours.mean > 0 && theirs.mean > 0)) return null;
-	return compareSummaries(ours, theirs, workload.better, workload.leastDifferencePercent);
+	const cell = cellsOver(campaign, over).find(
+		(one) => one.profile === profile && one.workload === workload.slug
+	);
+	return cell?.comparison ?? null;
 }
 
-/** The geometric mean of a profile's ratios over another; null where no workload has both. */
+/** The geometric mean of a profile's ratios over another, with its interval; null where no workload has both. */
 export function overallOver(campaign: CampaignData, profile: string, over: string): Overall | null {
 	if (over === campaign.baseline) return campaign.overall[profile] ?? null;
-	return overall(
-		campaign.workloads.map((workload) => ({
-			workload: workload.slug,
-			comparison: comparisonOver(campaign, workload, profile, over)
-		}))
-	);
+	return overallAgainst(cellsOver(campaign, over), campaign.workloads, profile, over);
 }

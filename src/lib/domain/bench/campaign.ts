@@ -1,6 +1,5 @@
-import type { CellFigures, Comparison, Overall, Summary, WorkloadFacts } from './figures';
-import { compareSummaries } from './statistics/compare';
-import { overall } from './statistics/overall';
+import type { CellFigures, Overall, Summary, WorkloadFacts } from './figures';
+import { heldAgainst, overallAgainst } from './held-against';
 import { summarise } from './statistics/summary';
 
 export interface CampaignReading {
@@ -74,19 +73,9 @@ function circumstances(
 	};
 }
 
-/** Null where a side is empty or its mean is not above zero. */
-const compared = (
-	subject: Summary | null,
-	baseline: Summary | null,
-	{ better, leastDifferencePercent }: WorkloadFacts
-): Comparison | null =>
-	subject && baseline && subject.mean > 0 && baseline.mean > 0
-		? compareSummaries(subject, baseline, better, leastDifferencePercent)
-		: null;
-
 /**
- * Every figure of a campaign: each cell's summary, its ratio to the baseline with interval and verdict,
- * and each profile's geometric mean. A cell whose mean is not above zero has no ratio.
+ * Every figure of a campaign: each cell's summary, its ratio to the baseline (or difference, where a ratio says
+ * nothing) with interval and verdict, and each profile's geometric mean.
  * RangeError where the baseline is not one of the profiles.
  */
 export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
@@ -100,32 +89,31 @@ export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
 		const values = readings.map((reading) => reading.value);
 		return values.length > 0 ? summarise(values, workload.headline) : null;
 	};
-	const baselines = new Map(
-		matrix.workloads.map((workload) => [workload.slug, summaryOf(matrix.baseline, workload)])
+	const measured = matrix.profiles.flatMap((profile) =>
+		matrix.workloads.map((workload) => ({
+			profile,
+			workload: workload.slug,
+			needed: workload.needed,
+			summary: summaryOf(profile, workload)
+		}))
 	);
-
-	const cells = matrix.profiles.flatMap((profile) =>
-		matrix.workloads.map((workload): CellFigures => {
-			const cell = { profile, workload: workload.slug };
-			const summary = summaryOf(profile, workload);
-			const against = profile === matrix.baseline ? null : (baselines.get(workload.slug) ?? null);
-			const signature = signatures.get(cellKey(cell))?.at(-1);
-			return {
-				...cell,
-				needed: workload.needed,
-				summary,
-				comparison: compared(summary, against, workload),
-				signedBy: signature?.signedBy ?? null,
-				signedAt: signature?.signedAt ?? null,
-				...circumstances(runs.get(cellKey(cell)) ?? [])
-			};
-		})
-	);
+	const standings = heldAgainst(measured, matrix.workloads, matrix.baseline);
+	const cells = measured.map((cell, at): CellFigures => {
+		const signature = signatures.get(cellKey(cell))?.at(-1);
+		return {
+			...cell,
+			comparison: standings[at]?.comparison ?? null,
+			difference: standings[at]?.difference ?? null,
+			signedBy: signature?.signedBy ?? null,
+			signedAt: signature?.signedAt ?? null,
+			...circumstances(runs.get(cellKey(cell)) ?? [])
+		};
+	});
 
 	const figures: Record<string, Overall> = {};
 	for (const profile of matrix.profiles) {
 		const figure =
-			profile === matrix.baseline ? null : overall(cells.filter((cell) => cell.profile === profile));
+			profile === matrix.baseline ? null : overallAgainst(cells, matrix.workloads, profile, matrix.baseline);
 		if (figure) figures[profile] = figure;
 	}
 	return { cells, overall: figures };

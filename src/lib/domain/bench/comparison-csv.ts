@@ -1,5 +1,6 @@
 import Papa from 'papaparse';
-import { verdictWords, type CellFigures, type Overall, type WorkloadFacts } from './figures';
+import type { CellNotes } from './comparison-notes';
+import { verdictWords, type CellFigures, type Overall, type Verdict, type WorkloadFacts } from './figures';
 
 /** A campaign's profiles held against one of them. */
 export interface CampaignComparison {
@@ -8,10 +9,14 @@ export interface CampaignComparison {
 	name: string;
 	baseline: string;
 	profiles: { slug: string; name: string }[];
-	workloads: Pick<WorkloadFacts, 'slug' | 'name' | 'unit' | 'better' | 'leastDifferencePercent'>[];
-	cells: CellFigures[];
+	workloads: WorkloadFacts[];
+	cells: (CellFigures & { notes: CellNotes })[];
+	/** Comparisons that were tested, and so corrected for each other. */
+	together: number;
 	overall: Record<string, Overall>;
 }
+
+const words = (verdict: Verdict | undefined): string => (verdict ? verdictWords[verdict] : '');
 
 /**
  * A comparison as CSV, one line for each cell and one for each profile's geometric mean; nothing is rounded.
@@ -19,25 +24,31 @@ export interface CampaignComparison {
  */
 export function comparisonCsv(comparison: CampaignComparison): string {
 	const units = new Map(comparison.workloads.map((workload) => [workload.slug, workload.unit]));
-	const cells = comparison.cells.map(({ profile, workload, summary, comparison: held, signedBy }) => ({
-		profile,
-		workload,
-		unit: units.get(workload) ?? '',
-		n: summary?.n ?? 0,
-		mean: summary?.mean ?? '',
-		median: summary?.median ?? '',
-		sd: summary?.sd ?? '',
-		cv_percent: summary?.cvPercent ?? '',
-		mean_low_95: summary?.ci95?.[0] ?? '',
-		mean_high_95: summary?.ci95?.[1] ?? '',
-		baseline: comparison.baseline,
-		ratio: held?.ratio ?? '',
-		ratio_low_95: held?.ci95?.[0] ?? '',
-		ratio_high_95: held?.ci95?.[1] ?? '',
-		gain_percent: held?.gainPercent ?? '',
-		verdict: held ? verdictWords[held.verdict] : '',
-		signed_by: signedBy ?? ''
-	}));
+	const cells = comparison.cells.map(
+		({ profile, workload, summary, comparison: held, difference, signedBy }) => ({
+			profile,
+			workload,
+			unit: units.get(workload) ?? '',
+			n: summary?.n ?? 0,
+			mean: summary?.mean ?? '',
+			median: summary?.median ?? '',
+			sd: summary?.sd ?? '',
+			cv_percent: summary?.cvPercent ?? '',
+			mean_low_95: summary?.ci95?.[0] ?? '',
+			mean_high_95: summary?.ci95?.[1] ?? '',
+			baseline: comparison.baseline,
+			ratio: held?.ratio ?? '',
+			ratio_low_95: held?.ci95?.[0] ?? '',
+			ratio_high_95: held?.ci95?.[1] ?? '',
+			gain_percent: held?.gainPercent ?? '',
+			difference: difference?.difference ?? '',
+			difference_low_95: difference?.ci95?.[0] ?? '',
+			difference_high_95: difference?.ci95?.[1] ?? '',
+			verdict: words((held ?? difference)?.verdict),
+			verdict_alone: words((held ?? difference)?.alone),
+			signed_by: signedBy ?? ''
+		})
+	);
 	const overall = comparison.profiles.flatMap(({ slug }) => {
 		const figure = comparison.overall[slug];
 		return figure
@@ -48,6 +59,8 @@ export function comparisonCsv(comparison: CampaignComparison): string {
 						n: figure.workloads.length,
 						baseline: comparison.baseline,
 						ratio: figure.ratio,
+						ratio_low_95: figure.ci95?.[0] ?? '',
+						ratio_high_95: figure.ci95?.[1] ?? '',
 						gain_percent: figure.gainPercent
 					}
 				]

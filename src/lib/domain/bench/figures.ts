@@ -18,6 +18,11 @@ export interface Summary {
 	flagged: number[];
 	/** The average the workload's protocol puts in print. */
 	headline: number;
+	/**
+	 * Standard error of the logarithm of the median (Price & Bonett); null where the readings give none. Left out of
+	 * editions from before it was taken.
+	 */
+	medianLogError?: number | null;
 }
 
 export const verdicts = ['better', 'worse', 'no-difference', 'not-enough'] as const;
@@ -30,7 +35,7 @@ export const verdictWords: Record<Verdict, string> = {
 	'not-enough': 'not enough runs to say'
 };
 
-/** A cell against its baseline, turned so that above 1 is better. */
+/** A cell against its baseline, turned so that above 1 is better. Of medians where the protocol prints the median. */
 export interface Comparison {
 	ratio: number;
 	/** 95 % interval of the ratio; null where the readings allow none. */
@@ -38,16 +43,35 @@ export interface Comparison {
 	/** (ratio − 1) × 100. */
 	gainPercent: number;
 	gainCi95: [number, number] | null;
+	/** What is printed: the verdict once all comparisons of the table are read together (Holm). */
 	verdict: Verdict;
+	/** The verdict of this comparison by itself. Left out of editions from before the correction. */
+	alone?: Verdict;
+}
+
+/** A cell against its baseline where a ratio says nothing, turned so that above zero is better. Unit: the workload's. */
+export interface Difference {
+	difference: number;
+	/** Welch's 95 % interval; null with a single reading on a side. */
+	ci95: [number, number] | null;
+	/** The least difference that matters, as its share of the baseline's mean. */
+	least: number;
+	verdict: Verdict;
+	alone: Verdict;
+	/** Why no ratio, in one sentence. */
+	why: string;
 }
 
 /** The geometric mean of a profile's ratios. */
 export interface Overall {
 	ratio: number;
 	gainPercent: number;
+	/** 95 % interval of the ratio; null where the readings allow none, left out of older editions. */
+	ci95?: [number, number] | null;
+	gainCi95?: [number, number] | null;
 	/** Workloads that went into it. */
 	workloads: string[];
-	/** Workloads of the campaign that could not, for want of readings on a side. */
+	/** Workloads of the campaign that could not, for want of readings on a side or of a ratio. */
 	missing: string[];
 }
 
@@ -58,8 +82,10 @@ export interface CellFigures {
 	needed: number;
 	/** Null while the cell is empty. */
 	summary: Summary | null;
-	/** Null for the baseline itself, or where a side is empty. */
+	/** Null for the baseline itself, where a side is empty, or where a ratio says nothing. */
 	comparison: Comparison | null;
+	/** In the place of a comparison where a ratio says nothing. Left out of older editions. */
+	difference?: Difference | null;
 	signedBy: string | null;
 	/** ISO time. */
 	signedAt: string | null;

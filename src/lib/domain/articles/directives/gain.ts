@@ -2,8 +2,8 @@ import { comparisonOver } from '../against';
 import { behindGain, gainInWords, printedSize } from '../figures-in-words';
 import { element, escapeHtml } from '../html';
 import { printedGain, printedGainRange, printedRatio } from '../../shared/quantity';
-import type { Comparison } from '../../bench/figures';
-import type { ProfileFacts } from '../data';
+import type { Comparison, Difference } from '../../bench/figures';
+import type { CampaignData, ProfileFacts } from '../data';
 import { attribute, findBaseline, findCell, type Cell } from './lookup';
 import { directive, found, missing } from './shape';
 
@@ -16,6 +16,10 @@ interface Gain extends Cell {
 	show: Show;
 	text: string;
 }
+
+/** The first difference of a column that is not held by ratio; undefined where it is. */
+const heldInDifference = (campaign: CampaignData, workload: string): Difference | undefined =>
+	campaign.cells.find((one) => one.workload === workload && one.difference)?.difference ?? undefined;
 
 function printedAs(show: Show, comparison: Comparison): string | null {
 	switch (show) {
@@ -58,6 +62,12 @@ export const gain = directive<Gain>({
 		}
 		const comparison = comparisonOver(campaign, workload, profile.slug, baseline.value.slug);
 		if (!comparison) {
+			const difference = heldInDifference(cell.value.campaign, workload.slug);
+			if (difference) {
+				return missing(
+					`${workload.name} is in ${workload.unit}, where a ratio says nothing: print both readings, or the difference in your own words. ${difference.why}`
+				);
+			}
 			return missing(
 				`${workload.name} has no readings with ${baseline.value.name} to hold ${profile.name} against.`
 			);

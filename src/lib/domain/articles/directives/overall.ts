@@ -1,22 +1,24 @@
 import { overallOver } from '../against';
 import { printedSize } from '../figures-in-words';
 import { element, escapeHtml } from '../html';
-import { printedGain, printedRatio } from '../../shared/quantity';
+import { printedGain, printedGainRange, printedRatio } from '../../shared/quantity';
 import type { Overall } from '../../bench/figures';
 import type { ProfileFacts } from '../data';
 import { attribute, findBaseline, findProfile, type ProfilePlace } from './lookup';
 import { directive, found, missing } from './shape';
 
-const shows = ['signed', 'size', 'words', 'ratio'] as const;
+const shows = ['signed', 'size', 'words', 'ratio', 'interval'] as const;
 type Show = (typeof shows)[number];
 
 interface OverallGain extends ProfilePlace {
 	baseline: ProfileFacts;
 	figure: Overall;
 	show: Show;
+	text: string;
 }
 
-function printedAs(show: Show, { gainPercent, ratio }: Overall): string {
+function printedAs(show: Show, { gainPercent, gainCi95 = null, ratio }: Overall): string | null {
+	if (show === 'interval') return gainCi95 && printedGainRange(gainCi95);
 	const size = printedSize({ gainPercent, gainCi95: null });
 	if (show === 'ratio') return printedRatio(ratio);
 	if (show === 'size') return size;
@@ -48,16 +50,15 @@ export const overallGain = directive<OverallGain>({
 				campaign.profiles.map((one) => one.slug).filter((slug) => slug !== baseline.value.slug)
 			);
 		}
-		return found({
-			...place.value,
-			baseline: baseline.value,
-			figure,
-			show: (call.attributes.show as Show | undefined) ?? 'signed'
-		});
-	},
-	render({ campaign, profile, baseline, figure, show }, { call }) {
+		const show = (call.attributes.show as Show | undefined) ?? 'signed';
 		const text = printedAs(show, figure);
+		return text === null
+			? missing(`The overall figure of ${profile.name} has no interval: a side has a single reading.`)
+			: found({ ...place.value, baseline: baseline.value, figure, show, text });
+	},
+	render({ campaign, profile, baseline, figure, show, text }, { call }) {
 		const count = figure.workloads.length;
+		const interval = figure.gainCi95 ? `, 95 % interval ${printedGainRange(figure.gainCi95)}` : '';
 		const without = figure.missing.length > 0 ? `, without ${figure.missing.join(', ')}` : '';
 		return {
 			html: element(
@@ -67,7 +68,7 @@ export const overallGain = directive<OverallGain>({
 					'data-campaign': campaign.slug,
 					'data-profile': profile.slug,
 					'data-over': baseline.slug,
-					title: `${profile.name} over ${baseline.name}: geometric mean of the ratios of ${count} workload${count === 1 ? '' : 's'}${without}`
+					title: `${profile.name} over ${baseline.name}: geometric mean of the ratios of ${count} workload${count === 1 ? '' : 's'}${without}${interval}`
 				},
 				escapeHtml(text)
 			),

@@ -3,6 +3,7 @@ import type { Direction } from '../words';
 import { type TestedComparison, testSummaries } from './compare';
 import { holm } from './holm';
 import type { Spread } from './sides';
+import type { PValues } from './tost';
 import { verdictOf } from './verdict';
 
 /** One row of a table: a cell, its baseline, and what matters there. Null where a side is empty. */
@@ -21,21 +22,39 @@ export interface CorrectedComparison extends TestedComparison {
 	verdict: Verdict;
 }
 
+/** What one row of a table asks: its p-values, null where it allows no test, and the side its estimate lies on. */
+export interface Question {
+	p: PValues | null;
+	forBetter: boolean;
+}
+
 /**
  * Holm's correction over comparisons that are read together, each question (does it differ, is it the same) a family
  * of its own. Rows without a test keep their place and count for nothing. A verdict can only fall to *not enough*.
  */
-export function correctTogether(rows: readonly (TestedComparison | null)[]): (CorrectedComparison | null)[] {
-	const tested = rows.flatMap((row) => (row?.p ? [row.p] : []));
+export function verdictsTogether(
+	rows: readonly Question[]
+): { adjusted: PValues | null; verdict: Verdict }[] {
+	const tested = rows.flatMap(({ p }) => (p ? [p] : []));
 	const differ = holm(tested.map((p) => p.pDiffer));
 	const equivalent = holm(tested.map((p) => p.pEquivalent));
 	let next = 0;
-	return rows.map((row) => {
-		if (!row) return null;
-		if (!row.p) return { ...row, adjusted: null, verdict: row.comparison.verdict };
+	return rows.map(({ p, forBetter }) => {
+		if (!p) return { adjusted: null, verdict: verdictOf(null, forBetter) };
 		const adjusted = { pDiffer: differ[next] ?? 1, pEquivalent: equivalent[next] ?? 1 };
 		next += 1;
-		return { ...row, adjusted, verdict: verdictOf(adjusted, row.comparison.ratio > 1) };
+		return { adjusted, verdict: verdictOf(adjusted, forBetter) };
+	});
+}
+
+/** `verdictsTogether` over ratios; null rows stay null. */
+export function correctTogether(rows: readonly (TestedComparison | null)[]): (CorrectedComparison | null)[] {
+	const together = verdictsTogether(
+		rows.map((row) => ({ p: row?.p ?? null, forBetter: (row?.comparison.ratio ?? 1) > 1 }))
+	);
+	return rows.map((row, at) => {
+		const corrected = together[at];
+		return row && corrected ? { ...row, ...corrected } : null;
 	});
 }
 

@@ -47,10 +47,13 @@ export const hodgesLehmann = (first: readonly number[], second: readonly number[
 
 /**
  * Standard error of the logarithm of a median (Price & Bonett 2001, after McKean & Schrader): the distance of two
- * order statistics in the deviations that a fair coin gives them. Null where one of them is not above zero.
+ * order statistics in the deviations that a fair coin gives them. Null for a single reading, or where one of the two is
+ * not above zero.
  */
-function logMedianError(sorted: readonly number[]): number | null {
+export function logMedianError(values: readonly number[]): number | null {
+	const sorted = ascending(values);
 	const n = sorted.length;
+	if (n < 2) return null;
 	// Halves go down, as R's round does at these sizes.
 	const rank = Math.max(1, Math.ceil((n + 1) / 2 - Math.sqrt(n) - 0.5));
 	const [low, high] = [sorted[rank - 1] ?? NaN, sorted[n - rank] ?? NaN];
@@ -58,25 +61,28 @@ function logMedianError(sorted: readonly number[]): number | null {
 	return Math.log(high / low) / (2 * normalQuantile(1 - fairCoinAtMost(rank - 1, n)));
 }
 
+/** What a comparison of medians needs of a set of readings: `logError` as `logMedianError` gives it. */
+export interface MedianSpread {
+	median: number;
+	logError: number | null;
+}
+
 /**
  * Ratio of medians, turned so that above 1 is better, with Price & Bonett's interval on the logarithms (2002) and a
  * verdict by the same rules as a ratio of means. No interval with a single reading on a side.
- * RangeError for an empty side or a median that is not above zero.
+ * RangeError for a median that is not above zero.
  * @param leastDifferencePercent m, in percent
  */
-export function compareMedians(
-	subject: readonly number[],
-	baseline: readonly number[],
+export function testMedians(
+	subject: MedianSpread,
+	baseline: MedianSpread,
 	better: Direction,
 	leastDifferencePercent: number
 ): TestedComparison {
 	const turned = better === 'higher' ? ([subject, baseline] as const) : ([baseline, subject] as const);
-	const [top, bottom] = [ascending(turned[0]), ascending(turned[1])];
-	const [a, b] = [median(top), median(bottom)];
+	const [{ median: a, logError: errorA }, { median: b, logError: errorB }] = turned;
 	if (!(a > 0 && b > 0)) throw new RangeError('A ratio needs medians above zero.');
 	const ratio = a / b;
-	if (top.length < 2 || bottom.length < 2) return asComparison(ratio, null, null);
-	const [errorA, errorB] = [logMedianError(top), logMedianError(bottom)];
 	if (errorA === null || errorB === null) return asComparison(ratio, null, null);
 	const se = Math.hypot(errorA, errorB);
 	const factor = Math.exp(normalQuantile(0.975) * se);
@@ -88,4 +94,18 @@ export function compareMedians(
 		pDiffer: Math.min(1, 2 * normalUpperTail(Math.max(zUpper, -zLower))),
 		pEquivalent: normalUpperTail(Math.min(zLower, -zUpper))
 	});
+}
+
+/** The same from the readings. RangeError also for an empty side. */
+export function compareMedians(
+	subject: readonly number[],
+	baseline: readonly number[],
+	better: Direction,
+	leastDifferencePercent: number
+): TestedComparison {
+	const spreadOf = (values: readonly number[]): MedianSpread => ({
+		median: median(ascending(values)),
+		logError: logMedianError(values)
+	});
+	return testMedians(spreadOf(subject), spreadOf(baseline), better, leastDifferencePercent);
 }

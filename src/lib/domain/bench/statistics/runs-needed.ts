@@ -60,32 +60,28 @@ export function readingsPerSide(
 	});
 }
 
-/**
- * How many readings would settle a comparison that says *not enough runs*, if means and scatter stay what they are:
- * to show a difference beyond m, or equivalence within m, whichever the present ratio points to; power 0.8.
- * Unknown where a side has fewer than two readings, neither varies, or a mean is not above zero.
- * @param leastDifferencePercent m, in percent
- */
-export function runsNeeded(
-	subject: Spread,
-	baseline: Spread,
-	better: Direction,
-	leastDifferencePercent: number
-): RunsNeeded {
-	const [top, bottom] = better === 'higher' ? [subject, baseline] : [baseline, subject];
-	if (top.sd === null || bottom.sd === null || top.sd + bottom.sd === 0) return { kind: 'unknown' };
-	if (!(top.mean > 0 && bottom.mean > 0)) return { kind: 'unknown' };
-	const upper = 1 + leastDifferencePercent / 100;
-	const margins = [1 / upper, upper];
-	const ratio = top.mean / bottom.mean;
-	const inside = ratio > 1 / upper && ratio < upper;
-	const tested = inside ? margins : [ratio >= upper ? upper : 1 / upper];
-	// In units of the bottom mean; the widest of the tested margins weighs the bottom side's scatter.
-	const theta = Math.max(...tested);
-	const sds = [top.sd / bottom.mean, (theta * bottom.sd) / bottom.mean] as const;
-	const distances = tested.map((margin) => Math.abs(ratio - margin));
+interface Question {
+	subject: Spread;
+	baseline: Spread;
+	/** Deviations of one reading of each side, as they enter the test. */
+	sds: readonly [number, number];
+	estimate: number;
+	margins: readonly [number, number];
+	together: number;
+}
+
+/** What of its margins a comparison must exclude: both from within, the nearer one from beyond. */
+function testedMargins(estimate: number, [lower, upper]: readonly [number, number]): readonly number[] {
+	if (estimate > lower && estimate < upper) return [lower, upper];
+	return [estimate >= upper ? upper : lower];
+}
+
+function settle({ subject, baseline, sds, estimate, margins, together }: Question): RunsNeeded {
+	const tested = testedMargins(estimate, margins);
+	const inside = tested.length === 2;
+	const distances = tested.map((margin) => Math.abs(estimate - margin));
 	const perSide = distances.every((distance) => distance > 0)
-		? readingsPerSide(sds, distances, inside ? 0.05 : 0.025)
+		? readingsPerSide(sds, distances, (inside ? 0.05 : 0.025) / together)
 		: null;
 	if (perSide === null) return { kind: 'too-near' };
 	return {
@@ -95,6 +91,51 @@ export function runsNeeded(
 		moreOfSubject: Math.max(0, perSide - subject.n),
 		moreOfBaseline: Math.max(0, perSide - baseline.n)
 	};
+}
+
+/**
+ * How many readings would settle a comparison that says *not enough runs*, if means and scatter stay what they are:
+ * to show a difference beyond m, or equivalence within m, whichever the present ratio points to; power 0.8.
+ * Unknown where a side has fewer than two readings, neither varies, or a mean is not above zero.
+ * @param leastDifferencePercent m, in percent
+ * @param together comparisons read together: each must then hold at that share of the level (Bonferroni's bound on Holm)
+ */
+export function runsNeeded(
+	subject: Spread,
+	baseline: Spread,
+	better: Direction,
+	leastDifferencePercent: number,
+	together = 1
+): RunsNeeded {
+	const [top, bottom] = better === 'higher' ? [subject, baseline] : [baseline, subject];
+	if (top.sd === null || bottom.sd === null || top.sd + bottom.sd === 0) return { kind: 'unknown' };
+	if (!(top.mean > 0 && bottom.mean > 0)) return { kind: 'unknown' };
+	const upper = 1 + leastDifferencePercent / 100;
+	const margins = [1 / upper, upper] as const;
+	const estimate = top.mean / bottom.mean;
+	// In units of the bottom mean; the widest of the tested margins weighs the bottom side's scatter.
+	const theta = Math.max(...testedMargins(estimate, margins));
+	const sds = [top.sd / bottom.mean, (theta * bottom.sd) / bottom.mean] as const;
+	return settle({ subject, baseline, sds, estimate, margins, together });
+}
+
+/** As `runsNeeded`, for a comparison by difference, against a least difference in the unit of the readings. */
+export function runsNeededOfDifference(
+	subject: Spread,
+	baseline: Spread,
+	leastDifference: number,
+	together = 1
+): RunsNeeded {
+	if (subject.sd === null || baseline.sd === null || subject.sd + baseline.sd === 0)
+		return { kind: 'unknown' };
+	return settle({
+		subject,
+		baseline,
+		sds: [subject.sd, baseline.sd],
+		estimate: subject.mean - baseline.mean,
+		margins: [-leastDifference, leastDifference],
+		together
+	});
 }
 
 const readings = (n: number): string => `${n} more reading${n === 1 ? '' : 's'}`;
@@ -114,4 +155,16 @@ export function runsNeededWords(needed: RunsNeeded): string {
 	return parts.length > 0
 		? `About ${parts.join(' and ')} would likely ${end}, if the scatter stays as it is.`
 		: `One more reading on each side would likely ${end}.`;
+}
+
+/** The same in a few words, for the narrow cell of a table. */
+export function runsNeededShort(needed: RunsNeeded): string {
+	if (needed.kind === 'unknown') return 'two readings a side first';
+	if (needed.kind === 'too-near') return `over ${mostPerSide} readings a side`;
+	const { moreOfSubject: here, moreOfBaseline: there } = needed;
+	const parts = [
+		...(here > 0 ? [`${here} more here`] : []),
+		...(there > 0 ? [`${there} more of the baseline`] : [])
+	];
+	return parts.length > 0 ? `about ${parts.join(', ')}` : 'about one more a side';
 }

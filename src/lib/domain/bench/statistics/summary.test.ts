@@ -96,7 +96,8 @@ describe('a summary', () => {
 			cvPercent: null,
 			ci95: null,
 			flagged: [],
-			headline: 5
+			headline: 5,
+			medianLogError: null
 		});
 	});
 

@@ -3,6 +3,7 @@ import type { Summary } from '../figures';
 import type { Headline } from '../words';
 import { meanInterval } from './interval';
 import { flagOutliers } from './outliers';
+import { logMedianError } from './robust';
 
 /**
  * What a set of readings says of itself, in the unit of the readings. The mean is summed with compensation
@@ -27,6 +28,7 @@ export function summarise(values: readonly number[], headline: Headline = 'mean'
 		cvPercent: sd !== null && average > 0 ? (100 * sd) / average : null,
 		ci95: sd === null ? null : meanInterval(average, sd, list.length),
 		flagged: flagOutliers(list),
-		headline: headline === 'median' ? middle : average
+		headline: headline === 'median' ? middle : average,
+		medianLogError: list.length > 1000 ? null : logMedianError(list)
 	};
 }

@@ -63,29 +63,47 @@ const spread = {
 	max: z.number().nullable()
 };
 
+const verdict = z.enum(verdicts);
+
 const comparison = z
 	.object({
 		ratio: z
 			.number()
 			.describe(
-				'Ratio of means against the baseline, turned so that above 1 is better whichever way the quantity runs.'
+				'Ratio against the baseline, turned so that above 1 is better whichever way the quantity runs: of means, or of medians where the workload prints the median.'
 			),
-		ci95: interval.describe('95 % interval of the ratio (Fieller, unequal variances), [low, high].'),
+		ci95: interval.describe(
+			'95 % interval of the ratio, [low, high]: Fieller with unequal variances for means, Price and Bonett for medians.'
+		),
 		gainPercent: z.number().describe('(ratio − 1) × 100.'),
 		gainCi95: interval.describe('The same interval in percent.'),
-		verdict: z
-			.enum(verdicts)
-			.describe(
-				'`better` or `worse`: the interval lies wholly beyond the least difference that matters; `no-difference`: the 90 % interval lies wholly inside it; else `not-enough` runs to say.'
-			)
+		verdict: verdict.describe(
+			'The verdict printed: corrected for all comparisons of the table read together (Holm), which can only turn it into `not-enough`. `better` or `worse`: the interval lies wholly beyond the least difference that matters; `no-difference`: the 90 % interval lies wholly inside it; else `not-enough` runs to say.'
+		),
+		alone: verdict.optional().describe('The verdict of this comparison by itself.')
 	})
 	.nullable()
-	.describe('Null for the baseline itself, and where a side has no readings with a mean above zero.');
+	.describe('Null for the baseline itself, where a side has no readings, and where a ratio says nothing.');
+
+const difference = z
+	.object({
+		difference: z
+			.number()
+			.describe("Difference of means in the workload's unit, turned so that above zero is better."),
+		ci95: interval.describe('95 % interval of the difference (Welch), [low, high].'),
+		least: z.number().describe("The least difference that matters, as its share of the baseline's mean."),
+		verdict,
+		alone: verdict,
+		why: z.string().describe('Why no ratio.')
+	})
+	.nullable()
+	.describe('In the place of a comparison where a ratio says nothing, such as degrees or decibels.');
 
 const summary = z.object({
 	campaign: z.string(),
 	name: z.string(),
 	baseline: z.string().describe('Slug of the profile the others are held against.'),
+	together: z.number().describe('Comparisons read together: each verdict is corrected for so many.'),
 	cells: z.array(
 		z.object({
 			profile: z.string(),
@@ -101,7 +119,8 @@ const summary = z.object({
 				),
 			signedBy: z.string().nullable(),
 			signedAt: time.nullable(),
-			comparison
+			comparison,
+			difference
 		})
 	),
 	overall: z.array(
@@ -109,6 +128,12 @@ const summary = z.object({
 			profile: z.string(),
 			ratio: z.number().describe("Geometric mean of the profile's ratios."),
 			gainPercent: z.number(),
+			ci95: interval
+				.optional()
+				.describe(
+					'95 % interval of the geometric mean: delta method on the logarithms, Welch–Satterthwaite. It speaks of these workloads.'
+				),
+			gainCi95: interval.optional(),
 			workloads: z.array(z.string()).describe('Workloads that went into it.'),
 			missing: z.array(z.string()).describe('Workloads without a ratio.')
 		})
@@ -123,13 +148,24 @@ const recordedRun = z.object({
 	unit: z.string(),
 	readings: z.array(z.object({ id: z.number(), value: z.number() })).describe('In the order sent.'),
 	summary: z
-		.object({ ...spread, flagged: z.array(z.number()), headline: z.number() })
+		.object({
+			...spread,
+			flagged: z.array(z.number()),
+			headline: z.number(),
+			medianLogError: z
+				.number()
+				.nullable()
+				.optional()
+				.describe('Standard error of the logarithm of the median (Price and Bonett).')
+		})
 		.nullable()
 		.describe('The cell as it stands now, with all its runs.'),
 	signatureRemoved: z.boolean().describe('Whether the cell was signed off, which new readings undo.'),
 	warnings: z
 		.array(z.string())
-		.describe('Readings a hundred times and more from those there were, stored all the same: look at their unit.')
+		.describe(
+			'Readings a hundred times and more from those there were, stored all the same: look at their unit.'
+		)
 });
 
 /** Campaigns, runs and what they say. */

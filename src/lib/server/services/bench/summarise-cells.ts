@@ -1,6 +1,7 @@
 import { countedReadings } from '../../../domain/bench/campaign';
-import type { Comparison, Overall, Summary } from '../../../domain/bench/figures';
+import type { Comparison, Difference, Overall, Summary } from '../../../domain/bench/figures';
 import type { Direction } from '../../../domain/bench/words';
+import { comparedTogether } from '../../../domain/bench/held-against';
 import { done, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import { readCampaign, type MeasuredCampaign } from './read-campaign';
@@ -24,12 +25,16 @@ export interface SummarisedCell {
 	signedBy: string | null;
 	signedAt: string | null;
 	comparison: Comparison | null;
+	/** In its place where a ratio says nothing. */
+	difference: Difference | null;
 }
 
 export interface CampaignSummary {
 	campaign: string;
 	name: string;
 	baseline: string;
+	/** Comparisons read together: each verdict is corrected for so many (Holm). */
+	together: number;
 	cells: SummarisedCell[];
 	overall: ({ profile: string } & Overall)[];
 }
@@ -71,7 +76,8 @@ export function summaryOf({ plan, matrix, figures }: MeasuredCampaign): Campaign
 				}),
 				signedBy,
 				signedAt,
-				comparison
+				comparison,
+				difference: cell.difference ?? null
 			}
 		];
 	});
@@ -79,6 +85,7 @@ export function summaryOf({ plan, matrix, figures }: MeasuredCampaign): Campaign
 		campaign: plan.head.slug,
 		name: plan.head.name,
 		baseline: matrix.baseline,
+		together: comparedTogether(figures.cells),
 		cells,
 		overall: matrix.profiles.flatMap((profile) => {
 			const figure = figures.overall[profile];

@@ -19,6 +19,9 @@ interface Revision {
 const kitN = ['n-101', 'n-102', 'n-103', 'n-104', 'n-105', 'n-106', 'n-107', 'n-108'];
 const kitM = ['m-201', 'm-202', 'm-203', 'm-204', 'm-205', 'm-206'];
 
+/** What the firmware of each rig is, whatever its version. */
+const families: Record<string, string> = { 'N-12': 'Forge X', 'M-4': 'Anvil M', 'G-2': 'Forge X' };
+
 const rigs: Record<string, Revision[]> = {
 	'N-12': [
 		{
@@ -89,7 +92,8 @@ export const rigActs = ({ calendar }: World): Act[] =>
 			who,
 			what: `rig ${name}`,
 			run: async (ctx) => {
-				if (change === undefined) return createRig(ctx, rigInput.parse({ name, ...parts }));
+				if (change === undefined)
+					return createRig(ctx, rigInput.parse({ name, firmwareFamily: families[name], ...parts }));
 				const slug = name.toLowerCase();
 				const [rig] = await rigQueries.byRefs(ctx.db, [slug]);
 				return reviseRig(ctx, slug, rigRevise.parse({ ...parts, change, version: rig?.version }));

@@ -74,7 +74,8 @@ export const passForm = z
 		/** Local time in the publication's zone; empty for now. */
 		started: z.string().trim().max(40).default(''),
 		notes: paragraphs(1000).default(''),
-		sure: z.union([z.boolean(), z.literal('on')]).default(false)
+		/** “on” where a person says that what was asked about is as measured. */
+		sure: z.string().max(10).default('')
 	})
 	.transform(({ points, started, sure, ...rest }, ctx): SweepPassInput & { started: string } => {
 		const fault = (path: string, message: string) => {
@@ -85,7 +86,7 @@ export const passForm = z
 			fault('points', block.message);
 			return z.NEVER;
 		}
-		const parsed = sweepPassInput.safeParse({ ...rest, points: block.rows, sure: sure !== false });
+		const parsed = sweepPassInput.safeParse({ ...rest, points: block.rows, sure: sure === 'on' });
 		if (parsed.success) return { ...parsed.data, started };
 		for (const { path, message } of parsed.error.issues) {
 			const [field = 'points', row] = path;
@@ -103,5 +104,5 @@ export const blankPass = (key: string): PassFormTyped => ({
 	ambientC: '',
 	started: '',
 	notes: '',
-	sure: false
+	sure: ''
 });

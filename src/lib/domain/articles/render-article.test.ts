@@ -90,7 +90,7 @@ describe('directives', () => {
 	});
 
 	it.each([
-		['::plate{kind=frames workload=source-build}', 'It can be scores, gains.'],
+		['::plate{kind=frames workload=source-build}', 'It can be scores, gains,'],
 		['::plate{kind=scores}', 'needs a workload'],
 		['::plate', 'needs kind='],
 		[':plate{kind=gains}', 'line of its own'],

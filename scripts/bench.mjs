@@ -6,6 +6,7 @@ import { join } from 'node:path';
 import { measureCoverage } from './parts/bench/coverage.mjs';
 import { lineOf } from './parts/bench/figure.mjs';
 import { measureJobs } from './parts/bench/jobs.mjs';
+import { measureLive } from './parts/bench/live.mjs';
 import { measurePages } from './parts/bench/pages.mjs';
 import { measureStatistics } from './parts/bench/statistics.mjs';
 import { measureTable } from './parts/bench/table.mjs';
@@ -37,6 +38,7 @@ try {
 	await measureTable(print);
 	await measureCoverage(print);
 	await measurePages(server, mail, folder, print);
+	await measureLive(server, mail, folder, print);
 	await measureJobs(server, mail, folder, print);
 } finally {
 	await Promise.all([server.stop(), mail.stop()]);

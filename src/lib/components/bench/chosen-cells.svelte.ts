@@ -27,7 +27,8 @@ function between(grid: CellGrid, one: string, other: string): string[] {
 /** The cells ticked on a board: one by one, or all between two with Shift; arrows move from box to box. */
 export class ChosenCells {
 	readonly #keys = new SvelteSet<string>();
-	#last: string | null = null;
+	/** The box ticked last by itself: the corner that Shift keeps. */
+	#corner: string | null = null;
 
 	get size(): number {
 		return this.#keys.size;
@@ -37,19 +38,19 @@ export class ChosenCells {
 		return this.#keys.has(key);
 	}
 
-	/** @param grid given where all from the last box on are meant */
+	/** @param grid given where all from the corner on are meant */
 	choose(key: string, chosen: boolean, grid: CellGrid | null): void {
-		const keys = grid && this.#last !== null ? between(grid, this.#last, key) : [key];
+		const keys = grid && this.#corner !== null ? between(grid, this.#corner, key) : [key];
 		for (const one of keys) {
 			if (chosen) this.#keys.add(one);
 			else this.#keys.delete(one);
 		}
-		this.#last = key;
+		if (!grid) this.#corner = key;
 	}
 
 	clear(): void {
 		this.#keys.clear();
-		this.#last = null;
+		this.#corner = null;
 	}
 
 	move(event: KeyboardEvent, grid: CellGrid): void {
@@ -62,7 +63,7 @@ export class ChosenCells {
 		const key = grid[row]?.[column];
 		if (key === undefined) return;
 		if (event.shiftKey) {
-			if (this.#last === null) this.choose(box.value, true, null);
+			if (this.#corner === null) this.choose(box.value, true, null);
 			this.choose(key, true, grid);
 		}
 		box

@@ -1,10 +1,11 @@
 import { campaignState, type CampaignState } from '../../../domain/bench/campaign-state';
 import { countedReadings } from '../../../domain/bench/campaign';
 import type { CellRun } from '../../../domain/bench/cell-runs';
+import type { CellOff } from '../../../domain/bench/drift-facts';
 import type { CellFigures, WorkloadFacts } from '../../../domain/bench/figures';
 import { currentProfile, progress, toRun, type Progress, type ToRun } from '../../../domain/bench/progress';
 import { may } from '../../../domain/people/policy';
-import { done, type Outcome } from '../../../domain/shared/outcome';
+import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as campaigns from '../../db/queries/campaign';
 import * as articles from '../../db/queries/campaign-articles';
@@ -12,11 +13,15 @@ import type { CampaignHead } from '../../db/queries/campaign-facts';
 import * as live from '../../db/queries/live';
 import * as settings from '../../db/queries/settings';
 import { readCampaign, type MeasuredCampaign } from './read-campaign';
+import { sharedReads } from './share-read';
+import { campaignOff } from './rig-off';
 
 export interface Board {
 	head: CampaignHead;
 	state: CampaignState;
 	articles: { slug: string; title: string }[];
+	/** Cells measured while the rig was off, by its own stock. */
+	off: CellOff[];
 	profiles: { slug: string; name: string }[];
 	workloads: (WorkloadFacts & { needed: number })[];
 	baseline: string;
@@ -70,7 +75,7 @@ function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workloa
 function boardOf(
 	measured: MeasuredCampaign,
 	wanted: { profile: string; workload: string }
-): Omit<Board, 'articles' | 'zone' | 'may' | 'newest'> {
+): Omit<Board, 'articles' | 'off' | 'zone' | 'may' | 'newest'> {
 	const { plan, matrix, figures, recorded } = measured;
 	const current = currentProfile(matrix.runs);
 	const [next] = toRun(figures.cells, current);
@@ -104,23 +109,43 @@ function boardOf(
 	};
 }
 
+interface ReadOnce {
+	newest: number;
+	measured: Outcome<MeasuredCampaign>;
+}
+
+// What is read is the same for everybody who may read it; one for each database, as tests have several.
+const shares = new WeakMap<Context['db'], ReturnType<typeof sharedReads<ReadOnce>>>();
+
+function share({ db }: Context) {
+	const found = shares.get(db) ?? sharedReads<ReadOnce>();
+	shares.set(db, found);
+	return found;
+}
+
 /** The campaign's board: the matrix, how far it is, what to run next, and the selected cell whole. */
 export async function readBoard(
 	ctx: Context,
 	campaignRef: string,
 	wanted: { profile: string; workload: string }
 ): Promise<Outcome<Board>> {
+	if (!may(ctx.actor, 'bench.read')) return refuse('forbidden', 'Your roles do not include the bench.');
 	const id = await campaigns.idOf(ctx.db, campaignRef);
-	// Before the figures, so that what comes in between is told once more rather than never.
-	const newest = id === undefined ? 0 : await live.newestOf(ctx.db, id);
-	const measured = await readCampaign(ctx, campaignRef);
+	if (id === undefined) return refuse('not_found', 'There is no such campaign.');
+	const { newest, measured } = await share(ctx)(id, async () => ({
+		// Before the figures, so that what comes in between is told once more rather than never.
+		newest: await live.newestOf(ctx.db, id),
+		measured: await readCampaign(ctx, String(id))
+	}));
 	if (!measured.ok) return measured;
-	const [bound, { zone }] = await Promise.all([
+	const [bound, off, { zone }] = await Promise.all([
 		articles.ofCampaign(ctx.db, measured.value.plan.head.id),
+		campaignOff(ctx, measured.value),
 		settings.publication(ctx.db)
 	]);
 	return done({
 		...boardOf(measured.value, wanted),
+		off,
 		articles: bound.map(({ slug, title }) => ({ slug, title })),
 		zone,
 		newest,

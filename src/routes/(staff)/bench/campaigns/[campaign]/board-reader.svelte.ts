@@ -18,6 +18,8 @@ interface Setup {
 
 /** What happens within so many milliseconds is read together. */
 const gatherMs = 250;
+/** A board that takes long to read is read less often: it rests for so many times as long as it took. */
+const restTimes = 4;
 
 /**
  * Reads the board anew, and opens other cells of it, without ever leaving the page: an entry can go on at once in the
@@ -30,6 +32,7 @@ export class BoardReader {
 	#line: Promise<void> = Promise.resolve();
 	#timer: ReturnType<typeof setTimeout> | undefined;
 	#count = 0;
+	#tookMs = 0;
 	readonly #setup: Setup;
 
 	constructor(setup: Setup) {
@@ -48,10 +51,13 @@ export class BoardReader {
 
 	/** Reads the board soon. */
 	refresh(): void {
-		this.#timer ??= setTimeout(() => {
-			this.#timer = undefined;
-			this.#line = this.#line.then(() => (this.wanted ? this.#open(this.wanted) : this.#read()));
-		}, gatherMs);
+		this.#timer ??= setTimeout(
+			() => {
+				this.#timer = undefined;
+				this.#line = this.#line.then(() => (this.wanted ? this.#open(this.wanted) : this.#read()));
+			},
+			Math.max(gatherMs, restTimes * this.#tookMs)
+		);
 	}
 
 	/** Opens another cell. */
@@ -60,12 +66,22 @@ export class BoardReader {
 		this.#line = this.#line.then(() => this.#open(cell));
 	}
 
+	/** Keeps the cell open that the page chose, whatever would be chosen next time. */
+	pin(): void {
+		this.#line = this.#line.then(() =>
+			this.#visit(this.#setup.given().board.selected, true).then(() => undefined)
+		);
+	}
+
+	/** Null where the server cannot be reached: then the framework hands out what the page has already. */
 	async #load(address: string): Promise<PageData | null> {
+		const began = performance.now();
 		try {
 			const got = await preloadData(address);
-			return got.type === 'loaded' && got.status === 200 && 'board' in got.data
-				? (got.data as PageData)
-				: null;
+			this.#tookMs = performance.now() - began;
+			if (got.type !== 'loaded' || got.status !== 200 || !('board' in got.data)) return null;
+			const data = got.data as PageData;
+			return data.freshKey === this.#setup.given().freshKey ? null : data;
 		} catch {
 			return null;
 		}
@@ -83,15 +99,24 @@ export class BoardReader {
 
 	async #open(cell: Cell): Promise<void> {
 		if (this.wanted !== cell) return;
+		const { profile, workload } = this.#setup.given().board.selected;
+		const there = profile === cell.profile && workload === cell.workload;
+		if (!there && !(await this.#visit(cell))) return;
+		if (this.wanted === cell) this.wanted = null;
+		if (there) await this.#read();
+	}
+
+	/** Loaded first: the framework shows an error page for an address that it cannot reach. */
+	async #visit(cell: Cell, replaceState = false): Promise<boolean> {
 		const ids = this.#setup.storedIds();
 		const href = this.#setup.href(cell);
-		// Loaded first: the framework shows an error page for an address that it cannot reach.
-		if (!(await this.#load(href)) || this.wanted !== cell) return;
+		if (!(await this.#load(href))) return false;
+		if (this.wanted !== null && this.wanted !== cell) return false;
 		// The address is the campaign's own, made by the page.
 		// eslint-disable-next-line svelte/no-navigation-without-resolve
-		await goto(href, { keepFocus: true, noScroll: true });
+		await goto(href, { keepFocus: true, noScroll: true, replaceState });
 		this.#setup.onread(ids);
-		if (this.wanted === cell) this.wanted = null;
+		return true;
 	}
 
 	stop(): void {

@@ -15,21 +15,21 @@ test('a ladder is begun, climbed by form and by paste, and says what to try next
 	await signIn(page, 'tester');
 	await page.goto('/bench/ladders');
 	await page.getByRole('link', { name: 'Begin a ladder' }).click();
-	await page.getByLabel('Rig', { exact: true }).selectOption('n-12');
-	await page.getByLabel('Name').fill('Evening ladder');
-	await page.getByLabel('Stress 1').selectOption('heat-soak');
+	await page.getByRole('combobox', { name: 'Rig', exact: true }).selectOption('n-12');
+	await page.getByRole('textbox', { name: 'Name', exact: true }).fill('Evening ladder');
+	await page.getByRole('combobox', { name: 'Stress 1', exact: true }).selectOption('heat-soak');
 	await page.getByLabel('Counts as passed after').first().fill('30');
-	await page.getByLabel('Clock').fill('5000');
-	await page.getByLabel('Core voltage').fill('1,3');
-	await page.getByLabel('Temperature').fill('90');
-	await page.getByLabel('Whose limits').fill('the maker’s data sheet');
+	await page.getByRole('textbox', { name: 'Clock', exact: true }).fill('5000');
+	await page.getByRole('textbox', { name: 'Core voltage', exact: true }).fill('1,3');
+	await page.getByRole('textbox', { name: 'Temperature', exact: true }).fill('90');
+	await page.getByRole('textbox', { name: 'Whose limits', exact: true }).fill('the maker’s data sheet');
 	await page.getByRole('button', { name: 'Begin it' }).click();
 	await page.waitForURL('**/bench/ladders/evening-ladder');
 
 	const next = page.locator('[data-next="heat-soak"]');
-	await page.getByLabel('Clock', { exact: false }).first().fill('4800');
-	await page.getByLabel('Core voltage').fill('1.2');
-	await page.getByLabel('Hottest').first().fill('74');
+	await page.getByRole('textbox', { name: 'Clock', exact: true }).fill('4800');
+	await page.getByRole('textbox', { name: 'Core voltage', exact: true }).fill('1.2');
+	await page.getByRole('textbox', { name: 'Hottest', exact: true }).fill('74');
 	await page.getByRole('button', { name: 'Store the attempt' }).click();
 	await expect(page.getByText('The attempt is stored.')).toBeVisible();
 	// Nothing has failed: up by four steps of 25 MHz.
@@ -57,11 +57,11 @@ test('a ladder is begun, climbed by form and by paste, and says what to try next
 test('an attempt that is wrong says so beside its field and keeps what was typed', async ({ page }) => {
 	await signIn(page, 'tester');
 	await page.goto('/bench/ladders/aldermoor-1650-by-hand');
-	await page.getByLabel('Outcome').first().selectOption('failed');
-	await page.getByLabel('Notes').fill('fan noise at the end');
+	await page.getByRole('combobox', { name: 'Outcome', exact: true }).selectOption('failed');
+	await page.getByRole('textbox', { name: 'Notes', exact: true }).fill('fan noise at the end');
 	await page.getByRole('button', { name: 'Store the attempt' }).click();
 	await expect(page.getByText('Say what was seen, such as crash or error.')).toBeVisible();
-	await expect(page.getByLabel('Notes')).toHaveValue('fan noise at the end');
+	await expect(page.getByRole('textbox', { name: 'Notes', exact: true })).toHaveValue('fan noise at the end');
 });
 
 test('a sweep says where it crosses, what to set, and how a script sends a pass', async ({ page }) => {

@@ -182,6 +182,12 @@ describe('what an article may name', () => {
 	});
 
 	it('is empty for no campaign', async () => {
-		expect(await gather([])).toEqual({ campaigns: [], duties: [], zone: 'UTC' });
+		expect(await gather([])).toMatchObject({
+			campaigns: [],
+			duties: [],
+			ladders: [],
+			sweeps: [],
+			zone: 'UTC'
+		});
 	});
 });

@@ -168,6 +168,9 @@ export const summaryQuery = z.object({
 		.describe('Slug or id of the profile the others are held against; stock when left out.')
 });
 
+/** What a page of trade-offs is asked for: the baseline as above, and the part whose price value is reckoned with. */
+export const tradeOffQuery = summaryQuery.extend({ part: z.string().trim().max(120).optional() });
+
 /** Which cell of a board an address selects, which cells it shows, and whether several are being chosen. */
 export const boardQuery = z.object({
 	profile: z.string().trim().max(80).catch('').default(''),

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { directions } from '../domain/bench/words';
 import { verdicts } from '../domain/bench/figures';
+import { valueKinds } from '../domain/bench/value-figures';
 import { ladderResults } from '../domain/articles/plates/ladder-spec';
 
 const words = z.string().max(1000);
@@ -14,34 +15,35 @@ const base = {
 	campaign: name
 };
 
+const bar = {
+	profile: name,
+	name,
+	series: z.number().int().min(0),
+	value: figure,
+	ci95: interval,
+	n: z.number().int().min(0),
+	printed: name,
+	printedInterval: name.nullable()
+};
+const bars = { ...base, workload: name, unit: name, better: z.enum(directions) };
+
 const scores = z.object({
-	...base,
+	...bars,
 	kind: z.literal('scores'),
-	workload: name,
-	unit: name,
-	better: z.enum(directions),
-	rows: z
-		.array(
-			z.object({
-				profile: name,
-				name,
-				series: z.number().int().min(0),
-				value: figure,
-				ci95: interval,
-				mean: figure,
-				median: figure,
-				sd: figure.nullable(),
-				n: z.number().int().min(0),
-				printed: name,
-				printedInterval: name.nullable()
-			})
-		)
-		.max(100)
+	rows: z.array(z.object({ ...bar, mean: figure, median: figure, sd: figure.nullable() })).max(100)
 });
 
-const gains = z.object({
+const value = z.object({
+	...bars,
+	kind: z.literal('value'),
+	per: z.enum(valueKinds),
+	how: words,
+	from: z.array(name).max(10),
+	rows: z.array(z.object(bar)).max(100)
+});
+
+const dots = {
 	...base,
-	kind: z.literal('gains'),
 	baseline: z.object({ profile: name, name }),
 	series: z.array(z.object({ profile: name, name, series: z.number().int().min(0) })).max(60),
 	rows: z
@@ -50,7 +52,7 @@ const gains = z.object({
 				workload: name,
 				name,
 				kind: name,
-				leastDifferencePercent: figure,
+				leastDifferencePercent: figure.nullable(),
 				points: z
 					.array(
 						z
@@ -61,7 +63,7 @@ const gains = z.object({
 								ratio: figure,
 								n: z.number().int().min(0),
 								nBaseline: z.number().int().min(0),
-								verdict: z.enum(verdicts),
+								verdict: z.enum(verdicts).nullable(),
 								printed: name,
 								printedInterval: name.nullable()
 							})
@@ -71,6 +73,43 @@ const gains = z.object({
 			})
 		)
 		.max(100)
+};
+const gains = z.object({ ...dots, kind: z.literal('gains') });
+const overall = z.object({ ...dots, kind: z.literal('overall'), workloads: z.array(name).max(200) });
+const tradeOff = z.object({ ...dots, kind: z.literal('trade-off'), workloads: z.array(name).max(200) });
+
+const drift = z.object({
+	...base,
+	kind: z.literal('drift'),
+	rig: name,
+	workload: name,
+	unit: name,
+	limits: z.object({
+		centre: figure,
+		sigma: figure,
+		lower: figure,
+		upper: figure,
+		averageMovingRange: figure,
+		upperMovingRange: figure
+	}),
+	points: z
+		.array(
+			z.object({
+				run: z.number().int(),
+				campaign: name,
+				campaignName: name,
+				revision: z.number().int(),
+				at: name,
+				number: z.number().int(),
+				n: z.number().int(),
+				mean: figure,
+				inWindow: z.boolean(),
+				movingRange: figure.nullable(),
+				average: z.object({ ewma: figure, lower: figure, upper: figure }).nullable(),
+				signals: z.array(name).max(10)
+			})
+		)
+		.max(2000)
 });
 
 const ladder = z.object({
@@ -130,6 +169,6 @@ const sweep = z.object({
 /** The plates an editor's page asks to have drawn: what the renderer made of its directives. */
 export const platesAsk = z.object({
 	specs: z
-		.array(z.discriminatedUnion('kind', [scores, gains, ladder, sweep]))
+		.array(z.discriminatedUnion('kind', [scores, gains, overall, value, tradeOff, drift, ladder, sweep]))
 		.max(60, 'A page can have sixty plates at most.')
 });

@@ -1,4 +1,5 @@
 import type { CellFigures, Overall, WorkloadFacts } from '../bench/figures';
+import type { DriftFacts } from '../bench/drift-facts';
 import type { LadderFacts } from '../bench/stability/ladder-facts';
 import type { SweepFacts } from '../bench/stability/sweep-facts';
 import type { SettingQuantity } from '../bench/words';
@@ -83,6 +84,8 @@ export interface ArticleData {
 	/** Ladders and sweeps of the rigs of those campaigns; left out of editions from before there were any. */
 	ladders?: LadderFacts[];
 	sweeps?: SweepFacts[];
+	/** Stock of those rigs over time, workload by workload; left out of older editions as well. */
+	drifts?: DriftFacts[];
 	/** The publication's zone for the dates it prints, such as Europe/Oslo. */
 	zone: string;
 }

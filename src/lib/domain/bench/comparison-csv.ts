@@ -1,6 +1,14 @@
 import Papa from 'papaparse';
+import type { CellUncertainty } from './cell-uncertainty';
 import type { CellNotes } from './comparison-notes';
 import { verdictWords, type CellFigures, type Overall, type Verdict, type WorkloadFacts } from './figures';
+
+interface ComparedNotes extends CellNotes {
+	/** That the rig was off meanwhile, in words. */
+	off: string | null;
+	/** Null where no instrument is named. */
+	uncertainty: CellUncertainty | null;
+}
 
 /** A campaign's profiles held against one of them. */
 export interface CampaignComparison {
@@ -10,7 +18,7 @@ export interface CampaignComparison {
 	baseline: string;
 	profiles: { slug: string; name: string }[];
 	workloads: WorkloadFacts[];
-	cells: (CellFigures & { notes: CellNotes })[];
+	cells: (CellFigures & { notes: ComparedNotes })[];
 	/** Comparisons that were tested, and so corrected for each other. */
 	together: number;
 	overall: Record<string, Overall>;
@@ -46,6 +54,10 @@ export function comparisonCsv(comparison: CampaignComparison): string {
 			difference_high_95: difference?.ci95?.[1] ?? '',
 			verdict: words((held ?? difference)?.verdict),
 			verdict_alone: words((held ?? difference)?.alone),
+			standard_uncertainty: notes.uncertainty?.u ?? '',
+			coverage_factor: notes.uncertainty?.k ?? '',
+			expanded_uncertainty: notes.uncertainty?.expanded ?? '',
+			rig_off: notes.off ?? '',
 			signed_by: signedBy ?? ''
 		})
 	);

@@ -1,60 +1,45 @@
-import type { Comparison, Summary, Verdict } from './figures';
-import { compareCells, compareSummaries } from './statistics/compare';
+import type { Comparison, Difference, Summary } from './figures';
+import { heldAgainst, type HeldWorkload, type Standing } from './held-against';
+import { runsNeeded, runsNeededOfDifference, runsNeededWords } from './statistics/runs-needed';
 import { summarise } from './statistics/summary';
-import type { Direction, Headline } from './words';
 
-interface CellRules {
-	better: Direction;
-	headline: Headline;
-	leastDifferencePercent: number;
-}
+type CellRules = Omit<HeldWorkload, 'slug'>;
 
 export interface SoFar {
 	summary: Summary;
-	/** Null for the baseline itself, or where a side has no mean above zero. */
+	/** By itself, not corrected for the other cells. Null for the baseline itself, or where there is no ratio. */
 	comparison: Comparison | null;
+	/** In its place where a ratio says nothing. */
+	difference: Difference | null;
 	/** What the comparison would be without the flagged readings; null where none is flagged or nothing changes. */
 	withoutFlagged: Comparison | null;
-	/**
-	 * Further readings after which, were they like those taken, there would be a verdict; null where there is one
-	 * already, where a side has a single reading, or where more than a hundred would not settle it.
-	 */
-	moreToSettle: number | null;
+	/** How many more readings would settle it, in words; null where there is a verdict already. */
+	moreToSettle: string | null;
 }
 
-/** Further readings that are thought through before the estimate gives up. */
-const mostFurther = 100;
+const nothing: Standing = { comparison: null, difference: null };
 
-const settled = (verdict: Verdict): boolean => verdict !== 'not-enough';
-
-/** Estimate of how many more readings settle it, mean and spread staying as they are (common practice, no source). */
-function moreToSettle(summary: Summary, baseline: Summary, rules: CellRules): number | null {
-	if (summary.sd === null || baseline.sd === null) return null;
-	const spread = { mean: summary.mean, sd: summary.sd };
-	const against = { mean: baseline.mean, sd: baseline.sd, n: baseline.n };
-	for (let more = 1; more <= mostFurther; more += 1) {
-		const { verdict } = compareSummaries(
-			{ ...spread, n: summary.n + more },
-			against,
-			rules.better,
-			rules.leastDifferencePercent
-		);
-		if (settled(verdict)) return more;
-	}
-	return null;
+/** A cell held against the baseline's as the comparison holds it, but alone. */
+function held(summary: Summary, baseline: Summary, rules: CellRules): Standing {
+	const cells = [
+		{ profile: 'baseline', workload: 'this', summary: baseline },
+		{ profile: 'subject', workload: 'this', summary }
+	];
+	return heldAgainst(cells, [{ ...rules, slug: 'this' }], 'baseline')[1] ?? nothing;
 }
 
-const positive = (values: readonly number[]): boolean =>
-	values.length > 0 && values.reduce((sum, value) => sum + value, 0) > 0;
-
-function compare(
-	values: readonly number[],
-	baseline: readonly number[],
+function moreToSettle(
+	summary: Summary,
+	baseline: Summary,
+	{ comparison, difference }: Standing,
 	rules: CellRules
-): Comparison | null {
-	return positive(values) && positive(baseline)
-		? compareCells(values, baseline, rules.better, rules.leastDifferencePercent)
-		: null;
+): string | null {
+	if ((comparison ?? difference)?.verdict !== 'not-enough') return null;
+	return runsNeededWords(
+		difference
+			? runsNeededOfDifference(summary, baseline, difference.least)
+			: runsNeeded(summary, baseline, rules.better, rules.leastDifferencePercent)
+	);
 }
 
 /**
@@ -70,15 +55,18 @@ export function soFar(
 ): SoFar | null {
 	if (values.length === 0) return null;
 	const summary = summarise(values, rules.headline);
-	const comparison = baseline && compare(values, baseline, rules);
-	if (!baseline || !comparison)
-		return { summary, comparison: null, withoutFlagged: null, moreToSettle: null };
+	const against = baseline && baseline.length > 0 ? summarise(baseline, rules.headline) : null;
+	const standing = against ? held(summary, against, rules) : nothing;
+	const { comparison } = standing;
 	const rest = values.filter((_value, at) => !summary.flagged.includes(at));
-	const without = summary.flagged.length > 0 ? compare(rest, baseline, rules) : null;
+	const without =
+		against && comparison && summary.flagged.length > 0 && rest.length > 0
+			? held(summarise(rest, rules.headline), against, rules).comparison
+			: null;
 	return {
 		summary,
-		comparison,
-		withoutFlagged: without?.verdict === comparison.verdict ? null : without,
-		moreToSettle: settled(comparison.verdict) ? null : moreToSettle(summary, summarise(baseline), rules)
+		...standing,
+		withoutFlagged: without?.verdict === comparison?.verdict ? null : without,
+		moreToSettle: against && moreToSettle(summary, against, standing, rules)
 	};
 }

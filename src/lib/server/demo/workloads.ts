@@ -231,6 +231,23 @@ const list: Entry[] = [
 		}
 	),
 	entry(
+		{ cvPercent: 0.7, decimals: 1 },
+		{
+			slug: 'render-draw',
+			name: 'Draw under render',
+			programVersion: '',
+			settings: 'At the wall, during Tile render, mean of the run.',
+			quantity: 'power',
+			unit: 'W',
+			better: 'lower',
+			class: 'all-core',
+			warmUps: 1,
+			repeats: 5,
+			coolDownS: 120,
+			leastDifferencePercent: 2
+		}
+	),
+	entry(
 		{ cvPercent: 0.5, decimals: 3 },
 		{
 			slug: 'frame-energy',

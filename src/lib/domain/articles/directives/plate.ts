@@ -1,25 +1,14 @@
+import { valueKinds } from '../../bench/value-figures';
 import { gainsSpec } from '../plates/gains-spec';
 import { plateFigure } from '../plates/figure';
 import { scoresSpec } from '../plates/scores-spec';
 import { plateKinds, type PlateSpec } from '../plates/spec';
 import { unknownName } from '../names-near';
-import type { ArticleData, CampaignData } from '../data';
+import type { ArticleData } from '../data';
 import { attribute, findBaseline, findCampaign, findWorkload } from './lookup';
 import { ladderPlate, sweepPlate } from './plate-of-bench';
+import { chosen, driftPlate, overallPlate, tradeOffPlate, valuePlate } from './plate-of-comparison';
 import { directive, found, missing, type Call, type Lookup, type UsedCell } from './shape';
-
-/** `profiles=a,b` in the campaign's names; undefined for all of them. */
-function chosen(call: Call, campaign: CampaignData): Lookup<string[] | undefined> {
-	const names = call.attributes.profiles?.split(/[\s,]+/).filter((name) => name !== '');
-	if (!names) return found(undefined);
-	const known = campaign.profiles.map((one) => one.slug);
-	const stranger = [...names, ...(call.attributes.subject ? [call.attributes.subject] : [])].find(
-		(name) => !known.includes(name)
-	);
-	return stranger === undefined
-		? found(names)
-		: unknownName(`${campaign.name} has no profile called “${stranger}”.`, stranger, known);
-}
 
 function scores(call: Call, data: ArticleData): Lookup<PlateSpec> {
 	if (call.attributes.workload === undefined) {
@@ -61,19 +50,37 @@ function gains(call: Call, data: ArticleData): Lookup<PlateSpec> {
 /** The cells whose readings a plate shows. */
 function cellsOf(spec: PlateSpec): UsedCell[] {
 	const { campaign } = spec;
-	if (spec.kind === 'ladder' || spec.kind === 'sweep') return [];
-	if (spec.kind === 'scores') {
-		return spec.rows.map(({ profile }) => ({ campaign, profile, workload: spec.workload }));
+	switch (spec.kind) {
+		// What they show is of a rig over many campaigns, or of no cell at all.
+		case 'ladder':
+		case 'sweep':
+		case 'drift':
+			return [];
+		case 'scores':
+			return spec.rows.map(({ profile }) => ({ campaign, profile, workload: spec.workload }));
+		case 'value':
+			return spec.rows.flatMap(({ profile }) =>
+				spec.from.map((workload) => ({ campaign, profile, workload }))
+			);
+		case 'gains':
+			return spec.rows.flatMap(({ workload, points }) => [
+				{ campaign, profile: spec.baseline.profile, workload },
+				...points.flatMap((point) => (point ? [{ campaign, profile: point.profile, workload }] : []))
+			]);
+		default:
+			return [spec.baseline, ...spec.series].flatMap(({ profile }) =>
+				spec.workloads.map((workload) => ({ campaign, profile, workload }))
+			);
 	}
-	return spec.rows.flatMap(({ workload, points }) => [
-		{ campaign, profile: spec.baseline.profile, workload },
-		...points.flatMap((point) => (point ? [{ campaign, profile: point.profile, workload }] : []))
-	]);
 }
 
 const byKind: Record<PlateSpec['kind'], (call: Call, data: ArticleData) => Lookup<PlateSpec>> = {
 	scores,
 	gains,
+	overall: overallPlate,
+	value: valuePlate,
+	'trade-off': tradeOffPlate,
+	drift: driftPlate,
 	ladder: ladderPlate,
 	sweep: sweepPlate
 };
@@ -81,17 +88,18 @@ const byKind: Record<PlateSpec['kind'], (call: Call, data: ArticleData) => Looku
 const isKind = (kind: string): kind is PlateSpec['kind'] => kind in byKind;
 
 /**
- * `::plate{kind=scores workload=}`, `::plate{kind=gains over=}`, `::plate{kind=ladder ladder=}` and
- * `::plate{kind=sweep sweep=}`: a chart of what is stored.
+ * `::plate{kind=scores workload=}`, `::plate{kind=gains over=}`, `::plate{kind=overall over=}`,
+ * `::plate{kind=value per= workload=}`, `::plate{kind=trade-off}`, `::plate{kind=drift rig= workload=}`,
+ * `::plate{kind=ladder ladder=}` and `::plate{kind=sweep sweep=}`: a chart of what is stored.
  */
 export const plate = directive<PlateSpec>({
 	name: 'plate',
 	level: 'block',
-	words: 'A chart: the scores of one workload, the gains over a profile, a ladder, or a sweep.',
+	words: 'A chart: scores, gains, overall gains, value, a trade-off, drift, a ladder, or a sweep.',
 	attributes: [
 		attribute.oneOf(
 			'kind',
-			'scores of one workload, gains over a profile, a ladder, or a sweep',
+			'scores of one workload, gains over a profile, overall gains, value for power or price, what is gained and given up, stock over time, a ladder, or a sweep',
 			plateKinds,
 			true
 		),
@@ -105,6 +113,24 @@ export const plate = directive<PlateSpec>({
 			values: () => null
 		},
 		{ ...attribute.profile(false), name: 'subject', words: 'the profile drawn in blue' },
+		attribute.oneOf(
+			'per',
+			'for a plate of value: watt if left out, price, or the energy of a run',
+			valueKinds
+		),
+		{
+			name: 'part',
+			required: false,
+			words: 'whose price, for value per price; the processor if left out',
+			values: (data) =>
+				data.campaigns.flatMap(({ kit }) => kit.filter((one) => one.price).map((one) => one.part))
+		},
+		{
+			name: 'rig',
+			required: false,
+			words: 'whose stock, for a plate of drift',
+			values: (data) => [...new Set((data.drifts ?? []).map((one) => one.rig.slug))]
+		},
 		{
 			name: 'ladder',
 			required: false,

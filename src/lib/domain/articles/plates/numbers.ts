@@ -4,7 +4,9 @@ import { table } from '../html';
 import { csv, type Field } from './csv';
 import { ladderCsv, ladderTable } from './ladder-numbers';
 import { sweepCsv, sweepTable } from './sweep-numbers';
-import type { GainsSpec, PlateSpec, ScoresSpec } from './spec';
+import { driftCsv, driftTable } from './drift-numbers';
+import type { DotsSpec, PlateSpec, ScoresSpec } from './spec';
+import { valueCsv, valueTable } from './value-numbers';
 
 const scoresTable = (spec: ScoresSpec): string =>
 	table(
@@ -32,7 +34,7 @@ const scoresTable = (spec: ScoresSpec): string =>
 		]
 	);
 
-const gainsTable = (spec: GainsSpec): string =>
+const dotsTable = (spec: DotsSpec): string =>
 	table(
 		`Numbers of ${spec.title}`,
 		[
@@ -55,7 +57,7 @@ const gainsTable = (spec: GainsSpec): string =>
 								printedRatio(point.ratio),
 								point.printed,
 								point.printedInterval ?? 'none',
-								verdictWords[point.verdict]
+								point.verdict === null ? 'none' : verdictWords[point.verdict]
 							]
 						]
 			)
@@ -64,33 +66,41 @@ const gainsTable = (spec: GainsSpec): string =>
 
 /** The numbers of a plate as a table, at printed rounding. */
 export function plateTable(spec: PlateSpec): string {
-	if (spec.kind === 'scores') return scoresTable(spec);
-	if (spec.kind === 'gains') return gainsTable(spec);
-	return spec.kind === 'ladder' ? ladderTable(spec) : sweepTable(spec);
+	switch (spec.kind) {
+		case 'scores':
+			return scoresTable(spec);
+		case 'value':
+			return valueTable(spec);
+		case 'drift':
+			return driftTable(spec);
+		case 'ladder':
+			return ladderTable(spec);
+		case 'sweep':
+			return sweepTable(spec);
+		default:
+			return dotsTable(spec);
+	}
 }
 
-/** The numbers of a plate at full precision, as CSV by RFC 4180 with a header line. */
-export function plateCsv(spec: PlateSpec): string {
-	if (spec.kind === 'scores') {
-		return csv([
-			['profile', 'workload', 'unit', 'better', 'n', 'mean', 'median', 'sd', 'ci95_low', 'ci95_high'],
-			...spec.rows.map((row): Field[] => [
-				row.name,
-				spec.workload,
-				spec.unit,
-				spec.better,
-				row.n,
-				row.mean,
-				row.median,
-				row.sd,
-				row.ci95?.[0] ?? null,
-				row.ci95?.[1] ?? null
-			])
-		]);
-	}
-	if (spec.kind === 'ladder') return ladderCsv(spec);
-	if (spec.kind === 'sweep') return sweepCsv(spec);
-	return csv([
+const scoresCsv = (spec: ScoresSpec): string =>
+	csv([
+		['profile', 'workload', 'unit', 'better', 'n', 'mean', 'median', 'sd', 'ci95_low', 'ci95_high'],
+		...spec.rows.map((row): Field[] => [
+			row.name,
+			spec.workload,
+			spec.unit,
+			spec.better,
+			row.n,
+			row.mean,
+			row.median,
+			row.sd,
+			row.ci95?.[0] ?? null,
+			row.ci95?.[1] ?? null
+		])
+	]);
+
+const dotsCsv = (spec: DotsSpec): string =>
+	csv([
 		[
 			'workload',
 			'profile',
@@ -118,10 +128,27 @@ export function plateCsv(spec: PlateSpec): string {
 								point.gainPercent,
 								point.ci95?.[0] ?? null,
 								point.ci95?.[1] ?? null,
-								verdictWords[point.verdict]
+								point.verdict === null ? '' : verdictWords[point.verdict]
 							]
 						]
 			)
 		)
 	]);
+
+/** The numbers of a plate at full precision, as CSV by RFC 4180 with a header line. */
+export function plateCsv(spec: PlateSpec): string {
+	switch (spec.kind) {
+		case 'scores':
+			return scoresCsv(spec);
+		case 'value':
+			return valueCsv(spec);
+		case 'drift':
+			return driftCsv(spec);
+		case 'ladder':
+			return ladderCsv(spec);
+		case 'sweep':
+			return sweepCsv(spec);
+		default:
+			return dotsCsv(spec);
+	}
 }

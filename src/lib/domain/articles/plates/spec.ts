@@ -1,32 +1,51 @@
 import type { Verdict } from '../../bench/figures';
+import type { ValueKind } from '../../bench/value-figures';
 import type { Direction } from '../../bench/words';
+import type { DriftSpec } from './drift-spec';
 import type { LadderSpec } from './ladder-spec';
 import type { PlateBase } from './plate-base';
 import type { SweepSpec } from './sweep-spec';
 
 /** One bar. Figures at full precision in the plate's unit; texts as printed. */
-export interface ScoreRow {
+export interface BarRow {
 	profile: string;
 	name: string;
 	/** 0 is stock, in graphite; 1 the subject, in blue; then the further series. */
 	series: number;
 	value: number;
 	ci95: [number, number] | null;
-	mean: number;
-	median: number;
-	sd: number | null;
 	n: number;
 	printed: string;
 	printedInterval: string | null;
 }
 
-export interface ScoresSpec extends PlateBase {
-	kind: 'scores';
+export interface ScoreRow extends BarRow {
+	mean: number;
+	median: number;
+	sd: number | null;
+}
+
+/** Bars from nought. */
+export interface BarsSpec<Row extends BarRow = BarRow> extends PlateBase {
 	workload: string;
 	unit: string;
 	better: Direction;
 	/** Best first. */
-	rows: ScoreRow[];
+	rows: Row[];
+}
+
+export interface ScoresSpec extends BarsSpec<ScoreRow> {
+	kind: 'scores';
+}
+
+/** A figure made of two: score for each watt or each unit of money, energy of a task. */
+export interface ValueSpec extends BarsSpec {
+	kind: 'value';
+	per: ValueKind;
+	/** What it is made from, in words. */
+	how: string;
+	/** The workloads whose readings it rests on. */
+	from: string[];
 }
 
 /** One dot of a gains plate. Percent. */
@@ -37,34 +56,60 @@ export interface GainPoint {
 	ratio: number;
 	n: number;
 	nBaseline: number;
-	verdict: Verdict;
+	/** Null for a mean of several workloads, which has none. */
+	verdict: Verdict | null;
 	printed: string;
 	printedInterval: string | null;
 }
 
 export interface GainsRow {
+	/** Slug of the workload, or a name of several of them. */
 	workload: string;
 	name: string;
 	/** The class of the workload. */
 	kind: string;
-	leastDifferencePercent: number;
+	/** Null where nothing says how much matters. */
+	leastDifferencePercent: number | null;
 	/** In the order of the series; null where there is nothing to compare. */
 	points: (GainPoint | null)[];
 }
 
-export interface GainsSpec extends PlateBase {
-	kind: 'gains';
+/** Dots with whiskers on a zero line. */
+export interface DotsSpec extends PlateBase {
 	baseline: { profile: string; name: string };
 	series: { profile: string; name: string; series: number }[];
 	rows: GainsRow[];
 }
 
+export interface GainsSpec extends DotsSpec {
+	kind: 'gains';
+}
+
+/** Geometric means over all workloads of a campaign: one row. */
+export interface OverallSpec extends DotsSpec {
+	kind: 'overall';
+	/** Workloads that went into it. */
+	workloads: string[];
+}
+
+/** Geometric means by class of work, and what the profiles cost where a ratio says it. */
+export interface TradeOffSpec extends DotsSpec {
+	kind: 'trade-off';
+	/** Workloads behind the rows. */
+	workloads: string[];
+}
+
 /** All that a plate is drawn from: plain data, so that the same plate is drawn the same way everywhere. */
-export type PlateSpec = ScoresSpec | GainsSpec | LadderSpec | SweepSpec;
+export type PlateSpec =
+	ScoresSpec | GainsSpec | OverallSpec | ValueSpec | TradeOffSpec | DriftSpec | LadderSpec | SweepSpec;
 
 export const plateKinds = [
 	'scores',
 	'gains',
+	'overall',
+	'value',
+	'trade-off',
+	'drift',
 	'ladder',
 	'sweep'
 ] as const satisfies readonly PlateSpec['kind'][];
@@ -84,9 +129,20 @@ function hashOf(text: string): string {
 }
 
 function subjectOf(spec: PlateSpec): string {
-	if (spec.kind === 'scores') return spec.workload;
-	if (spec.kind === 'gains') return `over-${spec.baseline.profile}`;
-	return spec.kind === 'ladder' ? spec.ladder : spec.sweep;
+	switch (spec.kind) {
+		case 'scores':
+			return spec.workload;
+		case 'value':
+			return `${spec.workload}-per-${spec.per}`;
+		case 'drift':
+			return `${spec.rig}-${spec.workload}`;
+		case 'ladder':
+			return spec.ladder;
+		case 'sweep':
+			return spec.sweep;
+		default:
+			return `over-${spec.baseline.profile}`;
+	}
 }
 
 /**

@@ -4,6 +4,7 @@ import {
 	campaign,
 	campaignProfile,
 	campaignWorkload,
+	instrument,
 	part,
 	partPrice,
 	profile,
@@ -64,10 +65,21 @@ const workloadsOf = (db: Db, campaignIds: number[]) =>
 			leastDifferencePercent: workload.leastDifferencePercent,
 			warmUps: workload.warmUps,
 			repeats: workload.repeats,
-			coolDownS: workload.coolDownS
+			coolDownS: workload.coolDownS,
+			/** Null where the program itself counts. */
+			instrument: {
+				name: instrument.name,
+				unit: instrument.unit,
+				accuracyPercent: instrument.accuracyPercent,
+				accuracyAbsolute: instrument.accuracyAbsolute,
+				resolution: instrument.resolution,
+				calibratedOn: instrument.calibratedOn,
+				calibrationDueOn: instrument.calibrationDueOn
+			}
 		})
 		.from(campaignWorkload)
 		.innerJoin(workload, eq(workload.id, campaignWorkload.workloadId))
+		.leftJoin(instrument, eq(instrument.id, campaignWorkload.instrumentId))
 		.where(inArray(campaignWorkload.campaignId, campaignIds))
 		.orderBy(asc(campaignWorkload.campaignId), asc(campaignWorkload.position), asc(workload.id));
 
@@ -122,7 +134,7 @@ const settingsOfRigs = (db: Db, rigIds: number[]) =>
 		.orderBy(asc(profileSetting.profileId), asc(profileSetting.position));
 
 /** The samples of rig revisions with their parts and the latest price of each; the price is null where none was seen. */
-function kitOf(db: Db, rigRevisionIds: number[]) {
+export function kitOf(db: Db, rigRevisionIds: number[]) {
 	const ranked = db
 		.select({
 			partId: partPrice.partId,

@@ -6,6 +6,7 @@ import type {
 	SampleDuty
 } from '../../../domain/articles/data';
 import { summariseCampaign } from '../../../domain/bench/campaign';
+import { driftFacts } from '../../../domain/bench/drift-facts';
 import type { WorkloadFacts } from '../../../domain/bench/figures';
 import { defaultBaseline, matrixOf } from '../../../domain/bench/matrix';
 import { chainTo, effectiveSettings } from '../../../domain/bench/profile';
@@ -15,6 +16,7 @@ import * as facts from '../../db/queries/campaign-facts';
 import * as recorded from '../../db/queries/campaign-readings';
 import * as duties from '../../db/queries/sample-duties';
 import * as ladders from '../../db/queries/ladder';
+import * as stock from '../../db/queries/stock-runs';
 import { publication } from '../../db/queries/settings';
 import * as stability from '../../db/queries/stability-facts';
 import * as sweeps from '../../db/queries/sweep';
@@ -130,9 +132,10 @@ export async function articleData(
 	]);
 	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
 	const rigIds = [...new Set(plans.map(({ head }) => head.rigId))];
-	const [rows, climbedAndSwept] = await Promise.all([
+	const [rows, climbedAndSwept, stockRuns] = await Promise.all([
 		duties.ofRigRevisions(db, revisions, now),
-		stabilityOf(db, rigIds)
+		stabilityOf(db, rigIds),
+		stock.ofRigs(db, { rigs: rigIds })
 	]);
 	const ordered = campaignIds.flatMap((id) => plans.find(({ head }) => head.id === id) ?? []);
 	return {
@@ -141,6 +144,7 @@ export async function articleData(
 		),
 		duties: rows.map(dutyOf),
 		...climbedAndSwept,
+		drifts: driftFacts(stockRuns),
 		zone
 	};
 }

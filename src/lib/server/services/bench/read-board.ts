@@ -1,5 +1,6 @@
 import { campaignState, type CampaignState } from '../../../domain/bench/campaign-state';
 import { countedReadings } from '../../../domain/bench/campaign';
+import type { InstrumentFacts } from '../../../domain/bench/cell-uncertainty';
 import type { CellRun } from '../../../domain/bench/cell-runs';
 import type { CellOff } from '../../../domain/bench/drift-facts';
 import type { CellFigures, WorkloadFacts } from '../../../domain/bench/figures';
@@ -23,7 +24,7 @@ export interface Board {
 	/** Cells measured while the rig was off, by its own stock. */
 	off: CellOff[];
 	profiles: { slug: string; name: string }[];
-	workloads: (WorkloadFacts & { needed: number })[];
+	workloads: (WorkloadFacts & { needed: number; instrument: InstrumentFacts | null })[];
 	baseline: string;
 	cells: CellFigures[];
 	progress: Progress;

@@ -15,6 +15,7 @@ test('a ladder is begun, climbed by form and by paste, and says what to try next
 	await signIn(page, 'tester');
 	await page.goto('/bench/ladders');
 	await page.getByRole('link', { name: 'Begin a ladder' }).click();
+	await page.waitForURL('**/bench/ladders/new');
 	await page.getByRole('combobox', { name: 'Rig', exact: true }).selectOption('n-12');
 	await page.getByRole('textbox', { name: 'Name', exact: true }).fill('Evening ladder');
 	await page.getByRole('combobox', { name: 'Stress 1', exact: true }).selectOption('heat-soak');

@@ -31,7 +31,7 @@ describe('the uncertainty of a cell', () => {
 		// G.4.1: u⁴ / (uA⁴ / 4), cut to whole ones for k; far out it is the normal 1.96.
 		expect(found?.df).toBeCloseTo((found?.u ?? 0) ** 4 / (0.005 ** 2 / 4), 6);
 		expect(found?.k).toBeCloseTo(1.96, 1);
-		expect(found?.printed).toEqual({ value: '100.10', uncertainty: '0.83', places: 2 });
+		expect(found?.printed).toEqual({ value: '100.10', uncertainty: '0.81', places: 2 });
 	});
 
 	it('says when the calibration had run out on the day', () => {

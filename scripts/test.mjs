@@ -1,5 +1,5 @@
 // `npm test`: sets up what it needs, then every check, and a last line that counts them.
-import { spawn } from 'node:child_process';
+import { spawn, spawnSync } from 'node:child_process';
 import { mkdirSync, readFileSync, rmSync } from 'node:fs';
 import {
 	browserPrograms,
@@ -70,6 +70,8 @@ const vitest = (project) => [
 	`--outputFile.json=test-results/${project}.json`
 ];
 
+// Done once here, so that the two below do not write the same files.
+spawnSync(process.execPath, ['node_modules/.bin/svelte-kit', 'sync'], { stdio: 'ignore' });
 // The linter works on one core for minutes: the other takes what needs no browser meanwhile.
 await Promise.all([
 	one('lint', ['scripts/lint.mjs']),

@@ -1,5 +1,5 @@
 // `npm test`: sets up what it needs, then every check, and a last line that counts them.
-import { spawnSync } from 'node:child_process';
+import { spawn, spawnSync } from 'node:child_process';
 import { mkdirSync, readFileSync, rmSync } from 'node:fs';
 import {
 	browserPrograms,
@@ -19,25 +19,33 @@ mkdirSync('test-results', { recursive: true });
 
 let passed = 0;
 let failed = 0;
-/** @param {string} name @param {string[]} args @param {Record<string, string>} [env] */
-function run(name, args, env = {}) {
-	say(`\n── ${name}`);
+/**
+ * Runs a step; its words are kept while it runs beside another, and said when it is done.
+ * @param {string} name @param {string[]} args @param {Record<string, string>} [env] @returns {Promise<boolean>}
+ */
+async function run(name, args, env = {}) {
 	const began = Date.now();
-	const { status } = spawnSync(process.execPath, args, {
-		stdio: ['ignore', 'inherit', 'inherit'],
+	/** @type {Buffer[]} */
+	const words = [];
+	const child = spawn(process.execPath, args, {
+		stdio: ['ignore', 'pipe', 'pipe'],
 		env: { ...process.env, ...env }
 	});
+	for (const stream of [child.stdout, child.stderr])
+		stream.on('data', (/** @type {Buffer} */ chunk) => words.push(chunk));
+	const status = await new Promise((done) => child.once('close', done));
+	say(`\n── ${name}\n${Buffer.concat(words).toString().trimEnd()}`);
 	say(`── ${name}: ${status === 0 ? 'passed' : 'FAILED'} in ${Math.round((Date.now() - began) / 1000)} s`);
 	return status === 0;
 }
 /** A step that counts as one. @param {string} name @param {string[]} args */
-const one = (name, args) => (run(name, args) ? passed++ : failed++);
+const one = async (name, args) => ((await run(name, args)) ? passed++ : failed++);
 /**
  * A step whose own report is counted; one that dies without a report counts as a failure.
  * @param {string} name @param {string[]} args @param {string} report @param {(json: any) => [number, number]} count
  */
-function many(name, args, report, count) {
-	const fine = run(name, args, { LOG_LEVEL: 'silent' });
+async function many(name, args, report, count) {
+	const fine = await run(name, args, { LOG_LEVEL: 'silent' });
 	try {
 		const [good, bad] = count(JSON.parse(readFileSync(report, 'utf8')));
 		passed += good;
@@ -62,11 +70,18 @@ const vitest = (project) => [
 	`--outputFile.json=test-results/${project}.json`
 ];
 
-one('lint', ['scripts/lint.mjs']);
-one('types', ['scripts/check.mjs']);
-many('unit', vitest('unit'), 'test-results/unit.json', vitestCount);
-many('integration', vitest('integration'), 'test-results/integration.json', vitestCount);
-many('browser', ['scripts/e2e.mjs'], 'test-results/e2e.json', ({ stats }) => [
+// Done once here, so that the two below do not write the same files.
+spawnSync(process.execPath, ['node_modules/.bin/svelte-kit', 'sync'], { stdio: 'ignore' });
+// The linter works on one core for minutes: the other takes what needs no browser meanwhile.
+await Promise.all([
+	one('lint', ['scripts/lint.mjs']),
+	(async () => {
+		await one('types', ['scripts/check.mjs']);
+		await many('unit', vitest('unit'), 'test-results/unit.json', vitestCount);
+		await many('integration', vitest('integration'), 'test-results/integration.json', vitestCount);
+	})()
+]);
+await many('browser', ['scripts/e2e.mjs'], 'test-results/e2e.json', ({ stats }) => [
 	stats.expected,
 	stats.unexpected + stats.flaky
 ]);

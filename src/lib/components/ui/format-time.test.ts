@@ -28,3 +28,13 @@ describe('times in the publication’s zone', () => {
 		expect(formatTime('2026-11-14T12:00:00Z', 'UTC', 'relative', now)).toBe('2 hours ago');
 	});
 });
+
+describe('a day of the calendar', () => {
+	it('is the same day in every zone, and has no hour', () => {
+		for (const zone of ['America/Los_Angeles', 'Europe/Oslo', 'Pacific/Auckland']) {
+			expect(formatTime('2026-11-17', zone, 'date')).toBe('17 November 2026');
+			expect(fullTime('2026-11-17', zone)).toBe('17 November 2026');
+			expect(isoTime('2026-11-17', zone)).toBe('2026-11-17');
+		}
+	});
+});

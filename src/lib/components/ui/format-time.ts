@@ -2,8 +2,11 @@ import { DateTime } from 'luxon';
 
 export type TimeStyle = 'date' | 'time' | 'datetime' | 'relative';
 
+/** A day of the calendar, which is the same day in every zone. */
+const isDay = (at: Date | string): boolean => typeof at === 'string' && /^\d{4}-\d{2}-\d{2}$/.test(at);
+
 const moment = (at: Date | string, zone: string) =>
-	(at instanceof Date ? DateTime.fromJSDate(at) : DateTime.fromISO(at, { zone: 'utc' }))
+	(at instanceof Date ? DateTime.fromJSDate(at) : DateTime.fromISO(at, { zone: isDay(at) ? zone : 'utc' }))
 		.setZone(zone)
 		.setLocale('en-GB');
 
@@ -22,7 +25,10 @@ export function formatTime(at: Date | string, zone: string, style: TimeStyle, no
 
 /** The same time to the second with its offset from UTC. @example '14 November 2026, 15:00:00 (Europe/Berlin, UTC+01:00)' */
 export const fullTime = (at: Date | string, zone: string): string =>
-	moment(at, zone).toFormat(`d MMMM yyyy, HH:mm:ss '('z, 'UTC'ZZ')'`);
+	isDay(at)
+		? formatTime(at, zone, 'date')
+		: moment(at, zone).toFormat(`d MMMM yyyy, HH:mm:ss '('z, 'UTC'ZZ')'`);
 
 /** The form that machines read. */
-export const isoTime = (at: Date | string, zone: string): string => moment(at, zone).toISO() ?? '';
+export const isoTime = (at: Date | string, zone: string): string =>
+	(isDay(at) ? moment(at, zone).toISODate() : moment(at, zone).toISO()) ?? '';

@@ -12,7 +12,7 @@ import * as desk from '../../db/queries/desk-list';
 import * as waits from '../../db/queries/desk-waits';
 import * as settings from '../../db/queries/settings';
 
-const perPage = 40;
+const perPage = 20;
 const dayMs = 86_400_000;
 
 const isStage = (text: string): text is Stage => (stages as readonly string[]).includes(text);

@@ -33,7 +33,7 @@ const words = (verdict: Verdict | undefined): string => (verdict ? verdictWords[
 export function comparisonCsv(comparison: CampaignComparison): string {
 	const units = new Map(comparison.workloads.map((workload) => [workload.slug, workload.unit]));
 	const cells = comparison.cells.map(
-		({ profile, workload, summary, comparison: held, difference, signedBy }) => ({
+		({ profile, workload, summary, comparison: held, difference, notes, signedBy }) => ({
 			profile,
 			workload,
 			unit: units.get(workload) ?? '',

@@ -1,4 +1,5 @@
 import { goto, preloadData } from '$app/navigation';
+import { navigating } from '$app/state';
 import type { PageData } from './$types';
 
 interface Cell {
@@ -112,6 +113,8 @@ export class BoardReader {
 		const href = this.#setup.href(cell);
 		if (!(await this.#load(href))) return false;
 		if (this.wanted !== null && this.wanted !== cell) return false;
+		// Somebody has already clicked on: to write the address now would take their click back.
+		if (replaceState && navigating.to !== null) return false;
 		// The address is the campaign's own, made by the page.
 		// eslint-disable-next-line svelte/no-navigation-without-resolve
 		await goto(href, { keepFocus: true, noScroll: true, replaceState });

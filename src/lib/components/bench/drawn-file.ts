@@ -1,5 +1,6 @@
 export interface DrawnFile {
 	blob: Blob;
+	markup: string;
 	width: number;
 	height: number;
 }
@@ -10,27 +11,32 @@ const density = 2;
 /** A drawing of the page as a file of its own: the colours it has now written out, for there are no tokens outside. */
 export function drawnFile(svg: SVGSVGElement): DrawnFile {
 	const style = getComputedStyle(svg);
-	const markup = new XMLSerializer()
-		.serializeToString(svg)
+	const { width, height } = svg.viewBox.baseVal;
+	const copy = document.importNode(svg, true);
+	copy.setAttribute('xmlns', 'http://www.w3.org/2000/svg');
+	copy.setAttribute('width', String(width));
+	copy.setAttribute('height', String(height));
+	copy.setAttribute('font-family', style.fontFamily.replaceAll('"', "'"));
+	const sheet = document.createElementNS('http://www.w3.org/2000/svg', 'rect');
+	sheet.setAttribute('width', '100%');
+	sheet.setAttribute('height', '100%');
+	sheet.setAttribute('fill', 'var(--color-sheet)');
+	copy.prepend(sheet);
+	const whole = new XMLSerializer()
+		.serializeToString(copy)
 		.replace(
 			/var\((--[a-z-]+)\)/g,
 			(_, token: string) => style.getPropertyValue(token).trim() || 'currentColor'
 		);
-	const { width, height } = svg.viewBox.baseVal;
-	const sheet = style.getPropertyValue('--color-sheet').trim() || '#fff';
-	const whole = markup.replace(
-		/^<svg/,
-		`<svg width="${width}" height="${height}" style="background:${sheet};font-family:${style.fontFamily.replace(/"/g, "'")}"`
-	);
-	return { blob: new Blob([whole], { type: 'image/svg+xml;charset=utf-8' }), width, height };
+	return { blob: new Blob([whole], { type: 'image/svg+xml;charset=utf-8' }), markup: whole, width, height };
 }
 
 /** The same as PNG, drawn by the browser; null where it cannot. */
-export async function pictureOf({ blob, width, height }: DrawnFile): Promise<Blob | null> {
-	const address = URL.createObjectURL(blob);
+export async function pictureOf({ markup, width, height }: DrawnFile): Promise<Blob | null> {
 	try {
 		const image = new Image();
-		image.src = address;
+		// The page's policy lets pictures in from data addresses, not from blobs.
+		image.src = `data:image/svg+xml;charset=utf-8,${encodeURIComponent(markup)}`;
 		await image.decode();
 		const canvas = document.createElement('canvas');
 		canvas.width = width * density;
@@ -39,7 +45,5 @@ export async function pictureOf({ blob, width, height }: DrawnFile): Promise<Blo
 		return await new Promise((resolve) => canvas.toBlob(resolve, 'image/png'));
 	} catch {
 		return null;
-	} finally {
-		URL.revokeObjectURL(address);
 	}
 }

@@ -112,7 +112,7 @@ describe('the file of a campaign', () => {
 		const slug = await emptyCopy('aldermoor-1650-four-ways', 'Odd readings');
 		const { profiles, workloads } = await planOf(slug);
 		const [profile, workload] = [profiles[0]?.slug ?? '', workloads[0]?.slug ?? ''];
-		const values = [0.1 + 0.2, 1 / 3, 5e-100, 123456789.123456789, 9.999999999999998e14];
+		const values = [0.1 + 0.2, 1 / 3, 5e-100, 123456789.12345679, 9.999999999999998e14];
 		const file = (name: number, more: string) =>
 			`profile,workload,value,notes\n${values.map((value) => `${profile},${workload},${value * name},${more}`).join('\n')}`;
 		for (const [at, notes] of ['"=SUM(A1)"', '"two\nlines, and a ""quote"""', '-3'].entries())

@@ -204,7 +204,6 @@ describe('a ladder', () => {
 
 	it('is begun without scripts, and refused with what was typed', async () => {
 		const typed = {
-			name: 'Second',
 			rig: 'n-12',
 			profile: 'stock',
 			'stresses.0.workload': 'long-sums',

@@ -1,6 +1,6 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, max, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql, type SQL } from 'drizzle-orm';
 import type { Db } from '../client';
-import { attempt, ladder, ladderStress, profile, rig, rigRevision, user, workload } from '../schema';
+import { ladder, ladderStress, profile, rig, rigRevision, user, workload } from '../schema';
 import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface LadderFilter {
@@ -121,16 +121,6 @@ export const stressesOf = async (db: Db, ladderIds: number[]) =>
 				.orderBy(asc(ladderStress.ladderId), asc(ladderStress.position));
 
 export type StressRow = Awaited<ReturnType<typeof stressesOf>>[number];
-
-/** Attempts that stand, and when the last began, for each ladder. */
-export const attemptCounts = async (db: Db, ladderIds: number[]) =>
-	ladderIds.length === 0
-		? []
-		: db
-				.select({ ladderId: attempt.ladderId, n: count(), last: max(attempt.startedAt) })
-				.from(attempt)
-				.where(and(inArray(attempt.ladderId, ladderIds), isNull(attempt.voidedAt)))
-				.groupBy(attempt.ladderId);
 
 /** Rigs that have ladders, for the list's filter. */
 export const rigsUsed = (db: Db) =>

@@ -4,7 +4,7 @@ import { grouped } from '../../../domain/shared/grouped';
 import type { Db } from '../client';
 import * as attempts from './attempt';
 import * as ladders from './ladder';
-import * as sweeps from './sweep';
+import type * as sweeps from './sweep';
 import * as passes from './sweep-pass';
 
 const factsOf = (

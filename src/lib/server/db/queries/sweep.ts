@@ -1,6 +1,6 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, max, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql, type SQL } from 'drizzle-orm';
 import type { Db } from '../client';
-import { profile, rig, rigRevision, sweep, sweepPass, user, workload } from '../schema';
+import { profile, rig, rigRevision, sweep, user, workload } from '../schema';
 import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface SweepFilter {
@@ -97,16 +97,6 @@ export const ofRigs = async (db: Db, rigIds: number[]) =>
 	rigIds.length === 0 ? [] : joined(db).where(inArray(rig.id, rigIds)).orderBy(asc(sweep.id));
 
 export type SweepRow = Awaited<ReturnType<typeof byRefs>>[number];
-
-/** Passes that stand, and when the last began, for each sweep. */
-export const passCounts = async (db: Db, sweepIds: number[]) =>
-	sweepIds.length === 0
-		? []
-		: db
-				.select({ sweepId: sweepPass.sweepId, n: count(), last: max(sweepPass.startedAt) })
-				.from(sweepPass)
-				.where(and(inArray(sweepPass.sweepId, sweepIds), isNull(sweepPass.voidedAt)))
-				.groupBy(sweepPass.sweepId);
 
 /** Rigs that have sweeps, for the list's filter. */
 export const rigsUsed = (db: Db) =>

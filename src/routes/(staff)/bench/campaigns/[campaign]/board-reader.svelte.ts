@@ -115,8 +115,6 @@ export class BoardReader {
 		if (this.wanted !== null && this.wanted !== cell) return false;
 		// Somebody has already clicked on: to write the address now would take their click back.
 		if (replaceState && navigating.to !== null) return false;
-		// The address is the campaign's own, made by the page.
-		// eslint-disable-next-line svelte/no-navigation-without-resolve
 		await goto(href, { keepFocus: true, noScroll: true, replaceState });
 		this.#setup.onread(ids);
 		return true;

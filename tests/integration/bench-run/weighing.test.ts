@@ -117,6 +117,13 @@ describe('drift', () => {
 		expect(page.plate?.points).toEqual(points);
 	});
 
+	it('opens where stock was run most often', async () => {
+		const named = valueOf(await readDrift(ctx, { rig: 'n-12', workload: 'prime-search' }));
+		const opened = valueOf(await readDrift(ctx, {}));
+		expect(named.facts?.runs.length).toBeGreaterThan(1);
+		expect(opened.chosen).toEqual(named.chosen);
+	});
+
 	it('marks on the board what was measured while the rig was off', async () => {
 		const board = valueOf(await readBoard(ctx, again, { profile: '', workload: '' }));
 		expect(board.off).toEqual([

@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNull } from 'drizzle-orm';
 import type { Db } from '../client';
 import { campaign, campaignProfile, profile, reading, rig, rigRevision, run, workload } from '../schema';
 
@@ -70,12 +70,13 @@ export async function ofRigs(db: Db, filter: StockFilter): Promise<StockRunRow[]
 /** Rigs and workloads of which stock was ever run, for the choice. */
 export const measured = (db: Db) =>
 	db
-		.selectDistinct({
+		.select({
 			rigId: rig.id,
 			rig: rig.slug,
 			rigName: rig.name,
 			workload: workload.slug,
-			workloadName: workload.name
+			workloadName: workload.name,
+			runs: count()
 		})
 		.from(profile)
 		.innerJoin(rig, eq(rig.id, profile.rigId))
@@ -83,4 +84,5 @@ export const measured = (db: Db) =>
 		.innerJoin(run, and(eq(run.campaignId, campaignProfile.campaignId), eq(run.profileId, profile.id)))
 		.innerJoin(workload, eq(workload.id, run.workloadId))
 		.where(and(isNull(profile.parentId), isNull(run.voidedAt)))
+		.groupBy(rig.id, workload.id)
 		.orderBy(asc(rig.name), asc(workload.name));

@@ -23,10 +23,13 @@ export interface DriftPage {
 
 type Choice = Awaited<ReturnType<typeof stock.measured>>;
 
+const longest = (rows: Choice) => rows.toSorted((a, b) => b.runs - a.runs)[0];
+
+/** What was asked for, else where stock was run most often: there drift shows first. */
 function choose(all: Choice, asked: DriftQuery) {
 	const ofRig = all.filter((row) => row.rig === asked.rig);
-	const among = ofRig.length > 0 ? ofRig : all.filter((row) => row.rig === all[0]?.rig);
-	return { among, row: among.find((one) => one.workload === asked.workload) ?? among[0] };
+	const among = ofRig.length > 0 ? ofRig : all.filter((row) => row.rig === longest(all)?.rig);
+	return { among, row: among.find((one) => one.workload === asked.workload) ?? longest(among) };
 }
 
 /** Stock of one rig with one workload over time: what there is to choose from, the chart, and what it signals. */

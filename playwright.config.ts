@@ -11,10 +11,14 @@ const args = [
 	'--disable-sync'
 ];
 
+// Each worker reads this file and takes the environment of its house (scripts/e2e.mjs).
+const houses = JSON.parse(process.env.E2E_HOUSES ?? '[{}]') as NodeJS.ProcessEnv[];
+Object.assign(process.env, houses[Number(process.env.TEST_PARALLEL_INDEX ?? 0)]);
+
 export default defineConfig({
 	testDir: 'tests/e2e',
 	fullyParallel: false,
-	workers: 1,
+	workers: houses.length,
 	retries: 0,
 	forbidOnly: true,
 	timeout: 90_000,

@@ -2,6 +2,9 @@ import AxeBuilder from '@axe-core/playwright';
 import { expect, test, type Page } from '@playwright/test';
 import { signIn, type Role } from './support';
 
+// The screens change nothing: both workers share them.
+test.describe.configure({ mode: 'parallel' });
+
 // WCAG 2.2 level A and AA by axe's rules, in light at 1440 px and in dark at 390 px; nothing wider than a phone.
 const rules = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
 

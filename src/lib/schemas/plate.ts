@@ -11,7 +11,8 @@ const interval = z.tuple([figure, figure]).nullable();
 const base = {
 	title: words,
 	sub: words,
-	foot: z.array(words).max(20),
+	/** An overall plate names every workload in it: 200 of 200 letters at the most. */
+	foot: z.array(z.string().max(50_000)).max(80),
 	campaign: name
 };
 

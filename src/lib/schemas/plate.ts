@@ -107,7 +107,8 @@ const drift = z.object({
 				inWindow: z.boolean(),
 				movingRange: figure.nullable(),
 				average: z.object({ ewma: figure, lower: figure, upper: figure }).nullable(),
-				signals: z.array(name).max(10)
+				signals: z.array(name).max(10),
+				begun: name.nullable()
 			})
 		)
 		.max(2000)

@@ -65,6 +65,19 @@ test('trade-offs say in words what each strategy gains and gives up', async ({ b
 	await page.context().close();
 });
 
+test('trade-offs print on one page, on A4 and on Letter', async ({ browser }) => {
+	const page = await pageOf(browser, 'tester');
+	for (const campaign of ['aldermoor-1650-four-ways', 'aldermoor-1650-costs']) {
+		await page.goto(`/bench/campaigns/${campaign}/trade-offs`);
+		await expect(page.getByRole('table', { name: 'What each profile gains and costs' })).toBeVisible();
+		for (const format of ['A4', 'Letter']) {
+			const pdf = (await page.pdf({ format })).toString('latin1');
+			expect(pdf.match(/\/Type\s*\/Page\b/g), `${campaign} on ${format}`).toHaveLength(1);
+		}
+	}
+	await page.context().close();
+});
+
 test('drift names its signals, and the board of what was measured meanwhile says so', async ({ browser }) => {
 	const page = await pageOf(browser, 'tester');
 	await page.goto('/bench/drift?rig=n-12&workload=tile-render');

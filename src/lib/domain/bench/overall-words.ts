@@ -3,7 +3,7 @@ import type { Overall, WorkloadFacts } from './figures';
 
 type Named = Pick<WorkloadFacts, 'slug' | 'name' | 'unit'>;
 
-const listed = (names: readonly string[]): string => new Intl.ListFormat('en').format(names);
+const listed = (names: readonly string[]): string => new Intl.ListFormat('en-GB').format(names);
 
 const reason = 'They measure what a profile costs, which is no part of how fast it is.';
 

@@ -13,13 +13,19 @@ import { measureTable } from './parts/bench/table.mjs';
 import { ensureBuild } from './parts/build.mjs';
 import { startMaildev } from './parts/maildev.mjs';
 import { startMariadb } from './parts/mariadb.mjs';
-import { checkNode, databasePrograms, ensureDebian, ensureModules } from './parts/packages.mjs';
+import {
+	browserPrograms,
+	checkNode,
+	databasePrograms,
+	ensureDebian,
+	ensureModules
+} from './parts/packages.mjs';
 import { say } from './parts/words.mjs';
 
 process.chdir(new URL('..', import.meta.url).pathname);
 checkNode();
 ensureModules();
-ensureDebian(databasePrograms);
+ensureDebian({ ...databasePrograms, ...browserPrograms });
 ensureBuild();
 
 let missed = 0;

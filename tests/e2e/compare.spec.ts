@@ -19,6 +19,16 @@ test('a comparison corrects its verdicts together and says what would settle the
 	await page.goto('/bench/campaigns/brisk-360-fans/compare');
 	await expect(page.getByText(/cells have fewer than six readings/)).toBeVisible();
 	await page.goto('/bench/campaigns/aldermoor-1650-costs/compare');
+	// The demo's fixed clock: −4.6, +12.4, +14.8 and −0.6 % of work make +5.2 %; what it draws and wastes is not in it.
+	const costs = page.getByRole('row', { name: /^Fixed 4\.95/ }).first();
+	await expect(costs.getByRole('cell').last()).toHaveText(/^\s*\+5\.\d/);
+	await expect(
+		page
+			.getByText(
+				/Left out: .*Draw under render \(power\).*Loudness \(noise\).*They measure what a profile costs/
+			)
+			.first()
+	).toBeVisible();
 	const open = page.getByRole('heading', { name: 'What would settle it' });
 	if ((await page.getByText('not enough runs to say', { exact: true }).count()) > 0)
 		await expect(open).toBeVisible();
@@ -52,6 +62,19 @@ test('trade-offs say in words what each strategy gains and gives up', async ({ b
 		plate.getByRole('button', { name: 'PNG' }).click()
 	]);
 	expect(picture.suggestedFilename()).toMatch(/^trade-off-over-stock-.*\.png$/);
+	await page.context().close();
+});
+
+test('trade-offs print on one page, on A4 and on Letter', async ({ browser }) => {
+	const page = await pageOf(browser, 'tester');
+	for (const campaign of ['aldermoor-1650-four-ways', 'aldermoor-1650-costs']) {
+		await page.goto(`/bench/campaigns/${campaign}/trade-offs`);
+		await expect(page.getByRole('table', { name: 'What each profile gains and costs' })).toBeVisible();
+		for (const format of ['A4', 'Letter']) {
+			const pdf = (await page.pdf({ format })).toString('latin1');
+			expect(pdf.match(/\/Type\s*\/Page\b/g), `${campaign} on ${format}`).toHaveLength(1);
+		}
+	}
 	await page.context().close();
 });
 

@@ -11,7 +11,8 @@ const interval = z.tuple([figure, figure]).nullable();
 const base = {
 	title: words,
 	sub: words,
-	foot: z.array(words).max(20),
+	/** An overall plate names every workload in it: 200 of 200 letters at the most. */
+	foot: z.array(z.string().max(50_000)).max(80),
 	campaign: name
 };
 
@@ -106,7 +107,8 @@ const drift = z.object({
 				inWindow: z.boolean(),
 				movingRange: figure.nullable(),
 				average: z.object({ ewma: figure, lower: figure, upper: figure }).nullable(),
-				signals: z.array(name).max(10)
+				signals: z.array(name).max(10),
+				begun: name.nullable()
 			})
 		)
 		.max(2000)

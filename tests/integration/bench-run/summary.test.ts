@@ -82,6 +82,13 @@ describe('the summary of a campaign', () => {
 		}
 	});
 
+	it('says in words what each overall figure rests on: here every workload measures performance', () => {
+		for (const { words, workloads, missing, aside } of byApi.overall) {
+			expect([workloads.length, missing, aside]).toEqual([7, [], []]);
+			expect(words).toMatch(/^The overall figure rests on performance alone: .+ and .+\.$/);
+		}
+	});
+
 	it('is the same from a file as from a script, but for the rows it is made of', () => {
 		const plain = (summary: CampaignSummary) =>
 			summary.cells.map(({ flagged, ...cell }) => ({ ...cell, flagged: flagged.map((one) => one.value) }));

@@ -1,6 +1,7 @@
 import Papa from 'papaparse';
 import type { CellUncertainty } from './cell-uncertainty';
 import type { CellNotes } from './comparison-notes';
+import { overallWords } from './overall-words';
 import { verdictWords, type CellFigures, type Overall, type Verdict, type WorkloadFacts } from './figures';
 
 interface ComparedNotes extends CellNotes {
@@ -58,10 +59,11 @@ export function comparisonCsv(comparison: CampaignComparison): string {
 			coverage_factor: notes.uncertainty?.k ?? '',
 			expanded_uncertainty: notes.uncertainty?.expanded ?? '',
 			rig_off: notes.off ?? '',
-			signed_by: signedBy ?? ''
+			signed_by: signedBy ?? '',
+			rests_on: ''
 		})
 	);
-	const overall = comparison.profiles.flatMap(({ slug }) => {
+	const overall = comparison.profiles.flatMap(({ slug, name }) => {
 		const figure = comparison.overall[slug];
 		return figure
 			? [
@@ -73,7 +75,8 @@ export function comparisonCsv(comparison: CampaignComparison): string {
 						ratio: figure.ratio,
 						ratio_low_95: figure.ci95?.[0] ?? '',
 						ratio_high_95: figure.ci95?.[1] ?? '',
-						gain_percent: figure.gainPercent
+						gain_percent: figure.gainPercent,
+						rests_on: overallWords([{ name, figure }], comparison.workloads).join(' ')
 					}
 				]
 			: [];

@@ -1,15 +1,10 @@
 import type { CellFigures, Summary, Verdict } from './figures';
 import type { HeldWorkload } from './held-against';
+import { runsToSettle } from './runs-to-settle';
 import { coverageWarning } from './statistics/coverage-warning';
 import { normalityHint } from './statistics/normality';
 import { canFlagOutliers } from './statistics/outliers';
-import {
-	type RunsNeeded,
-	runsNeeded,
-	runsNeededOfDifference,
-	runsNeededShort,
-	runsNeededWords
-} from './statistics/runs-needed';
+import { runsNeededShort, runsNeededWords } from './statistics/runs-needed';
 
 /** What is to be said of a cell's comparison beside its figures. Sentences for the screen; null where nothing is. */
 export interface CellNotes {
@@ -21,21 +16,6 @@ export interface CellNotes {
 	scatter: string | null;
 	/** Readings are there, but too few to look for outliers among them. */
 	tooFewToFlag: boolean;
-}
-
-function neededOf(
-	cell: CellFigures,
-	baseline: Summary,
-	workload: HeldWorkload,
-	together: number
-): RunsNeeded | null {
-	const { summary, comparison, difference } = cell;
-	if (!summary) return null;
-	if (comparison?.verdict === 'not-enough')
-		return runsNeeded(summary, baseline, workload.better, workload.leastDifferencePercent, together);
-	return difference?.verdict === 'not-enough'
-		? runsNeededOfDifference(summary, baseline, difference.least, together)
-		: null;
 }
 
 const warningOf = (workload: HeldWorkload, cell: CellFigures, baseline: Summary): string | null =>
@@ -60,7 +40,10 @@ export function cellNotes(
 	together: number
 ): CellNotes {
 	const held = cell.comparison ?? cell.difference ?? null;
-	const needed = baseline && neededOf(cell, baseline, workload, Math.max(1, together));
+	const needed =
+		baseline && cell.summary
+			? runsToSettle(cell, cell.summary, baseline, workload, Math.max(1, together))
+			: null;
 	const hint = normalityHint(values);
 	return {
 		needed: needed && { short: runsNeededShort(needed), words: runsNeededWords(needed) },

@@ -54,6 +54,31 @@ describe('drift', () => {
 	});
 });
 
+describe('a rig that was mended or revised', () => {
+	it('is off up to the run after the one that came back: the average begins anew there', () => {
+		const drift = driftOf(runs([...flow, 62, 63, 50, 50.5, 51]), { from: 1, to: 10 });
+		expect(drift.points.map(({ begun }) => begun).slice(10)).toEqual([
+			null,
+			null,
+			'average begun anew: back across the centre after a signal',
+			null,
+			null
+		]);
+		expect(offSpans(drift)).toEqual([expect.objectContaining({ from: at(11), to: at(14) })]);
+	});
+
+	it('begins its average anew with the first run of a new revision', () => {
+		const taken = runs([...flow, 52, 52.5, 52, 51]).map((run, index) => ({
+			...run,
+			revision: index < 12 ? 1 : 2
+		}));
+		const { points } = driftOf(taken, { from: 1, to: 10 });
+		expect(points[12]?.begun).toBe('average begun anew: the rig was revised');
+		expect(points[12]?.average?.ewma).toBeCloseTo(0.2 * 52 + 0.8 * 50.81, 10);
+		expect(points[13]?.begun).toBeNull();
+	});
+});
+
 describe('a rig that was off', () => {
 	const drift = driftOf(runs([...flow, 62, 63, 50, 50, 50, 50, 50, 50, 50, 50, 50]), { from: 1, to: 10 });
 

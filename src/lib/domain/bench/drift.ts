@@ -1,4 +1,10 @@
-import { type ControlChart, controlChart, type ChartPoint, signalWords } from './statistics/control-chart';
+import {
+	beginningWords,
+	type ControlChart,
+	controlChart,
+	type ChartPoint,
+	signalWords
+} from './statistics/control-chart';
 import { type ControlLimits, movingRanges } from './statistics/control-limits';
 
 /** A run of stock that counts: the readings of it that do, in the workload's unit. */
@@ -28,6 +34,8 @@ export interface DriftPoint extends Omit<StockRun, 'values'> {
 	average: Pick<ChartPoint, 'ewma' | 'lower' | 'upper'> | null;
 	/** What this run signals, in words. */
 	signals: string[];
+	/** Why the weighted average begins anew with this run, in words; null where it goes on. */
+	begun: string | null;
 }
 
 /** Numbers of the first and the last run that are held to be in order, from 1. */
@@ -57,24 +65,32 @@ export function fitWindow(count: number, asked: Partial<DriftWindow> = {}): Drif
 	return { from, to };
 }
 
-function chartOf(window: readonly number[], rest: readonly number[]): ControlChart | string {
+function chartOf(
+	window: readonly number[],
+	rest: readonly number[],
+	revised: ReadonlySet<number>
+): ControlChart | string {
 	if (window.length < 2) return 'A control chart needs two runs or more of stock to begin with.';
 	if (movingRanges(window).every((range) => range === 0))
 		return 'The runs it would begin with do not vary at all, so they give no limits.';
-	return controlChart(window, rest);
+	return controlChart(window, rest, { revised });
 }
 
 /**
  * The runs of stock with one workload on one rig as an individuals chart of their means: moving ranges, a weighted
- * average, and the signals of each run after the window that the limits are made from. Runs before the window stay on
- * the chart without a word.
+ * average, and the signals of each run after the window that the limits are made from. The average begins anew with a
+ * revision of the rig and once a signal is mended. Runs before the window stay on the chart without a word.
  * @param runs in the order they were taken; those without a reading that counts are left out
  */
 export function driftOf(runs: readonly StockRun[], asked: Partial<DriftWindow> = {}): Drift {
 	const taken = runs.filter((run) => run.values.length > 0);
 	const means = taken.map((run) => meanOf(run.values));
 	const window = fitWindow(taken.length, asked);
-	const chart = chartOf(means.slice(window.from - 1, window.to), means.slice(window.to));
+	const rest = taken.slice(window.to);
+	const revised = new Set(
+		rest.flatMap(({ revision }, at) => (revision === taken[window.to + at - 1]?.revision ? [] : [at]))
+	);
+	const chart = chartOf(means.slice(window.from - 1, window.to), means.slice(window.to), revised);
 	const ranges = movingRanges(means);
 	const points = taken.map(({ values, ...run }, at): DriftPoint => {
 		const charted = typeof chart === 'string' ? undefined : chart.points[at - window.to];
@@ -86,7 +102,8 @@ export function driftOf(runs: readonly StockRun[], asked: Partial<DriftWindow> =
 			inWindow: at + 1 >= window.from && at + 1 <= window.to,
 			movingRange: ranges[at - 1] ?? null,
 			average: charted ? { ewma: charted.ewma, lower: charted.lower, upper: charted.upper } : null,
-			signals: (charted?.signals ?? []).map((signal) => signalWords[signal])
+			signals: (charted?.signals ?? []).map((signal) => signalWords[signal]),
+			begun: charted?.begun ? beginningWords[charted.begun] : null
 		};
 	});
 	return {

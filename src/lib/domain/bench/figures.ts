@@ -1,3 +1,4 @@
+import type { CostKind } from './cost-of';
 import type { Direction, Headline, WorkloadClass } from './words';
 
 /** What a set of readings says of itself. Unit: the workload's; percent where the name says so. */
@@ -62,7 +63,7 @@ export interface Difference {
 	why: string;
 }
 
-/** The geometric mean of a profile's ratios. */
+/** The geometric mean of a profile's ratios in the workloads that measure performance. */
 export interface Overall {
 	ratio: number;
 	gainPercent: number;
@@ -71,8 +72,13 @@ export interface Overall {
 	gainCi95?: [number, number] | null;
 	/** Workloads that went into it. */
 	workloads: string[];
-	/** Workloads of the campaign that could not, for want of readings on a side or of a ratio. */
+	/** Performance workloads of the campaign that could not, for want of readings on a side or of a ratio. */
 	missing: string[];
+	/**
+	 * Workloads left out on purpose, with the cost that they measure. Not there in editions from before costs were
+	 * left out, whose figure rests on every ratio.
+	 */
+	aside?: { workload: string; cost: CostKind }[];
 }
 
 export interface CellFigures {

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { costOf } from './cost-of';
 import { comparedTogether, heldAgainst, overallAgainst, type HeldWorkload } from './held-against';
 import { compareCells } from './statistics/compare';
 import { holm } from './statistics/holm';
@@ -109,5 +110,95 @@ describe('the overall figure over a baseline', () => {
 		const [forth, back] = [over('tuned', 'stock'), over('stock', 'tuned')];
 		expect(back?.ci95?.[0]).toBeCloseTo(1 / (forth?.ci95?.[1] ?? 0), 12);
 		expect(back?.ratio).toBeCloseTo(1 / (forth?.ratio ?? 0), 12);
+	});
+
+	describe('rests on performance alone', () => {
+		const mean = fc.double({ min: 1, max: 1000, noNaN: true });
+		const unit = fc.constantFrom(
+			'points',
+			's',
+			'frames/s',
+			'GB/s',
+			'ns',
+			'W',
+			'J',
+			'dB(A)',
+			'sone',
+			'K',
+			'°C',
+			'A',
+			'V',
+			'EUR'
+		);
+		const column = fc.record({
+			unit,
+			better: fc.constantFrom('higher' as const, 'lower' as const),
+			stock: mean,
+			tuned: mean
+		});
+		type Column = typeof column extends fc.Arbitrary<infer C> ? C : never;
+		const figureOf = (columns: readonly Column[], profile = 'tuned', baseline = 'stock') => {
+			const ruled = columns.map((one, at) =>
+				workload({ slug: `w-${at}`, unit: one.unit, better: one.better })
+			);
+			const filled = columns.flatMap(({ stock, tuned }, at) => [
+				cell('stock', [stock, stock * 1.01, stock * 0.99], `w-${at}`),
+				cell('tuned', [tuned, tuned * 1.02, tuned * 0.98], `w-${at}`)
+			]);
+			const standings = heldAgainst(filled, ruled, baseline);
+			const held = filled.map((one, at) => ({ ...one, comparison: standings[at]?.comparison ?? null }));
+			return overallAgainst(held, ruled, profile, baseline);
+		};
+		const performance = ({ unit: name }: Column) => costOf(name) === null;
+
+		it('whatever the costs beside it are', () => {
+			fc.assert(
+				fc.property(fc.array(column, { maxLength: 8 }), mean, (columns, other) => {
+					const figure = figureOf(columns);
+					const without = figureOf(columns.filter(performance));
+					const changed = figureOf(columns.map((one) => (performance(one) ? one : { ...one, tuned: other })));
+					expect(figure?.ratio).toBe(without?.ratio);
+					expect(figure?.ci95).toEqual(without?.ci95);
+					expect(changed).toEqual(figure);
+				})
+			);
+		});
+
+		it('and every workload is in it, missing from it or left aside', () => {
+			fc.assert(
+				fc.property(fc.array(column, { minLength: 1, maxLength: 8 }), (columns) => {
+					const figure = figureOf(columns);
+					if (!figure) {
+						expect(columns.some(performance)).toBe(false);
+						return;
+					}
+					const aside = figure.aside ?? [];
+					expect(
+						[...figure.workloads, ...figure.missing, ...aside.map((one) => one.workload)].sort()
+					).toEqual(columns.map((_, at) => `w-${at}`).sort());
+					expect(aside.map(({ workload: slug, cost }) => [slug, cost])).toEqual(
+						columns.flatMap((one, at) => (performance(one) ? [] : [[`w-${at}`, costOf(one.unit)]]))
+					);
+				})
+			);
+		});
+
+		it('minds neither the order of the columns, nor their units, nor which side is the baseline', () => {
+			fc.assert(
+				fc.property(fc.array(column, { minLength: 1, maxLength: 8 }), mean, (columns, factor) => {
+					const figure = figureOf(columns);
+					if (!figure) return;
+					const near = (ratio: number | undefined, wanted: number) =>
+						expect(Math.abs((ratio ?? NaN) / wanted - 1)).toBeLessThan(1e-9);
+					near(figureOf([...columns].reverse())?.ratio, figure.ratio);
+					near(
+						figureOf(columns.map((one) => ({ ...one, stock: one.stock * factor, tuned: one.tuned * factor })))
+							?.ratio,
+						figure.ratio
+					);
+					near(figureOf(columns, 'stock', 'tuned')?.ratio, 1 / figure.ratio);
+				})
+			);
+		});
 	});
 });

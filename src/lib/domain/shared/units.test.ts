@@ -2,12 +2,21 @@ import { describe, expect, it } from 'vitest';
 import { kindOfWords, plainUnit, scaledUnit, unitOf, unitsOf } from './units';
 
 describe('a unit', () => {
-	// SI Brochure 9th edition, table 8: 1 min = 60 s, 1 h = 3600 s; 1 W·h = 3.6 kJ follows. IEC 80000-13: Mi = 1 048 576.
+	// SciPy 1.17.1, scipy.constants: minute, hour, milli, micro, nano, kilo, mega, giga, tera, kibi, mebi, gibi and
+	// degree_Fahrenheit; a watt hour is hour × 1 J. The definitions are the SI Brochure's (table 8) and IEC 80000-13's.
 	it.each([
 		['min', 'time', 60],
 		['h', 'time', 3600],
 		['ms', 'time', 0.001],
 		['Wh', 'energy', 3600],
+		['kWh', 'energy', 3_600_000],
+		['μs', 'time', 1e-6],
+		['ns', 'time', 1e-9],
+		['kHz', 'frequency', 1000],
+		['TB/s', 'throughput', 1e12],
+		['KiB/s', 'throughput', 1024],
+		['GiB/s', 'throughput', 1_073_741_824],
+		['°F', 'temperature', 0.5555555555555556],
 		['MiB/s', 'throughput', 1_048_576],
 		['MB/s', 'throughput', 1_000_000],
 		['GHz', 'frequency', 1e9]

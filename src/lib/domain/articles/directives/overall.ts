@@ -3,6 +3,7 @@ import { printedSize } from '../figures-in-words';
 import { element, escapeHtml } from '../html';
 import { printedGain, printedGainRange, printedRatio } from '../../shared/quantity';
 import type { Overall } from '../../bench/figures';
+import { overallWords } from '../../bench/overall-words';
 import type { ProfileFacts } from '../data';
 import { attribute, findBaseline, findProfile, type ProfilePlace } from './lookup';
 import { directive, found, missing } from './shape';
@@ -30,7 +31,7 @@ function printedAs(show: Show, { gainPercent, gainCi95 = null, ratio }: Overall)
 export const overallGain = directive<OverallGain>({
 	name: 'overall',
 	level: 'inline',
-	words: 'The overall gain of a profile: the geometric mean over all workloads.',
+	words: 'The overall gain of a profile: the geometric mean over the workloads that measure performance.',
 	attributes: [
 		attribute.profile(),
 		attribute.over(),
@@ -45,8 +46,10 @@ export const overallGain = directive<OverallGain>({
 		if (!baseline.ok) return baseline;
 		const figure = overallOver(campaign, profile.slug, baseline.value.slug);
 		if (profile.slug === baseline.value.slug || !figure) {
+			const [why] = overallWords([], campaign.workloads);
 			return missing(
-				`There is no overall figure of ${profile.name} over ${baseline.value.name}: no workload was measured with both.`,
+				why ??
+					`There is no overall figure of ${profile.name} over ${baseline.value.name}: no workload of performance was measured with both.`,
 				campaign.profiles.map((one) => one.slug).filter((slug) => slug !== baseline.value.slug)
 			);
 		}
@@ -59,7 +62,7 @@ export const overallGain = directive<OverallGain>({
 	render({ campaign, profile, baseline, figure, show, text }, { call }) {
 		const count = figure.workloads.length;
 		const interval = figure.gainCi95 ? `, 95 % interval ${printedGainRange(figure.gainCi95)}` : '';
-		const without = figure.missing.length > 0 ? `, without ${figure.missing.join(', ')}` : '';
+		const restsOn = overallWords([{ name: profile.name, figure }], campaign.workloads).join(' ');
 		return {
 			html: element(
 				'span',
@@ -68,7 +71,7 @@ export const overallGain = directive<OverallGain>({
 					'data-campaign': campaign.slug,
 					'data-profile': profile.slug,
 					'data-over': baseline.slug,
-					title: `${profile.name} over ${baseline.name}: geometric mean of the ratios of ${count} workload${count === 1 ? '' : 's'}${without}${interval}`
+					title: `${profile.name} over ${baseline.name}: geometric mean of the ratios of ${count} workload${count === 1 ? '' : 's'}${interval}. ${restsOn}`
 				},
 				escapeHtml(text)
 			),

@@ -17,7 +17,7 @@ export function driftTable(spec: DriftSpec): string {
 			{ head: 'n', figures: true },
 			{ head: 'Weighted average', figures: true },
 			{ head: 'Moving range', figures: true },
-			{ head: 'Signals' }
+			{ head: 'Signals and beginnings' }
 		],
 		[
 			{
@@ -29,7 +29,9 @@ export function driftTable(spec: DriftSpec): string {
 					String(point.n),
 					orNone(point.average?.ewma),
 					orNone(point.movingRange),
-					point.inWindow ? 'one of those the limits are from' : point.signals.join('; ')
+					point.inWindow
+						? 'one of those the limits are from'
+						: [...point.signals, ...(point.begun ? [point.begun] : [])].join('; ')
 				])
 			}
 		]
@@ -53,6 +55,7 @@ export const driftCsv = (spec: DriftSpec): string =>
 			'ewma_low',
 			'ewma_high',
 			'signals',
+			'ewma_begun_anew',
 			'centre',
 			'lower',
 			'upper'
@@ -71,6 +74,7 @@ export const driftCsv = (spec: DriftSpec): string =>
 			point.average?.lower ?? null,
 			point.average?.upper ?? null,
 			point.signals.join('; '),
+			point.begun ?? '',
 			spec.limits.centre,
 			spec.limits.lower,
 			spec.limits.upper

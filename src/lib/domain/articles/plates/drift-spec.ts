@@ -43,6 +43,7 @@ export function driftSpec(
 		points,
 		foot: [
 			`Limits from runs ${used.from} to ${used.to}: ${printedWithUnit(limits.centre, workload.unit, precision)}, and three of its short-term deviations to either side. ${countOf(points)} A signal asks what changed; it proves nothing.`,
+			'The weighted average begins anew at the centre when the rig was revised, and with the first run back across the centre after a signal, so that a shift that was mended does not go on signalling.',
 			`Rig ${rig.name}, ${printedDates(
 				points.map(({ at }) => at),
 				zone

@@ -1,4 +1,5 @@
 import type { Overall } from '../../bench/figures';
+import { overallWords } from '../../bench/overall-words';
 import { printedGain, printedGainRange } from '../../shared/quantity';
 import { overallOver } from '../against';
 import type { ArticleData, CampaignData, ProfileFacts } from '../data';
@@ -41,7 +42,7 @@ export function overallSpec(
 		kind: 'overall',
 		campaign: campaign.slug,
 		title: options.title ?? `Overall gain over ${stockName(over.name)}`,
-		sub: 'Geometric mean of the ratios, in percent; right is better.',
+		sub: 'Geometric mean of the ratios of performance, in percent; right is better.',
 		baseline: { profile: over.slug, name: over.name },
 		series: figures.map(({ profile }) => ({
 			profile: profile.slug,
@@ -60,6 +61,10 @@ export function overallSpec(
 		workloads,
 		foot: [
 			'Each workload counts once; whiskers are 95 % intervals of the geometric mean, for these workloads.',
+			...overallWords(
+				figures.map(({ profile, figure }) => ({ name: profile.name, figure })),
+				campaign.workloads
+			),
 			rigAndDates(
 				campaign,
 				campaign.cells.filter((cell) => shown.has(cell.profile) && workloads.includes(cell.workload)),

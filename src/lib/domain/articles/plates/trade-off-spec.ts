@@ -88,7 +88,7 @@ export function tradeOffSpec(
 		rows,
 		workloads,
 		foot: [
-			'Classes of work are geometric means of their workloads; whiskers are 95 % intervals.',
+			'Classes of work are geometric means of the workloads that measure performance; costs stand by themselves. Whiskers are 95 % intervals.',
 			rigAndDates(
 				campaign,
 				campaign.cells.filter((cell) => shown.has(cell.profile) && workloads.includes(cell.workload)),

@@ -52,9 +52,10 @@ describe('what a record proves', () => {
 		expect(failureBound(hours, failures).words.replaceAll('\u00a0', ' ')).toBe(words);
 	});
 
-	// The rule of three (Hanley & Lippman-Hand 1983, JAMA 249, from memory): 3/n bounds a rate after n without an event.
+	// SciPy 1.17.1, scipy.stats.chi2.ppf(0.95, 2) / 2 / 100: Poisson's upper bound after a hundred hours without a failure,
+	// near the 3/n of the rule of three.
 	it('is near the rule of three', () => {
-		expect(failureBound(100, 0).perHour).toBeCloseTo(0.03, 3);
+		expect(failureBound(100, 0).perHour).toBeCloseTo(0.029957322735539894, 12);
 	});
 
 	it('falls with the hours and rises with the failures', () => {

@@ -29,7 +29,8 @@ describe('limits of an individuals chart', () => {
 });
 
 describe('the weighted average', () => {
-	// NIST/SEMATECH e-Handbook §6.3.2.4: λ 0.3, EWMA₀ 50, s 2.0539; the series from memory, the limits also as quoted.
+	// NIST/SEMATECH e-Handbook §6.3.2.4: λ 0.3, EWMA₀ 50, s 2.0539; readings, averages and limits as seven public
+	// projects' checks quote that page, all alike.
 	const series = [
 		52, 47, 53, 49.3, 50.1, 47, 51, 50.1, 51.2, 50.5, 49.6, 47.6, 49.9, 51.3, 47.8, 51.2, 52.6, 52.4, 53.6,
 		52.1
@@ -91,6 +92,55 @@ describe('a control chart', () => {
 	it('sees a slow rise that no single reading shows', () => {
 		const { points } = controlChart(flow, [52, 52.5, 53, 53.2, 53.4, 53.6, 53.8]);
 		expect(points.at(-1)?.signals).toEqual(['average-above']);
+	});
+
+	it('begins its average anew at the centre once a shift is mended, and then keeps quiet', () => {
+		const { limits, points } = controlChart(flow, [61, 62, 61.5, 50, 51, 50.6, 51.2]);
+		expect(points.map(({ begun }) => begun)).toEqual([null, null, null, 'mended', null, null, null]);
+		// The way back is a jump; what follows is as a chart that begins there.
+		expect(points.map((point) => point.signals).slice(3)).toEqual([['jump'], [], [], []]);
+		const fresh = ewma([50, 51, 50.6, 51.2], limits, 0.2, 2.7);
+		points.slice(3).forEach(({ ewma: average, lower, upper }, at) => {
+			expect({ ewma: average, lower, upper }).toEqual(fresh[at]);
+		});
+	});
+
+	it('keeps its average while the shift lasts, however long', () => {
+		const { points } = controlChart(
+			flow,
+			Array.from({ length: 12 }, (_, at) => 53 + (at % 3) * 0.2)
+		);
+		expect(points.every(({ begun }) => begun === null)).toBe(true);
+		expect(points.slice(4).every((point) => point.signals.includes('average-above'))).toBe(true);
+	});
+
+	it('does not begin anew after a jump that stays in order, which has no side', () => {
+		const { points } = controlChart(flow, [48, 54.5, 50, 51]);
+		expect(points.map((point) => point.signals)).toEqual([[], ['jump'], [], []]);
+		expect(points.every(({ begun }) => begun === null)).toBe(true);
+	});
+
+	it('begins anew with a revised rig, what is in a row as well', () => {
+		const values = Array.from({ length: 12 }, () => 51.2);
+		const { points } = controlChart(flow, values, { revised: new Set([7]) });
+		expect(points[7]?.begun).toBe('revision');
+		expect(points[7]?.ewma).toBeCloseTo(0.2 * 51.2 + 0.8 * 50.81, 12);
+		expect(points.some((point) => point.signals.includes('run-above'))).toBe(false);
+		expect(controlChart(flow, values).points[7]?.signals).toEqual(['run-above']);
+	});
+
+	it('has an average of the readings since it last began, whatever they are', () => {
+		fc.assert(
+			fc.property(fc.array(fc.double({ min: 30, max: 70, noNaN: true }), { maxLength: 20 }), (values) => {
+				const { limits, points } = controlChart(flow, values);
+				points.forEach((point, at) => {
+					const from = points.slice(0, at + 1).findLastIndex(({ begun }) => begun !== null);
+					const since = ewma(values.slice(Math.max(0, from), at + 1), limits, 0.2, 2.7).at(-1);
+					expect(point.ewma).toBe(since?.ewma);
+					expect(point.upper).toBe(since?.upper);
+				});
+			})
+		);
 	});
 
 	it('minds neither zero nor unit, and turns round with the readings', () => {

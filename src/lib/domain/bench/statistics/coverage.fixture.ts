@@ -7,7 +7,7 @@ import { side, spread } from './sides';
 import type { IntervalMethod } from './coverage-warning';
 
 /** Numbers between 0 and 1 from a seed (mulberry32). */
-function uniformFrom(seed: number): () => number {
+export function uniformFrom(seed: number): () => number {
 	let state = seed;
 	return () => {
 		state = (state + 0x6d2b79f5) | 0;
@@ -18,7 +18,7 @@ function uniformFrom(seed: number): () => number {
 }
 
 /** Readings of a bench: normal, the scatter in shares of the mean (Box & Muller). */
-const readingsFrom =
+export const readingsFrom =
 	(uniform: () => number) =>
 	(n: number, mean: number, cv: number): number[] =>
 		Array.from(

@@ -20,6 +20,20 @@ export function upperTailP(t: number, df: number): number {
 	return cdf(-t, df);
 }
 
+/** Quantiles known already, at whole degrees of freedom: the cells of a table ask for the same few again and again. */
+const quantiles = new Map<string, number>();
+const mostQuantiles = 2000;
+
+function wholeQuantile(p: number, df: number): number {
+	const key = `${p}/${df}`;
+	const known = quantiles.get(key);
+	if (known !== undefined) return known;
+	if (quantiles.size >= mostQuantiles) quantiles.clear();
+	const found = quantile(p, df);
+	quantiles.set(key, found);
+	return found;
+}
+
 /**
  * Quantile of Student's t; `df` need not be whole. RangeError outside 0 < p < 1 or for df ≤ 0.
  * @example studentQuantile(0.975, 2) // 4.302652729…
@@ -27,7 +41,7 @@ export function upperTailP(t: number, df: number): number {
 export function studentQuantile(p: number, df: number): number {
 	if (!(p > 0 && p < 1)) throw new RangeError('A quantile needs a probability between 0 and 1.');
 	if (!(df > 0)) throw new RangeError('Degrees of freedom must be above zero.');
-	return quantile(p, df);
+	return Number.isInteger(df) ? wholeQuantile(p, df) : quantile(p, df);
 }
 
 /**

@@ -3,8 +3,9 @@ import { studentQuantile, upperTailP } from './interval';
 import { satterthwaite, type Spread } from './sides';
 
 /** Beyond this many readings a side nobody goes on (common practice, no source). */
-const mostPerSide = 200;
-const power = 0.8;
+export const mostPerSide = 200;
+/** Share of campaigns that the readings asked for are to settle. */
+export const wantedPower = 0.8;
 
 export type RunsNeeded =
 	| {
@@ -28,8 +29,8 @@ function chance(distances: readonly number[], se: number, df: number, alpha: num
 	return 1 - distances.reduce((sum, distance) => sum + upperTailP(distance / se - critical, df), 0);
 }
 
-/** Smallest whole number from 2 on for which `enough` holds, where it holds for all above; null beyond `most`. */
-function smallest(most: number, enough: (n: number) => boolean): number | null {
+/** Smallest whole number from 2 on for which `enough` holds, given that it holds for all above; null beyond `most`. */
+export function smallest(most: number, enough: (n: number) => boolean): number | null {
 	if (!enough(most)) return null;
 	let [low, high] = [2, most];
 	while (low < high) {
@@ -50,7 +51,7 @@ export function readingsPerSide(
 	sds: readonly [number, number],
 	distances: readonly number[],
 	alpha: number,
-	wanted = power,
+	wanted = wantedPower,
 	most = mostPerSide
 ): number | null {
 	const [a, b] = [sds[0] ** 2, sds[1] ** 2];
@@ -60,14 +61,14 @@ export function readingsPerSide(
 	});
 }
 
-interface Question {
-	subject: Spread;
-	baseline: Spread;
-	/** Deviations of one reading of each side, as they enter the test. */
-	sds: readonly [number, number];
+export interface Question {
+	subject: Pick<Spread, 'n'>;
+	baseline: Pick<Spread, 'n'>;
 	estimate: number;
 	margins: readonly [number, number];
 	together: number;
+	/** Readings a side that would tell the estimate from margins so far off at that one-sided level; null beyond the most. */
+	perSide: (distances: readonly number[], alpha: number) => number | null;
 }
 
 /** What of its margins a comparison must exclude: both from within, the nearer one from beyond. */
@@ -76,12 +77,14 @@ function testedMargins(estimate: number, [lower, upper]: readonly [number, numbe
 	return [estimate >= upper ? upper : lower];
 }
 
-function settle({ subject, baseline, sds, estimate, margins, together }: Question): RunsNeeded {
+/** What would settle a comparison that says *not enough runs*, whichever average it is of. */
+export function settle(question: Question): RunsNeeded {
+	const { subject, baseline, estimate, margins, together } = question;
 	const tested = testedMargins(estimate, margins);
 	const inside = tested.length === 2;
 	const distances = tested.map((margin) => Math.abs(estimate - margin));
 	const perSide = distances.every((distance) => distance > 0)
-		? readingsPerSide(sds, distances, (inside ? 0.05 : 0.025) / together)
+		? question.perSide(distances, (inside ? 0.05 : 0.025) / together)
 		: null;
 	if (perSide === null) return { kind: 'too-near' };
 	return {
@@ -94,7 +97,7 @@ function settle({ subject, baseline, sds, estimate, margins, together }: Questio
 }
 
 /**
- * How many readings would settle a comparison that says *not enough runs*, if means and scatter stay what they are:
+ * How many readings would settle a comparison of means that says *not enough runs*, if means and scatter stay what they are:
  * to show a difference beyond m, or equivalence within m, whichever the present ratio points to; power 0.8.
  * Unknown where a side has fewer than two readings, neither varies, or a mean is not above zero.
  * @param leastDifferencePercent m, in percent
@@ -116,7 +119,8 @@ export function runsNeeded(
 	// In units of the bottom mean; the widest of the tested margins weighs the bottom side's scatter.
 	const theta = Math.max(...testedMargins(estimate, margins));
 	const sds = [top.sd / bottom.mean, (theta * bottom.sd) / bottom.mean] as const;
-	return settle({ subject, baseline, sds, estimate, margins, together });
+	const perSide: Question['perSide'] = (distances, alpha) => readingsPerSide(sds, distances, alpha);
+	return settle({ subject, baseline, estimate, margins, together, perSide });
 }
 
 /** As `runsNeeded`, for a comparison by difference, against a least difference in the unit of the readings. */
@@ -128,10 +132,11 @@ export function runsNeededOfDifference(
 ): RunsNeeded {
 	if (subject.sd === null || baseline.sd === null || subject.sd + baseline.sd === 0)
 		return { kind: 'unknown' };
+	const sds = [subject.sd, baseline.sd] as const;
 	return settle({
 		subject,
 		baseline,
-		sds: [subject.sd, baseline.sd],
+		perSide: (distances, alpha) => readingsPerSide(sds, distances, alpha),
 		estimate: subject.mean - baseline.mean,
 		margins: [-leastDifference, leastDifference],
 		together

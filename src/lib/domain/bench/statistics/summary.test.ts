@@ -63,7 +63,7 @@ describe('a summary', () => {
 	});
 
 	it('agrees with three readings of mercury', () => {
-		// Boost.Math's documentation after Miller & Miller, 3rd ed. pp 54–55 (the readings themselves from memory).
+		// Boost.Math's documentation after Miller & Miller, 3rd ed. pp 54–55; the readings from Boost's example programs.
 		const summary = summarise([38.9, 37.4, 37.1]);
 		expect(summary.mean).toBeCloseTo(37.8, 12);
 		expect(summary.sd).toBeCloseTo(0.964365076099, 11);

@@ -15,7 +15,8 @@ import { relative } from './nearly.fixture';
 const mean = (values: number[]) => values.reduce((sum, value) => sum + value, 0) / values.length;
 
 describe('type A', () => {
-	it('JCGM 100:2008, 4.4.3: twenty temperatures, u 0.333 (readings from memory)', () => {
+	// Readings and u 0.333 as a public project's checks quote table 1 of that clause.
+	it('JCGM 100:2008, 4.4.3: twenty temperatures, u 0.333', () => {
 		const { u, df } = typeA([
 			96.9, 98.18, 98.25, 98.61, 99.03, 99.49, 99.56, 99.74, 99.89, 100.07, 100.33, 100.42, 100.68, 100.95,
 			101.11, 101.2, 101.57, 101.84, 102.36, 102.72
@@ -72,7 +73,8 @@ describe('combined uncertainty', () => {
 		expect(Math.round(expanded)).toBe(93);
 	});
 
-	it('GUM H.2: resistance, reactance and impedance with correlated inputs (readings from memory)', () => {
+	// Readings as three public projects quote table H.2, all alike.
+	it('GUM H.2: resistance, reactance and impedance with correlated inputs', () => {
 		const volts = [5.007, 4.994, 5.005, 4.99, 4.999];
 		const amps = [19.663e-3, 19.639e-3, 19.64e-3, 19.685e-3, 19.678e-3];
 		const phases = [1.0456, 1.0438, 1.0468, 1.0428, 1.0433];

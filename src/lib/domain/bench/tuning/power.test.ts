@@ -7,7 +7,7 @@ describe('dynamic power against stock', () => {
 		expect(dynamicPowerFactor({ volts: 0.85, clock: 0.86 }, { volts: 1, clock: 1 })).toBeCloseTo(0.62135, 10);
 	});
 
-	// Hennessy & Patterson, ch. 1, print 0.61 for 0.85³ (from memory; the arithmetic is exact).
+	// Exact decimal arithmetic.
 	it('0.85³', () => {
 		expect(dynamicPowerFactor({ volts: 0.85, clock: 0.85 }, { volts: 1, clock: 1 })).toBeCloseTo(
 			0.614125,

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { campaignStates } from '../../../domain/bench/campaign-state';
+import { costKinds } from '../../../domain/bench/cost-of';
 import { verdicts } from '../../../domain/bench/figures';
 import { directions } from '../../../domain/bench/words';
 import { campaignInput, campaignsApiQuery, summaryQuery } from '../../../schemas/campaign';
@@ -126,7 +127,11 @@ const summary = z.object({
 	overall: z.array(
 		z.object({
 			profile: z.string(),
-			ratio: z.number().describe("Geometric mean of the profile's ratios."),
+			ratio: z
+				.number()
+				.describe(
+					"Geometric mean of the profile's ratios in the workloads that measure performance: scores, rates and times."
+				),
 			gainPercent: z.number(),
 			ci95: interval
 				.optional()
@@ -135,7 +140,12 @@ const summary = z.object({
 				),
 			gainCi95: interval.optional(),
 			workloads: z.array(z.string()).describe('Workloads that went into it.'),
-			missing: z.array(z.string()).describe('Workloads without a ratio.')
+			missing: z.array(z.string()).describe('Performance workloads without a ratio.'),
+			aside: z
+				.array(z.object({ workload: z.string(), cost: z.enum(costKinds) }))
+				.optional()
+				.describe('Workloads left out because they measure a cost, by the kind of their unit.'),
+			words: z.string().describe('What the figure rests on, what it leaves out and why, in sentences.')
 		})
 	)
 });

@@ -1,5 +1,6 @@
 import { countedReadings } from '../../../domain/bench/campaign';
 import type { Comparison, Difference, Overall, Summary } from '../../../domain/bench/figures';
+import { overallWords } from '../../../domain/bench/overall-words';
 import type { Direction } from '../../../domain/bench/words';
 import { comparedTogether } from '../../../domain/bench/held-against';
 import { done, type Outcome } from '../../../domain/shared/outcome';
@@ -36,7 +37,8 @@ export interface CampaignSummary {
 	/** Comparisons read together: each verdict is corrected for so many (Holm). */
 	together: number;
 	cells: SummarisedCell[];
-	overall: ({ profile: string } & Overall)[];
+	/** `words`: what the figure rests on and what it leaves out, in sentences. */
+	overall: ({ profile: string; words: string } & Overall)[];
 }
 
 const spread = (summary: Summary | null) => ({
@@ -87,9 +89,11 @@ export function summaryOf({ plan, matrix, figures }: MeasuredCampaign): Campaign
 		baseline: matrix.baseline,
 		together: comparedTogether(figures.cells),
 		cells,
-		overall: matrix.profiles.flatMap((profile) => {
-			const figure = figures.overall[profile];
-			return figure ? [{ profile, ...figure }] : [];
+		overall: plan.profiles.flatMap(({ slug, name }) => {
+			const figure = figures.overall[slug];
+			return figure
+				? [{ profile: slug, ...figure, words: overallWords([{ name, figure }], plan.workloads).join(' ') }]
+				: [];
 		})
 	};
 }

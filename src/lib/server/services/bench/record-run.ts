@@ -59,8 +59,8 @@ export async function recordRun(
 		});
 		const fresh = input.readings.map((value) => ({ value, key: null }));
 		const signatureRemoved = await storeReadings(tx, cell, id, fresh, 1);
-		const stored = await readings.lockOfRun(db, id);
-		const counted = await readings.countedOfCell(db, cell);
+		const stored = await readings.ofRun(db, id);
+		const counted = await readings.countedOfCellNow(db, cell);
 		return done({
 			id,
 			campaign: plan.head.slug,

@@ -8,8 +8,7 @@ import * as audit from '../../db/queries/audit';
 import * as readings from '../../db/queries/reading';
 import * as runs from '../../db/queries/run';
 import * as settings from '../../db/queries/settings';
-import { findOpenCampaign } from './find-campaign';
-import { findCell } from './find-cell';
+import { findOpenCell } from './find-open-cell';
 import { holdOver } from './hold-over';
 import { lockCell } from './lock-cell';
 import { readStarted } from './read-started';
@@ -127,21 +126,19 @@ export async function recordGridReadings(
 	input: GridInput
 ): Promise<Outcome<GridAnswer>> {
 	if (!may(ctx.actor, 'run.record')) return refuse('forbidden', 'Only a tester enters readings.');
-	const found = await findOpenCampaign(ctx, campaignRef);
-	if (!found.ok) return found;
-	const at = findCell(found.value, input);
+	const at = await findOpenCell(ctx, campaignRef, input);
 	if (!at.ok) return at;
 	const fault = unitFault(input.unit, at.value.workload);
 	if (fault) return refuse('invalid', `${fault} Nothing was stored.`, { fields: { unit: [fault] } });
 	if (new Set(input.readings.map((row) => row.key)).size < input.readings.length)
 		return refuse('invalid', 'Two readings carry the same key. Nothing was stored.');
-	const { zone } = await settings.publication(ctx.db);
+	const zone = input.started === '' ? 'UTC' : (await settings.publication(ctx.db)).zone;
 	const started = readStarted(input.started, zone);
 	if (!started.ok) return started;
 	const whole = { ...input, startedAt: started.value ?? input.startedAt };
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
-		const cell = await lockCell(tx, found.value, at.value);
+		const cell = await lockCell(tx, at.value.campaignId, at.value);
 		return cell.ok ? record(tx, cell.value, at.value.workload.needed, whole) : cell;
 	});
 }

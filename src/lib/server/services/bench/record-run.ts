@@ -46,7 +46,7 @@ export async function recordRun(
 	const warnings = await doubtReadings(ctx, plan, at.value, input.readings);
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
-		const locked = await lockCell(tx, plan, at.value);
+		const locked = await lockCell(tx, plan.head.id, at.value);
 		if (!locked.ok) return locked;
 		const cell = locked.value;
 		const id = await storeRun(tx, {

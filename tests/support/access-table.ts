@@ -92,6 +92,7 @@ export const access: Record<string, Record<string, Need>> = {
 	'/(staff)/bench/explore': { load: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/export.csv': { GET: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/events': { GET: 'bench.read' },
+	'/(staff)/bench/campaigns/[campaign]/news': { GET: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/history': { load: 'bench.read' },
 	'/(staff)/bench/campaigns/[campaign]/import': {
 		load: 'run.record',

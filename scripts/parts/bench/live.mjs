@@ -1,5 +1,5 @@
 // A board of 20 × 40 cells that ten testers fill at once while each of them watches it: how soon an entry is
-// acknowledged, how soon the others are told, and what the board itself takes. The control is one tester alone.
+// acknowledged, how soon the others are told, and what the board itself takes, followed or opened. The control is one tester alone.
 import { randomBytes, randomUUID } from 'node:crypto';
 import { createConnection } from 'mysql2/promise';
 import { insertRows, nextId, upTo } from '../fill/insert.mjs';
@@ -15,6 +15,7 @@ const betweenMs = 200;
 /** As the page does: what happened is gathered before the board is read anew, longer where that took long. */
 const gatherMs = 250;
 const restTimes = 4;
+const openMs = 1000;
 const goalMs = 100;
 
 /** @param {number[]} values @param {number} q */
@@ -133,18 +134,37 @@ export async function measureLive(server, mail, folder, print) {
 	const boards = [];
 	/** @type {number[]} */
 	const toldAfter = [];
+	/** Boards that could not be brought up to date and were read whole. */
+	let anew = 0;
 
+	const cell = 'profile=profile-0&workload=workload-0';
 	const readBoard = /** @param {string} cookie */ async (cookie) => {
 		const began = performance.now();
-		const answer = await fetch(`${address}/__data.json?profile=profile-0&workload=workload-0`, {
-			headers: { cookie }
-		});
+		const answer = await fetch(`${address}/__data.json?${cell}`, { headers: { cookie } });
 		await answer.arrayBuffer();
 		return answer.status === 200 ? performance.now() - began : NaN;
 	};
 
-	/** Watches as the page does: reads the board anew when somebody changed it. @param {string} cookie */
+	/** The board's tag, as the page finds it in its data. @param {string} text */
+	const tagIn = (text) => {
+		const { data } = JSON.parse(text).nodes.at(-1);
+		return /** @type {string} */ (data[data[data[0].board].tag]);
+	};
+	/** Watches as the page does: asks what changed on the board when somebody changed it. @param {string} cookie */
 	const watch = (cookie) => {
+		let tag = '';
+		const askNews = async () => {
+			const began = performance.now();
+			const answer = await fetch(`${address}/news?${cell}&tag=${tag}`, { headers: { cookie } });
+			const news = JSON.parse(await answer.text());
+			if (news.kind === 'changed') tag = news.tag;
+			else {
+				anew += 1;
+				const whole = await fetch(`${address}/__data.json?${cell}`, { headers: { cookie } });
+				tag = tagIn(await whole.text());
+			}
+			return performance.now() - began;
+		};
 		const leave = new AbortController();
 		/** @type {Promise<unknown>} */
 		let line = Promise.resolve();
@@ -155,12 +175,10 @@ export async function measureLive(server, mail, folder, print) {
 			timer ??= setTimeout(
 				() => {
 					timer = undefined;
-					line = line
-						.then(() => readBoard(cookie))
-						.then((ms) => {
-							tookMs = ms;
-							boards.push(ms);
-						});
+					line = line.then(askNews).then((ms) => {
+						tookMs = ms;
+						boards.push(ms);
+					});
 				},
 				Math.max(gatherMs, restTimes * tookMs || 0)
 			);
@@ -230,6 +248,15 @@ export async function measureLive(server, mail, folder, print) {
 
 		const watches = cookies.map(watch);
 		await pause(300);
+		/** Somebody opens the board, again and again, while the others fill it. @type {number[]} */
+		const opened = [];
+		let filling = true;
+		const opening = (async () => {
+			while (filling) {
+				opened.push(await readBoard(cookies[0] ?? ''));
+				await pause(openMs);
+			}
+		})();
 		const took = (
 			await Promise.all(
 				upTo(testers).map(async (who) => {
@@ -245,6 +272,8 @@ export async function measureLive(server, mail, folder, print) {
 				})
 			)
 		).flat();
+		filling = false;
+		await opening;
 		await pause(1500);
 		await Promise.all(watches.map((leave) => leave()));
 
@@ -259,6 +288,16 @@ export async function measureLive(server, mail, folder, print) {
 			goal: '<500',
 			met: board < 500
 		});
+		const open = opened.some(Number.isNaN) ? NaN : quantile(opened, 0.5);
+		print({
+			name: 'live.open.ms',
+			value: open,
+			control: quantile(still, 0.5),
+			goal: '<500',
+			met: open < 500
+		});
+		// The first of each watcher, and no more: the others were told by what changed.
+		print({ name: 'live.anew', value: anew, control: testers, goal: 'ratio<=1', met: anew <= testers });
 		const told = quantile(toldAfter, 0.99);
 		print({ name: 'live.told.p99.ms', value: told, control: 500, goal: '<1500', met: told < 1500 });
 		const wanted = testers * entriesEach * testers;

@@ -188,6 +188,11 @@ export const boardQuery = z.object({
 });
 export type BoardQuery = z.output<typeof boardQuery>;
 
+/** The board that somebody has, by its tag, and the cell of it that is open. */
+export const boardNewsQuery = boardQuery.pick({ profile: true, workload: true }).extend({
+	tag: z.string().trim().max(40).catch('').default('')
+});
+
 /** A page of a campaign's history, of one cell (profile/workload) or of all. */
 export const historyQuery = z.object({
 	cell: z.string().trim().max(170).default(''),

@@ -7,7 +7,7 @@ import { recordGridReadings } from '../../../src/lib/server/services/bench/recor
 import { contextFor } from '../../support/context';
 import { emptyTables, testDatabase, type TestDatabase } from '../../support/database';
 import { people, person } from '../../support/people';
-import { plannedCampaign, stockBench, valueOf } from './bench';
+import { fixtureReadings, plannedCampaign, stockBench, valueOf } from './bench';
 
 let database: TestDatabase;
 let tomas: Actor;
@@ -91,5 +91,32 @@ describe('two testers in one cell', () => {
 		]);
 		expect(answers.filter((answer) => answer.ok)).toHaveLength(1);
 		expect(await stored()).toHaveLength(7);
+	});
+});
+
+describe('two testers in one column', () => {
+	const tuned = fixtureReadings().find((row) => row.profile !== 'stock')?.profile ?? '';
+
+	it('do not wait for each other, however long the first takes to be stored', async () => {
+		const done: string[] = [];
+		await database.db.transaction(async (db) => {
+			valueOf(await recordGridReadings({ ...ctx, db }, campaign, sitting('tomas', [1, 2], 0)));
+			// The first is not committed yet. Would the second wait for it, this would be a deadlock of ours.
+			valueOf(await recordGridReadings(other, campaign, { ...sitting('pelle', [3, 4], 0), profile: tuned }));
+			done.push('second');
+		});
+		done.push('first');
+		expect(done).toEqual(['second', 'first']);
+		expect(await stored()).toEqual([1, 2, 3, 4]);
+	});
+
+	it('have one sitting in one cell, though it is sent to two in the same moment', async () => {
+		const answers = await Promise.all([
+			recordGridReadings(ctx, campaign, sitting('tomas', [1, 2], 0)),
+			recordGridReadings(ctx, campaign, { ...sitting('tomas', [1, 2], 0), profile: tuned })
+		]);
+		expect(answers.filter((answer) => answer.ok)).toHaveLength(1);
+		expect(answers.find((answer) => !answer.ok)).toMatchObject({ reason: 'invalid' });
+		expect(await stored()).toEqual([1, 2]);
 	});
 });

@@ -1,5 +1,5 @@
 import type { CellFigures, Overall, Summary, WorkloadFacts } from './figures';
-import { heldAgainst, overallAgainst } from './held-against';
+import { heldAgainst, overallAgainst, testCell } from './held-against';
 import { summarise } from './statistics/summary';
 
 export interface CampaignReading {
@@ -55,14 +55,20 @@ function byCell<T extends { profile: string; workload: string }>(items: readonly
 /**
  * The readings of one cell that count: not excluded, of runs not voided. `Summary.flagged` indexes this list.
  */
-export const countedReadings = <R extends CampaignReading>(runs: readonly CampaignRun<R>[]): R[] =>
-	runs.filter((run) => !run.voided).flatMap((run) => run.readings.filter((reading) => !reading.excluded));
+export function countedReadings<R extends CampaignReading>(runs: readonly CampaignRun<R>[]): R[] {
+	const counted: R[] = [];
+	for (const run of runs) {
+		if (run.voided) continue;
+		for (const reading of run.readings) if (!reading.excluded) counted.push(reading);
+	}
+	return counted;
+}
 
 /** What the runs that count say beside their numbers: who, when, how warm. */
 function circumstances(
 	runs: readonly CampaignRun[]
 ): Pick<CellFigures, 'testers' | 'from' | 'to' | 'ambientC'> {
-	const counted = runs.filter((run) => countedReadings([run]).length > 0);
+	const counted = runs.filter((run) => !run.voided && run.readings.some((reading) => !reading.excluded));
 	const starts = counted.map((run) => run.startedAt).sort();
 	const ambients = counted.flatMap((run) => (run.ambientC === null ? [] : [run.ambientC]));
 	return {
@@ -73,12 +79,21 @@ function circumstances(
 	};
 }
 
+/** How figures are worked out: a server that figures the same readings again and again may remember them. */
+export interface Figuring {
+	summarise: typeof summarise;
+	testCell: typeof testCell;
+}
+
 /**
- * Every figure of a campaign: each cell's summary, its ratio to the baseline (or difference, where a ratio says
- * nothing) with interval and verdict, and each profile's geometric mean.
+ * The cells of a campaign: each one's summary and its ratio to the baseline (or difference, where a ratio says nothing)
+ * with interval and verdict.
  * RangeError where the baseline is not one of the profiles.
  */
-export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
+export function summariseMatrix(
+	matrix: CampaignMatrix,
+	by: Figuring = { summarise, testCell }
+): CellFigures[] {
 	if (!matrix.profiles.includes(matrix.baseline)) {
 		throw new RangeError('The baseline must be one of the profiles of the campaign.');
 	}
@@ -87,7 +102,7 @@ export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
 	const summaryOf = (profile: string, workload: CampaignMatrix['workloads'][number]): Summary | null => {
 		const readings = countedReadings(runs.get(cellKey({ profile, workload: workload.slug })) ?? []);
 		const values = readings.map((reading) => reading.value);
-		return values.length > 0 ? summarise(values, workload.headline) : null;
+		return values.length > 0 ? by.summarise(values, workload.headline) : null;
 	};
 	const measured = matrix.profiles.flatMap((profile) =>
 		matrix.workloads.map((workload) => ({
@@ -97,19 +112,35 @@ export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
 			summary: summaryOf(profile, workload)
 		}))
 	);
-	const standings = heldAgainst(measured, matrix.workloads, matrix.baseline);
-	const cells = measured.map((cell, at): CellFigures => {
-		const signature = signatures.get(cellKey(cell))?.at(-1);
+	const standings = heldAgainst(measured, matrix.workloads, matrix.baseline, by.testCell);
+	return measured.map((cell, at): CellFigures => {
+		const key = cellKey(cell);
+		const signature = signatures.get(key)?.at(-1);
+		const { testers, from, to, ambientC } = circumstances(runs.get(key) ?? []);
+		// Field by field: spread together, the objects of a large board take longer than its figures.
 		return {
-			...cell,
+			profile: cell.profile,
+			workload: cell.workload,
+			needed: cell.needed,
+			summary: cell.summary,
 			comparison: standings[at]?.comparison ?? null,
 			difference: standings[at]?.difference ?? null,
 			signedBy: signature?.signedBy ?? null,
 			signedAt: signature?.signedAt ?? null,
-			...circumstances(runs.get(cellKey(cell)) ?? [])
+			testers,
+			from,
+			to,
+			ambientC
 		};
 	});
+}
 
+/**
+ * Every figure of a campaign: its cells, as summariseMatrix has them, and each profile's geometric mean.
+ * RangeError where the baseline is not one of the profiles.
+ */
+export function summariseCampaign(matrix: CampaignMatrix): CampaignFigures {
+	const cells = summariseMatrix(matrix);
 	const figures: Record<string, Overall> = {};
 	for (const profile of matrix.profiles) {
 		const figure =

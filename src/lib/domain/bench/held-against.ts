@@ -21,7 +21,7 @@ export interface Standing {
 	difference: Difference | null;
 }
 
-type Tested = Standing & Question;
+export type Tested = Standing & Question;
 
 /** The error of a set's median, where the workload prints the median and the error was taken. */
 const medianError = ({ medianLogError }: Summary, { headline }: HeldWorkload) =>
@@ -42,8 +42,8 @@ function ratioOf(subject: Summary, baseline: Summary, workload: HeldWorkload): T
 
 const nothing: Tested = { comparison: null, difference: null, p: null, forBetter: false };
 
-function test(subject: Summary | null, baseline: Summary | null, workload: HeldWorkload): Tested {
-	if (!subject || !baseline) return nothing;
+/** One cell against its baseline, alone: a ratio or a difference, with the p value that Holm's correction takes. */
+export function testCell(subject: Summary, baseline: Summary, workload: HeldWorkload): Tested {
 	const { by, why } = comparable(workload.unit, [subject.mean, baseline.mean]);
 	if (by === 'ratio') {
 		const { comparison, p } = ratioOf(subject, baseline, workload);
@@ -68,11 +68,13 @@ function test(subject: Summary | null, baseline: Summary | null, workload: HeldW
  * Every cell of a table against the baseline's cell of the same workload, in the order given: by the average that the
  * workload prints, as a ratio or, where that says nothing, as a difference; each verdict after Holm's correction over
  * the whole table. The baseline's own cells have neither.
+ * @param test may be one that remembers what it worked out
  */
 export function heldAgainst(
 	cells: readonly Cell[],
 	workloads: readonly HeldWorkload[],
-	baseline: string
+	baseline: string,
+	test = testCell
 ): Standing[] {
 	const rules = new Map(workloads.map((workload) => [workload.slug, workload]));
 	const baselines = new Map(
@@ -80,7 +82,8 @@ export function heldAgainst(
 	);
 	const tested = cells.map(({ profile, workload, summary }) => {
 		const rule = rules.get(workload);
-		return rule && profile !== baseline ? test(summary, baselines.get(workload) ?? null, rule) : nothing;
+		const against = baselines.get(workload);
+		return rule && summary && against && profile !== baseline ? test(summary, against, rule) : nothing;
 	});
 	const together = verdictsTogether(tested);
 	return tested.map(({ comparison, difference }, at) => {

@@ -101,7 +101,10 @@ export class LiveHub<E extends Happened> {
 			const found = await this.#setup.ids(
 				new Map([...this.#watched].map(([subject, { floor }]) => [subject, floor]))
 			);
-			const wanted = found.filter((one) => this.#listeners(one).length > 0).map((one) => one.id);
+			const watchers = [...this.#watchers];
+			const wanted = found
+				.filter((one) => watchers.some((who) => this.#isNew(who, one)))
+				.map((one) => one.id);
 			const events = wanted.length > 0 ? await this.#setup.events(wanted) : [];
 			for (const watcher of this.#watchers) this.#tell(watcher, events);
 			this.#rise(found);
@@ -110,14 +113,12 @@ export class LiveHub<E extends Happened> {
 		}
 	}
 
-	#listeners({ id, subject }: Happened): Watcher<E>[] {
-		return [...this.#watchers].filter(
-			(one) => one.subject === subject && id > one.after && !one.told.has(id)
-		);
+	#isNew(watcher: Watcher<E>, { id, subject }: Happened): boolean {
+		return watcher.subject === subject && id > watcher.after && !watcher.told.has(id);
 	}
 
 	#tell(watcher: Watcher<E>, events: E[]): void {
-		const news = events.filter((event) => this.#listeners(event).includes(watcher));
+		const news = events.filter((event) => this.#isNew(watcher, event));
 		if (news.length === 0) return;
 		for (const { id } of news) watcher.told.add(id);
 		watcher.tell(news);

@@ -1,9 +1,26 @@
-import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNull, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { campaign, cellSignature, profile, reading, run, user, workload } from '../schema';
 
-/** All runs of several campaigns, voided ones included, in the order they were recorded. */
-const runsOf = (db: Db, campaignIds: number[]) =>
+interface Cells {
+	campaignId: number;
+	cells: readonly { profileId: number; workloadId: number }[];
+}
+
+/** All runs of some campaigns, or those of some cells of one. */
+const wanted = (of: number[] | Cells) =>
+	Array.isArray(of)
+		? inArray(run.campaignId, of)
+		: and(
+				eq(run.campaignId, of.campaignId),
+				sql`(${run.profileId}, ${run.workloadId}) in (${sql.join(
+					of.cells.map((cell) => sql`(${cell.profileId}, ${cell.workloadId})`),
+					sql`, `
+				)})`
+			);
+
+/** Runs, voided ones included, in the order they were recorded. */
+const runsOf = (db: Db, of: number[] | Cells) =>
 	db
 		.select({
 			id: run.id,
@@ -28,11 +45,11 @@ const runsOf = (db: Db, campaignIds: number[]) =>
 		.innerJoin(profile, eq(profile.id, run.profileId))
 		.innerJoin(workload, eq(workload.id, run.workloadId))
 		.innerJoin(user, eq(user.id, run.testerId))
-		.where(inArray(run.campaignId, campaignIds))
+		.where(wanted(of))
 		.orderBy(asc(run.id));
 
 /** Their readings, excluded ones included, run by run in the order they were taken. */
-const readingsOf = (db: Db, campaignIds: number[]) =>
+const readingsOf = (db: Db, of: number[] | Cells) =>
 	db
 		.select({
 			id: reading.id,
@@ -45,11 +62,11 @@ const readingsOf = (db: Db, campaignIds: number[]) =>
 		})
 		.from(run)
 		.innerJoin(reading, eq(reading.runId, run.id))
-		.where(inArray(run.campaignId, campaignIds))
+		.where(wanted(of))
 		.orderBy(asc(reading.runId), asc(reading.position));
 
-/** Their standing signatures. */
-const signaturesOf = (db: Db, campaignIds: number[]) =>
+/** Standing signatures of some campaigns. */
+export const signaturesOf = (db: Db, campaignIds: number[]) =>
 	db
 		.select({
 			campaignId: cellSignature.campaignId,
@@ -70,10 +87,25 @@ export type RunRow = Awaited<ReturnType<typeof runsOf>>[number];
 export type ReadingRow = Awaited<ReturnType<typeof readingsOf>>[number];
 export type SignatureRow = Awaited<ReturnType<typeof signaturesOf>>[number];
 
+export type RecordedRun = RunRow & { readings: ReadingRow[] };
+
 export interface CampaignReadings {
 	/** In the order they were recorded, voided ones included. */
-	runs: (RunRow & { readings: ReadingRow[] })[];
+	runs: RecordedRun[];
 	signatures: SignatureRow[];
+}
+
+function joined(runs: RunRow[], readings: ReadingRow[]): RecordedRun[] {
+	const ofRun = new Map<number, ReadingRow[]>(runs.map((row) => [row.id, []]));
+	for (const row of readings) ofRun.get(row.runId)?.push(row);
+	return runs.map((row) => ({ ...row, readings: ofRun.get(row.id) ?? [] }));
+}
+
+/** The runs of some cells of a campaign, with their readings: two queries however many. */
+export async function runsOfCells(db: Db, of: Cells): Promise<RecordedRun[]> {
+	if (of.cells.length === 0) return [];
+	const [runs, readings] = await Promise.all([runsOf(db, of), readingsOf(db, of)]);
+	return joined(runs, readings);
 }
 
 /** Every run with its readings, and every standing signature, of several campaigns: three queries however many. */
@@ -87,11 +119,7 @@ export async function forCampaigns(db: Db, campaignIds: number[]): Promise<Map<n
 		readingsOf(db, campaignIds),
 		signaturesOf(db, campaignIds)
 	]);
-	const ofRun = new Map<number, ReadingRow[]>(runs.map((row) => [row.id, []]));
-	for (const row of readings) ofRun.get(row.runId)?.push(row);
-	for (const row of runs) {
-		found.get(row.campaignId)?.runs.push({ ...row, readings: ofRun.get(row.id) ?? [] });
-	}
+	for (const row of joined(runs, readings)) found.get(row.campaignId)?.runs.push(row);
 	for (const row of signatures) found.get(row.campaignId)?.signatures.push(row);
 	return found;
 }

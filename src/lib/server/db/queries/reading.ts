@@ -10,9 +10,12 @@ export async function insertMany(db: Db, rows: (typeof reading.$inferInsert)[]):
 	}
 }
 
-/** The readings of a run in the order they were taken, as they stand now, locked until the transaction ends. */
-export const lockOfRun = (db: Db, runId: number) =>
-	db.select().from(reading).where(eq(reading.runId, runId)).orderBy(asc(reading.position)).for('update');
+/**
+ * The readings of a run in the order they were taken. The lock of its cell keeps others from it: a lock of their own
+ * would reach beyond the newest run and hold up whoever begins the next one.
+ */
+export const ofRun = (db: Db, runId: number) =>
+	db.select().from(reading).where(eq(reading.runId, runId)).orderBy(asc(reading.position));
 
 /** Which run a reading is in, without a lock; its cell is locked first. */
 export const runOf = async (db: Db, id: number) =>
@@ -28,7 +31,10 @@ export const setExclusion = (
 	change: { excludedAt: Date | null; excludedBy: string | null; excludeReason: string | null }
 ) => db.update(reading).set(change).where(eq(reading.id, id));
 
-/** The readings of one cell that count, in the order they were recorded: as they stand now, whatever was read before. */
+/**
+ * The readings of one cell that count, in the order they were recorded, for a transaction that locked the cell before
+ * it read anything: its view begins after everybody else's writing in the cell.
+ */
 export const countedOfCell = (db: Db, cell: { campaignId: number; profileId: number; workloadId: number }) =>
 	db
 		.select({ id: reading.id, value: reading.value, runId: reading.runId, createdAt: reading.createdAt })
@@ -42,8 +48,13 @@ export const countedOfCell = (db: Db, cell: { campaignId: number; profileId: num
 				isNull(run.voidedAt)
 			)
 		)
-		.orderBy(asc(run.id), asc(reading.position))
-		.for('update');
+		.orderBy(asc(run.id), asc(reading.position));
+
+/** As countedOfCell, as they stand now, whatever the transaction read before it locked the cell. */
+export const countedOfCellNow = (
+	db: Db,
+	cell: { campaignId: number; profileId: number; workloadId: number }
+) => countedOfCell(db, cell).for('update');
 
 /** How many readings of each cell of a campaign count. */
 export const countsOfCells = (db: Db, campaignId: number) =>

@@ -53,14 +53,13 @@ export const cellOf = async (db: Db, id: number) =>
 			.limit(1)
 	)[0];
 
-/** The run that a tester's client made under a key, locked. */
-export const lockByKey = async (db: Db, testerId: string, clientKey: string) =>
+/** The run that a tester's client made under a key. Not locked: a key not used yet has no row, only a gap that others need. */
+export const byKey = async (db: Db, testerId: string, clientKey: string) =>
 	(
 		await db
 			.select()
 			.from(run)
 			.where(and(eq(run.testerId, testerId), eq(run.clientKey, clientKey)))
-			.for('update')
 	)[0];
 
 /** Runs of a campaign whose key begins so, with who made them: those of one imported file. */

@@ -1,18 +1,17 @@
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
-import type { CampaignPlan } from '../../db/queries/campaign-facts';
 import * as plans from '../../db/queries/campaign-plan';
-import { cellName, type FoundCell } from './find-cell';
+import { cellName } from './find-cell';
 import type { NamedCell } from './take-signature-off';
 
 /** Locks one cell until the transaction ends; refused when it left the plan in the meantime. */
 export async function lockCell(
 	ctx: Context,
-	plan: CampaignPlan,
-	cell: FoundCell
+	campaignId: number,
+	cell: { profile: { id: number; slug: string }; workload: { id: number; slug: string } }
 ): Promise<Outcome<NamedCell, 'conflict'>> {
 	const named = {
-		campaignId: plan.head.id,
+		campaignId,
 		profileId: cell.profile.id,
 		workloadId: cell.workload.id,
 		name: cellName(cell)

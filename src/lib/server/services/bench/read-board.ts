@@ -1,49 +1,19 @@
-import { campaignState, type CampaignState } from '../../../domain/bench/campaign-state';
 import { countedReadings } from '../../../domain/bench/campaign';
-import type { InstrumentFacts } from '../../../domain/bench/cell-uncertainty';
+import type { BoardNews } from '../../../domain/bench/board-news';
 import type { CellRun } from '../../../domain/bench/cell-runs';
-import type { CellOff } from '../../../domain/bench/drift-facts';
-import type { CellFigures, WorkloadFacts } from '../../../domain/bench/figures';
-import { currentProfile, progress, toRun, type Progress, type ToRun } from '../../../domain/bench/progress';
+import { toRun, type ToRun } from '../../../domain/bench/progress';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as campaigns from '../../db/queries/campaign';
-import * as articles from '../../db/queries/campaign-articles';
-import type { CampaignHead } from '../../db/queries/campaign-facts';
-import * as live from '../../db/queries/live';
-import * as settings from '../../db/queries/settings';
-import { readCampaign, type MeasuredCampaign } from './read-campaign';
-import { sharedReads } from './share-read';
-import { campaignOff } from './rig-off';
+import type { CampaignPlan } from '../../db/queries/campaign-facts';
+import { earlierBoard, readBoardOnce, type Board, type BoardRead } from './board-once';
+import { changedSince } from './board-snapshot';
 
-export interface Board {
-	head: CampaignHead;
-	state: CampaignState;
-	articles: { slug: string; title: string }[];
-	/** Cells measured while the rig was off, by its own stock. */
-	off: CellOff[];
-	profiles: { slug: string; name: string }[];
-	workloads: (WorkloadFacts & { needed: number; instrument: InstrumentFacts | null })[];
-	baseline: string;
-	cells: CellFigures[];
-	progress: Progress;
-	signed: number;
-	/** Profile of the latest run: what the rig is in; null before the first. */
-	current: string | null;
-	/** Newest entry of the history that is surely in these figures: what comes after it is told live. */
-	newest: number;
-	selected: { profile: string; workload: string; runs: CellRun[]; baselineValues: number[] | null };
-	zone: string;
-	may: { plan: boolean; record: boolean; sign: boolean };
-}
+export type { Board } from './board-once';
 
 /** The cell the address names; else the next to run, else the first. */
-function select(
-	{ plan }: MeasuredCampaign,
-	wanted: { profile: string; workload: string },
-	next: ToRun | undefined
-) {
+function select(plan: CampaignPlan, wanted: { profile: string; workload: string }, next: ToRun | undefined) {
 	const slugOf = (rows: { slug: string }[], ...refs: (string | undefined)[]) =>
 		refs.find((ref) => rows.some((row) => row.slug === ref)) ?? rows[0]?.slug ?? '';
 	const named = wanted.profile !== '' || wanted.workload !== '';
@@ -53,7 +23,7 @@ function select(
 	};
 }
 
-function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workload: string }): CellRun[] {
+function runsOf({ recorded }: BoardRead['measured'], cell: { profile: string; workload: string }): CellRun[] {
 	return recorded.runs
 		.filter((run) => run.profile === cell.profile && run.workload === cell.workload)
 		.map((run) => ({
@@ -73,55 +43,37 @@ function runsOf({ recorded }: MeasuredCampaign, cell: { profile: string; workloa
 		}));
 }
 
-function boardOf(
-	measured: MeasuredCampaign,
+/** The cell somebody looks at, whole. */
+function selectedOf(
+	{ measured, cells, current }: BoardRead,
 	wanted: { profile: string; workload: string }
-): Omit<Board, 'articles' | 'off' | 'zone' | 'may' | 'newest'> {
-	const { plan, matrix, figures, recorded } = measured;
-	const current = currentProfile(matrix.runs);
-	const [next] = toRun(figures.cells, current);
-	const cell = select(measured, wanted, next);
-	const signed = figures.cells.filter((one) => one.signedAt !== null).length;
+): Board['selected'] {
+	const { matrix } = measured;
+	const [next] = toRun(cells, current);
+	const cell = select(measured.plan, wanted, next);
+	const stock = matrix.runs.filter(
+		(run) => run.profile === matrix.baseline && run.workload === cell.workload
+	);
 	return {
-		head: plan.head,
-		state: campaignState({
-			archived: plan.head.archivedAt !== null,
-			runs: recorded.runs.filter((run) => run.voidedAt === null).length,
-			cells: figures.cells.length,
-			signed
-		}),
-		profiles: plan.profiles.map(({ slug, name }) => ({ slug, name })),
-		workloads: plan.workloads,
-		baseline: matrix.baseline,
-		cells: figures.cells,
-		progress: progress(figures.cells),
-		signed,
-		current,
-		selected: {
-			...cell,
-			runs: runsOf(measured, cell),
-			baselineValues:
-				cell.profile === matrix.baseline
-					? null
-					: countedReadings(
-							matrix.runs.filter((run) => run.profile === matrix.baseline && run.workload === cell.workload)
-						).map((reading) => reading.value)
-		}
+		...cell,
+		runs: runsOf(measured, cell),
+		baselineValues:
+			cell.profile === matrix.baseline ? null : countedReadings(stock).map((reading) => reading.value)
 	};
 }
 
-interface ReadOnce {
-	newest: number;
-	measured: Outcome<MeasuredCampaign>;
-}
+const mayOf = ({ actor }: Context): Board['may'] => ({
+	plan: may(actor, 'bench.plan'),
+	record: may(actor, 'run.record'),
+	sign: may(actor, 'cell.sign')
+});
 
-// What is read is the same for everybody who may read it; one for each database, as tests have several.
-const shares = new WeakMap<Context['db'], ReturnType<typeof sharedReads<ReadOnce>>>();
-
-function share({ db }: Context) {
-	const found = shares.get(db) ?? sharedReads<ReadOnce>();
-	shares.set(db, found);
-	return found;
+async function read(ctx: Context, campaignRef: string, gatherMs = 0): Promise<Outcome<BoardRead>> {
+	if (!may(ctx.actor, 'bench.read')) return refuse('forbidden', 'Your roles do not include the bench.');
+	const id = await campaigns.idOf(ctx.db, campaignRef);
+	return id === undefined
+		? refuse('not_found', 'There is no such campaign.')
+		: readBoardOnce(ctx, id, gatherMs);
 }
 
 /** The campaign's board: the matrix, how far it is, what to run next, and the selected cell whole. */
@@ -130,30 +82,42 @@ export async function readBoard(
 	campaignRef: string,
 	wanted: { profile: string; workload: string }
 ): Promise<Outcome<Board>> {
-	if (!may(ctx.actor, 'bench.read')) return refuse('forbidden', 'Your roles do not include the bench.');
-	const id = await campaigns.idOf(ctx.db, campaignRef);
-	if (id === undefined) return refuse('not_found', 'There is no such campaign.');
-	const { newest, measured } = await share(ctx)(id, async () => ({
-		// Before the figures, so that what comes in between is told once more rather than never.
-		newest: await live.newestOf(ctx.db, id),
-		measured: await readCampaign(ctx, String(id))
-	}));
-	if (!measured.ok) return measured;
-	const [bound, off, { zone }] = await Promise.all([
-		articles.ofCampaign(ctx.db, measured.value.plan.head.id),
-		campaignOff(ctx, measured.value),
-		settings.publication(ctx.db)
-	]);
+	const found = await read(ctx, campaignRef);
+	if (!found.ok) return found;
+	const { measured: _measured, snapshot, ...board } = found.value;
 	return done({
-		...boardOf(measured.value, wanted),
-		off,
-		articles: bound.map(({ slug, title }) => ({ slug, title })),
-		zone,
+		...board,
+		tag: snapshot.tag,
+		selected: selectedOf(found.value, wanted),
+		may: mayOf(ctx)
+	});
+}
+
+/** All who watch a board are told in the same moment, and then ask: so long they are waited for. */
+const gatherMs = 50;
+
+/** What changed on a board since the one that somebody has, so that ten who watch are not sent ten boards. */
+export async function readBoardNews(
+	ctx: Context,
+	campaignRef: string,
+	{ tag, ...wanted }: { tag: string; profile: string; workload: string }
+): Promise<Outcome<BoardNews>> {
+	const found = await read(ctx, campaignRef, gatherMs);
+	if (!found.ok) return found;
+	const { snapshot, state, progress, signed, current, newest } = found.value;
+	const changed = changedSince(earlierBoard(ctx, found.value, tag), snapshot, found.value);
+	if (!changed) return done({ kind: 'anew' });
+	return done({
+		kind: 'changed',
+		from: tag,
+		tag: snapshot.tag,
+		...changed,
+		state,
+		progress,
+		signed,
+		current,
 		newest,
-		may: {
-			plan: may(ctx.actor, 'bench.plan'),
-			record: may(ctx.actor, 'run.record'),
-			sign: may(ctx.actor, 'cell.sign')
-		}
+		selected: selectedOf(found.value, wanted),
+		may: mayOf(ctx)
 	});
 }

@@ -3,13 +3,12 @@ import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { readingsPerRun, type GridInput } from '../../../schemas/run';
 import type { Context } from '../../context';
-import { inTransaction } from '../../db/client';
+import { inTransaction, isDuplicate } from '../../db/client';
 import * as audit from '../../db/queries/audit';
 import * as readings from '../../db/queries/reading';
 import * as runs from '../../db/queries/run';
 import * as settings from '../../db/queries/settings';
-import { findOpenCampaign } from './find-campaign';
-import { findCell } from './find-cell';
+import { findOpenCell } from './find-open-cell';
 import { holdOver } from './hold-over';
 import { lockCell } from './lock-cell';
 import { readStarted } from './read-started';
@@ -24,7 +23,7 @@ export interface GridAnswer {
 	signatureRemoved: boolean;
 }
 
-type SittingRun = NonNullable<Awaited<ReturnType<typeof runs.lockByKey>>>;
+type SittingRun = NonNullable<Awaited<ReturnType<typeof runs.byKey>>>;
 
 const theirs =
 	'This sitting belongs to another cell or another campaign. Nothing was stored; load the page again and enter the readings there.';
@@ -56,19 +55,36 @@ async function amend(ctx: Context, cell: NamedCell, run: SittingRun, input: Grid
 	]);
 }
 
+/** The sitting's own run; null where the same sitting was begun in another cell in this very moment. */
+async function beginRun(ctx: Context, cell: NamedCell, input: GridInput): Promise<number | null> {
+	try {
+		return await storeRun(ctx, {
+			cell,
+			source: 'grid',
+			clientKey: input.runKey,
+			startedAt: input.startedAt ?? ctx.now,
+			ambientC: input.ambientC,
+			notes: input.notes
+		});
+	} catch (error) {
+		if (isDuplicate(error)) return null;
+		throw error;
+	}
+}
+
 async function record(
 	ctx: Context,
 	cell: NamedCell,
 	needed: number,
 	input: GridInput
 ): Promise<Outcome<GridAnswer>> {
-	const existing = await runs.lockByKey(ctx.db, ctx.actor.id, input.runKey);
+	const existing = await runs.byKey(ctx.db, ctx.actor.id, input.runKey);
 	if (existing && !isOf(existing, cell)) return refuse('invalid', theirs);
 	if (existing?.voidedAt) return refuse('conflict', voided);
 	if (!existing && input.readings.length === 0)
 		return done({ run: null, stored: [], signatureRemoved: false });
 
-	const before = existing ? await readings.lockOfRun(ctx.db, existing.id) : [];
+	const before = existing ? await readings.ofRun(ctx.db, existing.id) : [];
 	const known = new Set(before.map((row) => row.clientKey));
 	const fresh = input.readings.filter((row) => !known.has(row.key));
 	if (before.length + fresh.length > readingsPerRun)
@@ -84,19 +100,11 @@ async function record(
 	});
 	if (held) return held;
 	if (existing) await amend(ctx, cell, existing, input);
-	const run =
-		existing?.id ??
-		(await storeRun(ctx, {
-			cell,
-			source: 'grid',
-			clientKey: input.runKey,
-			startedAt: input.startedAt ?? ctx.now,
-			ambientC: input.ambientC,
-			notes: input.notes
-		}));
+	const run = existing?.id ?? (await beginRun(ctx, cell, input));
+	if (run === null) return refuse('invalid', theirs);
 	const signatureRemoved = await storeReadings(ctx, cell, run, fresh, before.length + 1);
 	const sent = new Set(input.readings.map((row) => row.key));
-	const after = await readings.lockOfRun(ctx.db, run);
+	const after = await readings.ofRun(ctx.db, run);
 	return done({
 		run,
 		stored: after.flatMap(({ id, clientKey }) =>
@@ -109,7 +117,8 @@ async function record(
 /**
  * Takes readings from the entry grid. The run and each reading carry the client's own keys, so that whatever is sent
  * again, after a lost answer or from a second tab, is stored once. What would go over another tester's readings that
- * the sender had not seen is held.
+ * the sender had not seen is held. Its transaction locks the cell before it reads anything: what it reads then is all
+ * that others wrote there.
  */
 export async function recordGridReadings(
 	ctx: Context,
@@ -117,21 +126,19 @@ export async function recordGridReadings(
 	input: GridInput
 ): Promise<Outcome<GridAnswer>> {
 	if (!may(ctx.actor, 'run.record')) return refuse('forbidden', 'Only a tester enters readings.');
-	const found = await findOpenCampaign(ctx, campaignRef);
-	if (!found.ok) return found;
-	const at = findCell(found.value, input);
+	const at = await findOpenCell(ctx, campaignRef, input);
 	if (!at.ok) return at;
 	const fault = unitFault(input.unit, at.value.workload);
 	if (fault) return refuse('invalid', `${fault} Nothing was stored.`, { fields: { unit: [fault] } });
 	if (new Set(input.readings.map((row) => row.key)).size < input.readings.length)
 		return refuse('invalid', 'Two readings carry the same key. Nothing was stored.');
-	const { zone } = await settings.publication(ctx.db);
+	const zone = input.started === '' ? 'UTC' : (await settings.publication(ctx.db)).zone;
 	const started = readStarted(input.started, zone);
 	if (!started.ok) return started;
 	const whole = { ...input, startedAt: started.value ?? input.startedAt };
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
-		const cell = await lockCell(tx, found.value, at.value);
+		const cell = await lockCell(tx, at.value.campaignId, at.value);
 		return cell.ok ? record(tx, cell.value, at.value.workload.needed, whole) : cell;
 	});
 }

@@ -46,7 +46,7 @@ export async function recordRun(
 	const warnings = await doubtReadings(ctx, plan, at.value, input.readings);
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
-		const locked = await lockCell(tx, plan, at.value);
+		const locked = await lockCell(tx, plan.head.id, at.value);
 		if (!locked.ok) return locked;
 		const cell = locked.value;
 		const id = await storeRun(tx, {
@@ -59,8 +59,8 @@ export async function recordRun(
 		});
 		const fresh = input.readings.map((value) => ({ value, key: null }));
 		const signatureRemoved = await storeReadings(tx, cell, id, fresh, 1);
-		const stored = await readings.lockOfRun(db, id);
-		const counted = await readings.countedOfCell(db, cell);
+		const stored = await readings.ofRun(db, id);
+		const counted = await readings.countedOfCellNow(db, cell);
 		return done({
 			id,
 			campaign: plan.head.slug,

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { sharedReads } from './share-read';
 
 /** Readings that end when they are told to. */
@@ -29,6 +29,28 @@ describe('a shared reading', () => {
 		const anew = share(1, read);
 		ends[2]?.();
 		expect(await anew).toBe(3);
+	});
+
+	it('waits for those who come in a burst, and begins at once for one who does not wait', async () => {
+		vi.useFakeTimers();
+		try {
+			const share = sharedReads<number>();
+			let begun = 0;
+			const read = () => Promise.resolve(++begun);
+			const burst = [share(1, read, 50), share(1, read, 50)];
+			await vi.advanceTimersByTimeAsync(49);
+			burst.push(share(1, read, 50));
+			expect(begun).toBe(0);
+			await vi.advanceTimersByTimeAsync(1);
+			expect(await Promise.all(burst)).toEqual([1, 1, 1]);
+			const patient = share(1, read, 50);
+			expect(await share(1, read)).toBe(2);
+			expect(await patient).toBe(2);
+			await vi.advanceTimersByTimeAsync(100);
+			expect(begun).toBe(2);
+		} finally {
+			vi.useRealTimers();
+		}
 	});
 
 	it('keeps what is not the same apart, and goes on after a failure', async () => {

@@ -1,28 +1,60 @@
-interface Reads<T> {
-	running: Promise<T>;
-	/** Begins when the running one has ended, for all who came meanwhile. */
-	next: Promise<T> | null;
+interface Waiting<T> {
+	promise: Promise<T>;
+	resolve: (value: T) => void;
+	reject: (reason: unknown) => void;
+	read: () => Promise<T>;
+}
+
+interface Line<T> {
+	running: boolean;
+	timer: NodeJS.Timeout | undefined;
+	/** What those get who came since the running one began; not begun yet. */
+	next: Waiting<T> | null;
+}
+
+function waitingFor<T>(read: () => Promise<T>): Waiting<T> {
+	let settle: Pick<Waiting<T>, 'resolve' | 'reject'> | undefined;
+	const promise = new Promise<T>((resolve, reject) => (settle = { resolve, reject }));
+	return {
+		promise,
+		read,
+		resolve: (value) => settle?.resolve(value),
+		reject: (reason) => settle?.reject(reason)
+	};
 }
 
 /**
- * Lets those who read the same at once share a reading: who comes while one runs gets the next, so that nobody is given
- * what was read before they asked. A board that ten people watch is then worked out once for each change, not ten times.
+ * Lets those who read the same at about the same time share a reading, one after another: who comes while one runs gets
+ * the next, so that nobody is given what was read before they asked. A board that ten people watch is then worked out
+ * once for each change, not ten times.
  */
 export function sharedReads<T>() {
-	const reads = new Map<number, Reads<T>>();
-	return (key: number, read: () => Promise<T>): Promise<T> => {
-		const begin = (): Promise<T> => {
-			const running = read();
-			const own: Reads<T> = { running, next: null };
-			reads.set(key, own);
-			const end = () => {
-				if (own.next === null && reads.get(key) === own) reads.delete(key);
-			};
-			running.then(end, end);
-			return running;
+	const lines = new Map<number, Line<T>>();
+
+	function begin(key: number, line: Line<T>): void {
+		clearTimeout(line.timer);
+		line.timer = undefined;
+		const { next } = line;
+		if (line.running || !next) return;
+		line.next = null;
+		line.running = true;
+		const end = () => {
+			line.running = false;
+			if (line.next) begin(key, line);
+			else lines.delete(key);
 		};
-		const now = reads.get(key);
-		if (!now) return begin();
-		return (now.next ??= now.running.then(begin, begin));
+		next.read().then(next.resolve, next.reject).finally(end);
+	}
+
+	/**
+	 * @param gatherMs how long to wait for others before a reading begins; without it one that waits begins at once
+	 */
+	return (key: number, read: () => Promise<T>, gatherMs = 0): Promise<T> => {
+		const line = lines.get(key) ?? { running: false, timer: undefined, next: null };
+		lines.set(key, line);
+		const { promise } = (line.next ??= waitingFor(read));
+		if (gatherMs === 0) begin(key, line);
+		else if (!line.running) line.timer ??= setTimeout(() => begin(key, line), gatherMs);
+		return promise;
 	};
 }

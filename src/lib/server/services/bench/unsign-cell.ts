@@ -21,7 +21,7 @@ export async function unsignCell(
 	if (!at.ok) return at;
 	return inTransaction(ctx.db, async (db) => {
 		const tx = { ...ctx, db };
-		const cell = await lockCell(tx, found.value, at.value);
+		const cell = await lockCell(tx, found.value.head.id, at.value);
 		if (!cell.ok) return cell;
 		const removed = await takeSignatureOff(tx, cell.value, input.reason);
 		return removed ? done(null) : refuse('conflict', 'This cell bears no signature. Nothing was changed.');

@@ -1,5 +1,6 @@
 import { goto, preloadData } from '$app/navigation';
 import { navigating } from '$app/state';
+import { withNews, type WiredNews } from '$lib/domain/bench/board-news';
 import type { PageData } from './$types';
 
 interface Cell {
@@ -12,6 +13,8 @@ interface Setup {
 	given: () => PageData;
 	/** Address of the page with a cell opened. */
 	href: (cell: Cell) => string;
+	/** What changed on the board of that tag, for somebody who looks at that cell; null where it is not to be had. */
+	news: (tag: string, cell: Cell) => Promise<WiredNews | null>;
 	/** Ids of readings that are stored; the board counts them once it was read after they were. */
 	storedIds: () => number[];
 	onread: (ids: number[]) => void;
@@ -88,8 +91,27 @@ export class BoardReader {
 		}
 	}
 
+	/** The page's own board with what changed on it; null where it must be read whole. */
+	async #news(): Promise<PageData | null> {
+		const began = performance.now();
+		const { data } = this;
+		const news = await this.#setup.news(data.board.tag, this.at);
+		const board = news && withNews(data.board, news);
+		if (board) this.#tookMs = performance.now() - began;
+		return board && { ...data, board };
+	}
+
 	async #read(): Promise<void> {
 		const ids = this.#setup.storedIds();
+		const given = this.#setup.given();
+		const changed = await this.#news();
+		if (changed) {
+			// Gone elsewhere meanwhile: the page there was read after this.
+			if (this.#setup.given() !== given) return;
+			this.#fresh = { over: given, data: changed };
+			this.#setup.onread(ids);
+			return;
+		}
 		// An address of its own each time: the framework keeps what it loaded for one.
 		const address = `${this.#setup.href(this.at)}&read=${++this.#count}`;
 		const data = await this.#load(address);

@@ -1,4 +1,4 @@
-import { and, asc, count, eq, isNull, ne, sql } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNull, ne, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { firmwareMeaning, profile, profileSetting, rig, user } from '../schema';
 
@@ -19,6 +19,21 @@ export const list = (db: Db, family = '') =>
 		.innerJoin(user, eq(user.id, firmwareMeaning.createdBy))
 		.where(family === '' ? undefined : eq(firmwareMeaning.family, family))
 		.orderBy(asc(firmwareMeaning.family), asc(firmwareMeaning.setting));
+
+/** What settings of several families set, to read profiles by. */
+export const ofFamilies = async (db: Db, names: string[]) =>
+	names.length === 0
+		? []
+		: db
+				.select({
+					family: firmwareMeaning.family,
+					setting: firmwareMeaning.setting,
+					quantity: firmwareMeaning.quantity,
+					coreGroup: firmwareMeaning.coreGroup
+				})
+				.from(firmwareMeaning)
+				.where(inArray(firmwareMeaning.family, names))
+				.orderBy(asc(firmwareMeaning.family), asc(firmwareMeaning.setting));
 
 export const byId = async (db: Db, id: number) =>
 	(await db.select().from(firmwareMeaning).where(eq(firmwareMeaning.id, id)))[0];

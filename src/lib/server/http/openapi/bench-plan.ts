@@ -64,6 +64,9 @@ const versions = { firmware: z.string(), driver: z.string(), os: z.string() };
 const rigItem = z.object({
 	...row,
 	name: z.string(),
+	firmwareFamily: z
+		.string()
+		.describe('By which the meanings of its settings are looked up; empty where it is of none.'),
 	revision: z.number(),
 	...versions,
 	samples: z.array(

@@ -79,7 +79,14 @@ export const usesOf = async (db: Db, instrumentIds: number[]) =>
 /** The instrument of each column of a campaign that has one. */
 export const ofCampaign = (db: Db, campaignId: number) =>
 	db
-		.select({ workloadId: campaignWorkload.workloadId, slug: instrument.slug, name: instrument.name })
+		.select({
+			workloadId: campaignWorkload.workloadId,
+			slug: instrument.slug,
+			name: instrument.name,
+			calibratedOn: instrument.calibratedOn,
+			calibrationDueOn: instrument.calibrationDueOn,
+			retiredAt: instrument.retiredAt
+		})
 		.from(campaignWorkload)
 		.innerJoin(instrument, eq(instrument.id, campaignWorkload.instrumentId))
 		.where(eq(campaignWorkload.campaignId, campaignId));

@@ -23,36 +23,61 @@ const profiles = z
 	.max(most, `A campaign has at most ${most} profiles.`)
 	.refine((refs) => new Set(refs).size === refs.length, 'A profile is in a campaign once.');
 
-/** One line of the choice of workloads; a line without a workload is one left unticked. */
-const chosenWorkload = z
-	.object({
-		workload: z.union([z.string(), z.int()]).transform(String).default(''),
-		/** Readings each of its cells needs; empty takes the workload's own protocol. */
-		repeats: z.union([z.string(), z.number()]).default('')
-	})
-	.superRefine((row, ctx) => {
-		if (row.workload === '' || row.repeats === '') return;
-		const message = repeats.safeParse(row.repeats).error?.issues[0]?.message;
-		if (message) ctx.addIssue({ code: 'custom', message, path: ['repeats'] });
-	});
+const lineFields = {
+	/** Slug or id; a line without one is left unticked. */
+	workload: z.union([z.string(), z.int()]).transform(String).default(''),
+	/** Readings each of its cells needs; empty takes the workload's own protocol. */
+	repeats: z.union([z.string(), z.number()]).default('')
+};
 
-/** Workloads ticked in a list, with the readings each needs; null takes the workload's own protocol. */
+interface Line {
+	workload: string;
+	repeats: string | number;
+}
+
+/** A line's repeats are looked at only where it is ticked. */
+function soundRepeats(row: Line, ctx: z.RefinementCtx): void {
+	if (row.workload === '' || row.repeats === '') return;
+	const message = repeats.safeParse(row.repeats).error?.issues[0]?.message;
+	if (message) ctx.addIssue({ code: 'custom', message, path: ['repeats'] });
+}
+
+/** The ticked ones of a list, with the readings each needs; null takes the workload's own protocol. */
+const ticked = <T extends Line>(rows: T[]): (Omit<T, 'repeats'> & { repeats: number | null })[] =>
+	rows
+		.filter((row) => row.workload !== '')
+		.map((row) => ({ ...row, repeats: row.repeats === '' ? null : repeats.parse(row.repeats) }));
+
+const tooLong = 'That is too long a list.';
+const few = (rows: readonly unknown[]) => rows.length <= most;
+const tooMany = `Choose at most ${most} workloads.`;
+const once = (rows: readonly { workload: string }[]) =>
+	new Set(rows.map((row) => row.workload)).size === rows.length;
+const twice = 'A workload is in it once.';
+
+/** Workloads ticked in a list. */
 export const chosenWorkloads = z
-	.array(chosenWorkload)
-	.max(1000, 'That is too long a list.')
-	.transform((rows) =>
-		rows
-			.filter((row) => row.workload !== '')
-			.map((row) => ({
-				workload: row.workload,
-				repeats: row.repeats === '' ? null : repeats.parse(row.repeats)
-			}))
+	.array(z.object(lineFields).superRefine(soundRepeats))
+	.max(1000, tooLong)
+	.transform(ticked)
+	.refine(few, tooMany)
+	.refine(once, twice);
+
+/** The same for a plan, each with what its figures are read from. */
+const plannedWorkloads = z
+	.array(
+		z
+			.object({
+				...lineFields,
+				/** Slug or id of the instrument; empty for the program itself. */
+				instrument: z.string().trim().max(80).default('')
+			})
+			.superRefine(soundRepeats)
 	)
-	.refine((rows) => rows.length <= most, `Choose at most ${most} workloads.`)
-	.refine(
-		(rows) => new Set(rows.map((row) => row.workload)).size === rows.length,
-		'A workload is in it once.'
-	);
+	.max(1000, tooLong)
+	.transform(ticked)
+	.refine(few, tooMany)
+	.refine(once, twice);
 
 /** A plan: one rig as it is now, profiles of it, and workloads with the readings each cell needs. */
 export const campaignInput = z.object({
@@ -60,7 +85,7 @@ export const campaignInput = z.object({
 	slug: optionalSlug,
 	rig: reference('Choose a rig.'),
 	profiles: profiles.min(1, 'Choose at least one profile.'),
-	workloads: chosenWorkloads.refine((rows) => rows.length > 0, 'Choose at least one workload.'),
+	workloads: plannedWorkloads.refine((rows) => rows.length > 0, 'Choose at least one workload.'),
 	purpose,
 	dueOn: day
 });
@@ -120,7 +145,8 @@ export interface PlanBeginning {
 	name: string;
 	purpose: string;
 	profiles: readonly string[] | null;
-	workloads: readonly { slug: string; repeats: number }[];
+	/** With the slug of the instrument that each is read from; left out or empty for none. */
+	workloads: readonly { slug: string; repeats: number; instrument?: string }[];
 }
 
 /**
@@ -139,7 +165,11 @@ export const blankCampaign = (
 	profiles: offered.map(({ slug }) => slug).filter((slug) => begin?.profiles?.includes(slug) ?? true),
 	workloads: workloads.map(({ slug, repeats: own }) => {
 		const chosen = begin?.workloads.find((one) => one.slug === slug);
-		return { workload: chosen ? slug : '', repeats: String(chosen?.repeats ?? own) };
+		return {
+			workload: chosen ? slug : '',
+			repeats: String(chosen?.repeats ?? own),
+			instrument: chosen?.instrument ?? ''
+		};
 	}),
 	purpose: begin?.purpose ?? '',
 	dueOn: ''

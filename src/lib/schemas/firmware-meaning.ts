@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { settingQuantities } from '../domain/bench/words';
 import { line, number, unchosen, versionSeen } from './fields';
+import { apiListing } from './listing';
 
 const meaningFields = {
 	/** The firmware family as the lab calls it, whatever the version. */
@@ -37,3 +38,8 @@ export const blankMeaning = (asked: URLSearchParams = new URLSearchParams()): Me
 	quantity: settingQuantities.find((one) => one === asked.get('quantity')) ?? unchosen(),
 	coreGroup: '0'
 });
+
+export const meaningsApiQuery = apiListing.extend({
+	family: z.string().trim().max(80).optional().describe('Of one firmware family.')
+});
+export type MeaningsApiQuery = z.output<typeof meaningsApiQuery>;

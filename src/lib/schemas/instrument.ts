@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { line, number, optionalSlug, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 const day = z
 	.string('Write a date such as 2026-11-20.')
@@ -99,3 +99,8 @@ export const instrumentsQuery = listing(['name', 'due', 'newest']).extend({
 	state: z.enum(['open', 'retired', 'all']).default('open')
 });
 export type InstrumentsQuery = z.output<typeof instrumentsQuery>;
+
+export const instrumentsApiQuery = apiListing.extend({
+	state: z.enum(['open', 'retired', 'all']).default('all')
+});
+export type InstrumentsApiQuery = z.output<typeof instrumentsApiQuery>;

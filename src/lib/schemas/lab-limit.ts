@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { settingQuantities } from '../domain/bench/words';
 import { partKinds } from '../domain/stores/words';
 import { line, number, unchosen, versionSeen } from './fields';
+import { apiListing } from './listing';
 
 const limitFields = {
 	quantity: z
@@ -33,3 +34,9 @@ export const blankLabLimit = (): LabLimitTyped => ({
 	unit: '',
 	source: ''
 });
+
+export const limitsApiQuery = apiListing.extend({
+	quantity: z.enum(settingQuantities).optional(),
+	partKind: z.enum(partKinds).optional()
+});
+export type LimitsApiQuery = z.output<typeof limitsApiQuery>;

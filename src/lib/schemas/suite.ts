@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { chosenWorkloads } from './campaign';
 import { line, optionalSlug, paragraphs, versionSeen } from './fields';
-import { listing } from './listing';
+import { apiListing, listing } from './listing';
 
 const suiteFields = {
 	name: line(160).min(1, 'A suite needs a name.'),
@@ -25,6 +25,11 @@ export const suitesQuery = listing(['name', 'newest']).extend({
 	state: z.enum(['open', 'archived', 'all']).default('open')
 });
 export type SuitesQuery = z.output<typeof suitesQuery>;
+
+export const suitesApiQuery = apiListing.extend({
+	state: z.enum(['open', 'archived', 'all']).default('all')
+});
+export type SuitesApiQuery = z.output<typeof suitesApiQuery>;
 
 interface Begun {
 	name: string;

@@ -6,7 +6,7 @@ import { inTransaction } from '../../../src/lib/server/db/client';
 import * as audit from '../../../src/lib/server/db/queries/audit';
 import { sweep } from '../../../src/lib/server/db/queries/idempotency';
 import { auditEvent, idempotencyKey } from '../../../src/lib/server/db/schema';
-import { answer, idempotent } from '../../../src/lib/server/http/api';
+import { answer, created, idempotent } from '../../../src/lib/server/http/api';
 import { contextFor } from '../../support/context';
 import { emptyTables, testDatabase, type TestDatabase } from '../../support/database';
 import { fakeEvent } from '../../support/event';
@@ -64,6 +64,21 @@ describe('Idempotency-Key', () => {
 		expect(first.headers.get('idempotency-replayed')).toBeNull();
 		expect(again.headers.get('idempotency-replayed')).toBe('true');
 		expect(await rows()).toBe(1);
+	});
+
+	it('says again where what was made is read, and nothing where the first answer said nothing', async () => {
+		// RFC 9110, section 15.3.2: a 201 names what was created by its Location.
+		const work = async (ctx: Context) => {
+			await create(ctx);
+			return created(done({ slug: 'first' }), (row) => `/api/v1/things/${row.slug}`);
+		};
+		const first = await send({ key: 'a', work });
+		const again = await send({ key: 'a', work });
+		expect([first.status, again.status]).toEqual([201, 201]);
+		expect(first.headers.get('location')).toBe('/api/v1/things/first');
+		expect(again.headers.get('location')).toBe('/api/v1/things/first');
+		await send({ key: 'b' });
+		expect((await send({ key: 'b' })).headers.has('location')).toBe(false);
 	});
 
 	it('left out, each request has its effect', async () => {

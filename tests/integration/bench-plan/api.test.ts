@@ -40,7 +40,7 @@ const get = (handler: Handler, path: string, params: Record<string, string> = {}
 async function bench() {
 	await post(postPart, { ...aldermoor, specification: [{ name: 'Cores', value: '16' }] });
 	await post(postSample, { part: 'aldermoor-1650', slug: 'n-101', provenance: 'bought' });
-	await post(postRig, { name: 'N-12', samples: ['n-101'], firmware: '2.14' });
+	await post(postRig, { name: 'N-12', samples: ['n-101'], firmware: '2.14', firmwareFamily: 'Hollin' });
 }
 
 describe('parts', () => {
@@ -67,6 +67,8 @@ describe('parts', () => {
 		const again = await post(postPart, aldermoor, { headers });
 		expect(again.body).toEqual(first.body);
 		expect(again.response.headers.get('idempotency-replayed')).toBe('true');
+		expect(first.response.headers.get('location')).toBe('/api/v1/parts/aldermoor-1650');
+		expect(again.response.headers.get('location')).toBe('/api/v1/parts/aldermoor-1650');
 		const list = await get(listParts, '/api/v1/parts');
 		expect(list.body.items).toHaveLength(1);
 	});
@@ -127,11 +129,14 @@ describe('rigs and profiles', () => {
 		const rig = await get(getRig, '/api/v1/rigs/n-12', { rig: 'n-12' });
 		expect(rig.body).toMatchObject({
 			slug: 'n-12',
+			firmwareFamily: 'Hollin',
 			revision: 1,
 			samples: [{ slug: 'n-101', part: 'aldermoor-1650' }],
 			profiles: [{ slug: 'stock', parent: null }]
 		});
-		expect((await get(listRigs, '/api/v1/rigs?sample=n-101')).body.items).toHaveLength(1);
+		expect((await get(listRigs, '/api/v1/rigs?sample=n-101')).body.items).toMatchObject([
+			{ slug: 'n-12', firmwareFamily: 'Hollin' }
+		]);
 		expect((await get(listSamples, '/api/v1/samples?part=aldermoor-1650')).body.items).toMatchObject([
 			{ slug: 'n-101', rigs: ['n-12'] }
 		]);

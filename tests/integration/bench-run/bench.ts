@@ -96,6 +96,7 @@ export async function plannedCampaign(ctx: Context, name = 'First look'): Promis
 		profiles: [...new Set(rows.map((row) => row.profile))],
 		workloads: [...new Set(rows.map((row) => row.workload))].map((slug) => ({
 			workload: slug,
+			instrument: '',
 			repeats: null
 		})),
 		purpose: '',

@@ -1,14 +1,20 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Actor } from '../../../src/lib/domain/people/roles';
-import { blankCampaign } from '../../../src/lib/schemas/campaign';
+import { blankCampaign, campaignInput } from '../../../src/lib/schemas/campaign';
+import { instrumentInput } from '../../../src/lib/schemas/instrument';
 import { suiteEdit, suiteInput, suitesQuery } from '../../../src/lib/schemas/suite';
 import type { Context } from '../../../src/lib/server/context';
 import { auditEvent, run, suite } from '../../../src/lib/server/db/schema';
+import { nameInstrument } from '../../../src/lib/server/services/bench/name-instrument';
 import { offerPlan } from '../../../src/lib/server/services/bench/offer-plan';
 import { archiveCampaign } from '../../../src/lib/server/services/bench/edit-campaign';
+import { planCampaign } from '../../../src/lib/server/services/bench/plan-campaign';
+import { readPlan } from '../../../src/lib/server/services/bench/read-plan';
 import { recordRun } from '../../../src/lib/server/services/bench/record-run';
 import { runInput } from '../../../src/lib/schemas/run';
 import { archiveSuite } from '../../../src/lib/server/services/bench-plan/archive-suite';
+import { createInstrument } from '../../../src/lib/server/services/bench-plan/create-instrument';
+import { retireInstrument } from '../../../src/lib/server/services/bench-plan/edit-instrument';
 import { createSuite } from '../../../src/lib/server/services/bench-plan/create-suite';
 import { editSuite } from '../../../src/lib/server/services/bench-plan/edit-suite';
 import { listSuites } from '../../../src/lib/server/services/bench-plan/list-suites';
@@ -163,6 +169,86 @@ describe('a plan that begins with something', () => {
 			workloads: [['tile-render', '5']]
 		});
 		expect((await database.db.select().from(run)).length).toBe(before);
+	});
+
+	describe('with columns that are read from instruments', () => {
+		const meter = (name: string, calibrationDueOn: string) =>
+			must(
+				createInstrument(ctx, instrumentInput.parse({ name, quantity: 'power', unit: 'W', calibrationDueOn }))
+			);
+		/** A campaign of both workloads, each read from a meter of its own; the second meter's calibration has lapsed. */
+		async function readFromTwo() {
+			const plan = {
+				name: 'First look',
+				rig: 'n-12',
+				profiles: ['stock'],
+				workloads: [{ workload: 'tile-render' }, { workload: 'archive-pack' }]
+			};
+			const { slug } = await must(planCampaign(ctx, campaignInput.parse(plan)));
+			await meter('Wattle 3', '2027-01-12');
+			await meter('Wattle 5', '2026-11-10');
+			const name = (workload: string, instrument: string, version: number) =>
+				must(nameInstrument(ctx, slug, { workload, instrument, version }));
+			await name('tile-render', 'wattle-3', 1);
+			await name('archive-pack', 'wattle-5', 2);
+			return slug;
+		}
+		const copyOf = async (from: string) => {
+			const offer = await must(offerPlan(ctx, { rig: '', from, suite: '' }));
+			return { offer, typed: blankCampaign('n-12', offer.profiles, offer.workloads, offer.begin) };
+		};
+		const instrumentsOf = async (slug: string) =>
+			(await must(readPlan(ctx, slug))).workloads.map((row) => [row.slug, row.instrument]);
+
+		it('carries them, and says of which the calibration has lapsed', async () => {
+			const { offer, typed } = await copyOf(await readFromTwo());
+			expect(offer.begin?.instruments).toEqual([
+				{ workload: 'tile-render', slug: 'wattle-3', name: 'Wattle 3', lapsed: null },
+				{
+					workload: 'archive-pack',
+					slug: 'wattle-5',
+					name: 'Wattle 5',
+					lapsed: 'calibration overdue since 2026-11-10'
+				}
+			]);
+			const copy = await must(planCampaign(ctx, campaignInput.parse(typed)));
+			expect(copy.slug).not.toBe('first-look');
+			expect(await instrumentsOf(copy.slug)).toEqual([
+				['tile-render', 'wattle-3'],
+				['archive-pack', 'wattle-5']
+			]);
+		});
+
+		it('leaves out one that is retired, and says so', async () => {
+			const from = await readFromTwo();
+			await must(retireInstrument(ctx, 'wattle-5', { retired: 'yes', version: 1 }));
+			const { offer, typed } = await copyOf(from);
+			expect(offer.begin?.retired).toEqual([{ workload: 'Archive pack', name: 'Wattle 5' }]);
+			const copy = await must(planCampaign(ctx, campaignInput.parse(typed)));
+			expect(await instrumentsOf(copy.slug)).toEqual([
+				['tile-render', 'wattle-3'],
+				['archive-pack', '']
+			]);
+		});
+
+		it('refuses beside the workloads one that was retired meanwhile, and stores nothing', async () => {
+			const { typed } = await copyOf(await readFromTwo());
+			await must(retireInstrument(ctx, 'wattle-3', { retired: 'yes', version: 1 }));
+			const refused = await planCampaign(ctx, campaignInput.parse(typed));
+			expect(refused).toMatchObject({
+				ok: false,
+				fields: { workloads: [expect.stringContaining('Wattle 3 is no longer in use')] }
+			});
+			expect(await offerPlan(ctx, { rig: '', from: 'first-look-again', suite: '' })).toMatchObject({
+				reason: 'not_found'
+			});
+			const workloads = typed.workloads.map((row) => ({ ...row, instrument: '' }));
+			const mended = await must(planCampaign(ctx, campaignInput.parse({ ...typed, workloads })));
+			expect(await instrumentsOf(mended.slug)).toEqual([
+				['tile-render', ''],
+				['archive-pack', '']
+			]);
+		});
 	});
 
 	it('says so where there is no such campaign or suite', async () => {

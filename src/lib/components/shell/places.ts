@@ -44,6 +44,22 @@ export const commands: readonly Command[] = [
 	...places.map(({ label, href, act }) => ({ label, href, act, group: 'Go to' as const })),
 	{ group: 'Go to', label: 'Workloads', href: '/bench/workloads', act: 'bench.read', keywords: ['bench'] },
 	{ group: 'Go to', label: 'Rigs', href: '/bench/rigs', act: 'bench.read', keywords: ['bench', 'profiles'] },
+	{ group: 'Go to', label: 'Suites', href: '/bench/suites', act: 'bench.read', keywords: ['bench', 'lab'] },
+	{
+		group: 'Go to',
+		label: 'Instruments',
+		href: '/bench/instruments',
+		act: 'bench.read',
+		keywords: ['bench', 'lab', 'calibration']
+	},
+	{ group: 'Go to', label: 'Limits', href: '/bench/limits', act: 'bench.read', keywords: ['bench', 'lab'] },
+	{
+		group: 'Go to',
+		label: 'Firmware meanings',
+		href: '/bench/meanings',
+		act: 'bench.read',
+		keywords: ['bench', 'lab', 'settings', 'family']
+	},
 	{ group: 'Go to', label: 'My page', href: '/me', act: 'account.use', keywords: ['password', 'tokens'] },
 	{ group: 'Go to', label: 'The readers’ site', href: '/', act: 'account.use', keywords: ['home', 'public'] },
 	{ group: 'Go to', label: 'Mail and jobs', href: '/people/jobs', act: 'jobs.manage', keywords: ['outbox'] },

@@ -2,6 +2,7 @@ import type { CellFigures, Overall, WorkloadFacts } from '../bench/figures';
 import type { DriftFacts } from '../bench/drift-facts';
 import type { LadderFacts } from '../bench/stability/ladder-facts';
 import type { SweepFacts } from '../bench/stability/sweep-facts';
+import type { Advice } from '../bench/tuning/advice';
 import type { SettingQuantity } from '../bench/words';
 import type { EmbargoField, PartKind, Provenance } from '../stores/words';
 
@@ -37,9 +38,11 @@ export interface ProfileFacts {
 	/** Null for stock. */
 	parent: string | null;
 	notes: string;
-	/** In menu order, the parent's settings included. */
+	/** In menu order, the parent's settings included; what they set as the row or the lab's meanings say. */
 	settings: SettingFact[];
 	derived: DerivedFact[];
+	/** What is worth another look, by the lab's limits among others; left out of editions from before it was told. */
+	advice?: Advice[];
 }
 
 export interface KitLine {

@@ -82,4 +82,13 @@ export function json(value: unknown, init: ResponseInit = {}): Response {
 export const answer = (outcome: Outcome<unknown>, status = 200): Response =>
 	outcome.ok ? json(outcome.value, { status }) : problemFrom(outcome);
 
+/**
+ * What was made as a response: 201, with the address it is read at in `Location`; or its refusal as a problem.
+ * @example return created(outcome, (part) => `/api/v1/parts/${part.slug}`)
+ */
+export const created = <T>(outcome: Outcome<T>, addressOf: (value: T) => string): Response =>
+	outcome.ok
+		? json(outcome.value, { status: 201, headers: { location: addressOf(outcome.value) } })
+		: problemFrom(outcome);
+
 export { idempotent } from './idempotency';

@@ -44,7 +44,8 @@ async function firstTime(ctx: Context, row: keys.KeyedRequest, run: (ctx: Contex
 			const response = await run({ ...ctx, db: tx });
 			if (response.status >= 300) throw new NotKept(response);
 			const body = await response.clone().text();
-			await keys.keep(tx, row.userId, row.key, { status: response.status, body });
+			const location = response.headers.get('location');
+			await keys.keep(tx, row.userId, row.key, { status: response.status, body, location });
 			return response;
 		});
 	} catch (error) {
@@ -69,13 +70,14 @@ async function replay(ctx: Context, row: keys.KeyedRequest): Promise<Response | 
 		headers: {
 			'content-type': 'application/json',
 			'cache-control': 'no-store',
-			'idempotency-replayed': 'true'
+			'idempotency-replayed': 'true',
+			...(before.location === null ? {} : { location: before.location })
 		}
 	});
 }
 
 /**
- * Runs a POST so that the same Idempotency-Key has its effect once, even when the answer was lost on its way.
+ * Runs a POST or PUT so that the same Idempotency-Key has its effect once, even when the answer was lost on its way.
  * The work must use the context it is given: it is the transaction that also holds the key.
  * @example return idempotent(event, ctx, async (ctx) => answer(await recordRun(ctx, body.value), 201));
  */

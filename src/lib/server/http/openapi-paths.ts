@@ -1,8 +1,9 @@
 import type { Described } from './openapi';
 import { about } from './openapi/about';
+import { benchLab } from './openapi/bench-lab';
 import { benchPlan } from './openapi/bench-plan';
 import { benchRun } from './openapi/bench-run';
 import { benchStability } from './openapi/bench-stability';
 
 /** Every operation of /api/v1, one file per area; a test holds it against the route files. */
-export const described: Described[] = [...about, ...benchPlan, ...benchRun, ...benchStability];
+export const described: Described[] = [...about, ...benchPlan, ...benchLab, ...benchRun, ...benchStability];

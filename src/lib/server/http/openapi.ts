@@ -92,10 +92,21 @@ const idempotencyHeader = {
 	schema: { type: 'string', maxLength: 190 }
 };
 
-function responsesOf({ method, act, body, query, path, response, status = 200 }: Described) {
+const locationHeader = {
+	Location: { description: 'Where what was made is read.', schema: { type: 'string' } }
+};
+
+function responsesOf(
+	{ method, act, body, query, path, response, status = 200 }: Described,
+	located: boolean
+) {
 	const writes = body !== undefined || method !== 'get';
 	return {
-		[status]: { description: 'Done.', content: content(jsonSchema(response, 'output')) },
+		[status]: {
+			description: 'Done.',
+			...(located ? { headers: locationHeader } : {}),
+			content: content(jsonSchema(response, 'output'))
+		},
 		...(act === 'public'
 			? {}
 			: { 401: problemRef('No valid token.'), 403: problemRef('Roles or scopes do not include it.') }),
@@ -109,7 +120,7 @@ function responsesOf({ method, act, body, query, path, response, status = 200 }:
 
 const scopeOf = (act: Act) => ('scope' in policy[act] ? policy[act].scope : undefined);
 
-function operationOf(described: Described) {
+function operationOf(described: Described, located: boolean) {
 	const { method, path, act, summary, body, query } = described;
 	const scope = act === 'public' ? undefined : scopeOf(act);
 	return {
@@ -122,10 +133,10 @@ function operationOf(described: Described) {
 		parameters: [
 			...pathParameters(path),
 			...queryParameters(query),
-			...(method === 'post' ? [idempotencyHeader] : [])
+			...(method === 'post' || method === 'put' ? [idempotencyHeader] : [])
 		],
 		...(body ? { requestBody: { required: true, content: content(jsonSchema(body, 'input')) } } : {}),
-		responses: responsesOf(described)
+		responses: responsesOf(described, located)
 	};
 }
 
@@ -145,8 +156,13 @@ const problemSchema = {
 /** The OpenAPI 3.1 document of what is described, made from the schemas that check it. */
 export function openApi(operations: Described[], origin: string) {
 	const paths: Record<string, Json> = {};
+	const read = new Set(operations.filter(({ method }) => method === 'get').map(({ path }) => path));
 	for (const operation of operations) {
-		(paths[operation.path] ??= {})[operation.method] = operationOf(operation);
+		const { method, path } = operation;
+		// A list's POST makes what is read one step below it.
+		const located =
+			method === 'post' && [...read].some((one) => one.replace(/\/\{\w+\}$/, '') === path && one !== path);
+		(paths[path] ??= {})[method] = operationOf(operation, located);
 	}
 	return {
 		openapi: '3.1.0',

@@ -5,6 +5,7 @@ import { disclosure } from './disclosure';
 import { embargo } from './embargo';
 import type { Check, Finding, PreflightInput } from './finding';
 import { images } from './images';
+import { labLimits } from './lab-limits';
 import { readingsNeeded } from './readings-needed';
 import { signOff } from './sign-off';
 import { standfirst } from './standfirst';
@@ -21,6 +22,7 @@ export const allChecks: readonly Check[] = [
 	images,
 	comments,
 	readingsNeeded,
+	labLimits,
 	wideIntervals,
 	standfirst,
 	titleLength

@@ -58,7 +58,7 @@ export async function addProfiles(db: Db, campaignId: number, profileIds: number
 export async function addWorkloads(
 	db: Db,
 	campaignId: number,
-	chosen: { workloadId: number; repeats: number }[],
+	chosen: { workloadId: number; repeats: number; instrumentId: number | null }[],
 	from: number
 ) {
 	if (chosen.length === 0) return;

@@ -1,24 +1,76 @@
-import { and, asc, count, eq, isNull, ne, sql } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNull, ne, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { firmwareMeaning, profile, profileSetting, rig, user } from '../schema';
+import { behind, containsWords } from '../search';
+
+export interface MeaningFilter {
+	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
+	family?: string;
+	limit: number;
+}
+
+const columns = {
+	id: firmwareMeaning.id,
+	family: firmwareMeaning.family,
+	setting: firmwareMeaning.setting,
+	quantity: firmwareMeaning.quantity,
+	coreGroup: firmwareMeaning.coreGroup,
+	createdBy: user.name,
+	createdAt: firmwareMeaning.createdAt,
+	version: firmwareMeaning.version
+};
 
 /** Every meaning with who wrote it, of one family or of all, by family and setting. */
 export const list = (db: Db, family = '') =>
 	db
-		.select({
-			id: firmwareMeaning.id,
-			family: firmwareMeaning.family,
-			setting: firmwareMeaning.setting,
-			quantity: firmwareMeaning.quantity,
-			coreGroup: firmwareMeaning.coreGroup,
-			createdBy: user.name,
-			createdAt: firmwareMeaning.createdAt,
-			version: firmwareMeaning.version
-		})
+		.select(columns)
 		.from(firmwareMeaning)
 		.innerJoin(user, eq(user.id, firmwareMeaning.createdBy))
 		.where(family === '' ? undefined : eq(firmwareMeaning.family, family))
 		.orderBy(asc(firmwareMeaning.family), asc(firmwareMeaning.setting));
+
+/** What settings of several families set, to read profiles by. */
+export const ofFamilies = async (db: Db, names: string[]) =>
+	names.length === 0
+		? []
+		: db
+				.select({
+					family: firmwareMeaning.family,
+					setting: firmwareMeaning.setting,
+					quantity: firmwareMeaning.quantity,
+					coreGroup: firmwareMeaning.coreGroup
+				})
+				.from(firmwareMeaning)
+				.where(inArray(firmwareMeaning.family, names))
+				.orderBy(asc(firmwareMeaning.family), asc(firmwareMeaning.setting));
+
+/** Some of the meanings in the order they were written, behind a cursor. */
+export const page = (db: Db, { q, after, family, limit }: MeaningFilter) =>
+	db
+		.select(columns)
+		.from(firmwareMeaning)
+		.innerJoin(user, eq(user.id, firmwareMeaning.createdBy))
+		.where(
+			and(
+				behind(firmwareMeaning.id, after),
+				containsWords(q, [firmwareMeaning.setting, firmwareMeaning.family]),
+				family ? eq(firmwareMeaning.family, family) : undefined
+			)
+		)
+		.orderBy(asc(firmwareMeaning.id))
+		.limit(limit);
+
+/** One meaning with who wrote it. */
+export const whole = async (db: Db, id: number) =>
+	(
+		await db
+			.select(columns)
+			.from(firmwareMeaning)
+			.innerJoin(user, eq(user.id, firmwareMeaning.createdBy))
+			.where(eq(firmwareMeaning.id, id))
+	)[0];
 
 export const byId = async (db: Db, id: number) =>
 	(await db.select().from(firmwareMeaning).where(eq(firmwareMeaning.id, id)))[0];

@@ -45,7 +45,7 @@ export const keep = (
 	tx: Transaction,
 	userId: string,
 	key: string,
-	answer: { status: number; body: string }
+	answer: { status: number; body: string; location: string | null }
 ) => tx.update(idempotencyKey).set(answer).where(same(userId, key));
 
 /** Forgets one key that is older than the moment given. */

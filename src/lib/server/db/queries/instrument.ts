@@ -1,16 +1,19 @@
 import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { campaign, campaignWorkload, instrument, workload } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface InstrumentFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	state: 'open' | 'retired' | 'all';
 }
 
-export type InstrumentSort = 'name' | 'due' | 'newest';
+export type InstrumentSort = 'id' | 'name' | 'due' | 'newest';
 
 const sorts = {
+	id: [],
 	name: [instrument.name],
 	// What has no date comes last.
 	due: [sql`${instrument.calibrationDueOn} is null`, instrument.calibrationDueOn],
@@ -23,8 +26,9 @@ const states = {
 	all: undefined
 };
 
-const matching = ({ q, state }: InstrumentFilter) =>
+const matching = ({ q, state, after }: InstrumentFilter) =>
 	and(
+		behind(instrument.id, after),
 		containsWords(q, [instrument.name, instrument.slug, instrument.serial, instrument.quantity]),
 		states[state]
 	);
@@ -75,7 +79,14 @@ export const usesOf = async (db: Db, instrumentIds: number[]) =>
 /** The instrument of each column of a campaign that has one. */
 export const ofCampaign = (db: Db, campaignId: number) =>
 	db
-		.select({ workloadId: campaignWorkload.workloadId, slug: instrument.slug, name: instrument.name })
+		.select({
+			workloadId: campaignWorkload.workloadId,
+			slug: instrument.slug,
+			name: instrument.name,
+			calibratedOn: instrument.calibratedOn,
+			calibrationDueOn: instrument.calibrationDueOn,
+			retiredAt: instrument.retiredAt
+		})
 		.from(campaignWorkload)
 		.innerJoin(instrument, eq(instrument.id, campaignWorkload.instrumentId))
 		.where(eq(campaignWorkload.campaignId, campaignId));

@@ -1,21 +1,23 @@
 import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { suite, suiteWorkload, workload } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
 
 export interface SuiteFilter {
 	q: string;
+	/** Only rows with a greater id. */
+	after?: number;
 	state: 'open' | 'archived' | 'all';
 }
 
-export type SuiteSort = 'name' | 'newest';
+export type SuiteSort = 'id' | 'name' | 'newest';
 
-const sorts = { name: [suite.name], newest: [suite.createdAt] } as const;
+const sorts = { id: [], name: [suite.name], newest: [suite.createdAt] } as const;
 
 const states = { open: isNull(suite.archivedAt), archived: isNotNull(suite.archivedAt), all: undefined };
 
-const matching = ({ q, state }: SuiteFilter) =>
-	and(containsWords(q, [suite.name, suite.slug, suite.purpose]), states[state]);
+const matching = ({ q, state, after }: SuiteFilter) =>
+	and(behind(suite.id, after), containsWords(q, [suite.name, suite.slug, suite.purpose]), states[state]);
 
 export const list = (db: Db, filter: SuiteFilter & { sort: SuiteSort; way: Way } & Window) =>
 	db

@@ -16,7 +16,7 @@ import {
 } from 'drizzle-orm/mysql-core';
 import { stages } from '../../../domain/articles/stage';
 import { at, id, mediumtext, personId, sha256, slug, version } from '../columns';
-import { campaign } from './bench';
+import { campaign } from './campaign';
 import { user } from './people';
 import { part } from './stores';
 

@@ -14,7 +14,7 @@ import {
 import { settingQuantities } from '../../../domain/bench/words';
 import { partKinds } from '../../../domain/stores/words';
 import { at, id, personId, slug, version } from '../columns';
-import { workload } from './bench';
+import { workload } from './bench-plan';
 import { user } from './people';
 
 /** What a firmware family calls a setting, and what the setting means. */

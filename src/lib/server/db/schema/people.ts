@@ -136,6 +136,8 @@ export const idempotencyKey = mysqlTable(
 		/** Null while the first request is still at work. */
 		status: int('status'),
 		body: mediumtext('body'),
+		/** Where what it made is read, as the answer said. */
+		location: varchar('location', { length: 500 }),
 		createdAt: at('created_at').notNull()
 	},
 	(t) => [primaryKey({ columns: [t.userId, t.key] }), index('idempotency_created').on(t.createdAt)]

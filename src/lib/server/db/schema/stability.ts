@@ -16,7 +16,7 @@ import {
 } from 'drizzle-orm/mysql-core';
 import { attemptOutcomes, stressKinds } from '../../../domain/bench/stability/words';
 import { at, id, personId, slug, version } from '../columns';
-import { profile, rigRevision, workload } from './bench';
+import { profile, rigRevision, workload } from './bench-plan';
 import { user } from './people';
 
 const volts = (name: string) => decimal(name, { precision: 7, scale: 4, mode: 'number' });

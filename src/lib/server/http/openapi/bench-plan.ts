@@ -64,6 +64,9 @@ const versions = { firmware: z.string(), driver: z.string(), os: z.string() };
 const rigItem = z.object({
 	...row,
 	name: z.string(),
+	firmwareFamily: z
+		.string()
+		.describe('By which the meanings of its settings are looked up; empty where it is of none.'),
 	revision: z.number(),
 	...versions,
 	samples: z.array(
@@ -112,8 +115,18 @@ const profileItem = z.object({
 });
 const profileWhole = profileItem.extend({
 	effective: z
-		.array(z.object({ ...setting, parentValue: z.string().nullable(), stockValue: z.string().nullable() }))
-		.describe('With what it inherits, in menu order.'),
+		.array(
+			z.object({
+				...setting,
+				parentValue: z.string().nullable(),
+				stockValue: z.string().nullable(),
+				group: z.number().nullable().describe('Chiplet or core group; null where it is for all.'),
+				known: z
+					.enum(['row', 'mapping', 'unknown'])
+					.describe('Who says what it sets: the row, the lab’s meanings of its firmware, or nobody.')
+			})
+		)
+		.describe('With what it inherits, in menu order, and the lab’s meanings put in.'),
 	derived: z
 		.array(
 			z.object({
@@ -125,7 +138,18 @@ const profileWhole = profileItem.extend({
 				how: z.string()
 			})
 		)
-		.describe('What follows from the settings by arithmetic; nothing is rounded.')
+		.describe('What follows from the settings by arithmetic; nothing is rounded.'),
+	advice: z
+		.array(
+			z.object({
+				kind: z.string(),
+				severity: z.enum(['advice', 'warning']).describe('A warning is about a limit of the lab.'),
+				words: z.string(),
+				settings: z.array(z.string()).describe('Names of the settings it is about.'),
+				source: z.string()
+			})
+		)
+		.describe('What is worth another look, by the lab’s limits among others; none is no promise of safety.')
 });
 
 /** Parts, samples, workloads, rigs and profiles. */

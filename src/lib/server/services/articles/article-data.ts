@@ -9,12 +9,13 @@ import { summariseCampaign } from '../../../domain/bench/campaign';
 import { driftFacts } from '../../../domain/bench/drift-facts';
 import type { WorkloadFacts } from '../../../domain/bench/figures';
 import { defaultBaseline, matrixOf } from '../../../domain/bench/matrix';
-import { chainTo, effectiveSettings } from '../../../domain/bench/profile';
-import { derivedFacts } from '../../../domain/bench/tuning/derive';
+import { chainTo } from '../../../domain/bench/profile';
+import { profileReading, type LabKnowledge } from '../../../domain/bench/tuning/lab-reading';
 import type { Context } from '../../context';
 import * as facts from '../../db/queries/campaign-facts';
 import * as recorded from '../../db/queries/campaign-readings';
 import * as duties from '../../db/queries/sample-duties';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as ladders from '../../db/queries/ladder';
 import * as stock from '../../db/queries/stock-runs';
 import { publication } from '../../db/queries/settings';
@@ -32,14 +33,16 @@ function kitOf(rows: facts.KitRow[]): KitLine[] {
 	}));
 }
 
-function profilesOf({ profiles, rigProfiles, rigSettings }: facts.CampaignFacts): ProfileFacts[] {
+function profilesOf(
+	{ profiles, rigProfiles, rigSettings }: facts.CampaignFacts,
+	lab: LabKnowledge
+): ProfileFacts[] {
 	return profiles.map(({ id, slug, name, parentId, notes }) => {
 		const chain = chainTo(rigProfiles, id).map((one) => ({
 			settings: rigSettings.filter((setting) => setting.profileId === one.id)
 		}));
-		const settings = effectiveSettings(chain);
 		const parent = rigProfiles.find((one) => one.id === parentId)?.slug ?? null;
-		return { slug, name, parent, notes, settings, derived: derivedFacts(settings) };
+		return { slug, name, parent, notes, ...profileReading(chain, lab) };
 	});
 }
 
@@ -59,7 +62,11 @@ const workloadOf = (row: facts.CampaignWorkloadRow): WorkloadFacts => ({
 	coolDownS: row.coolDownS
 });
 
-function campaignOf(plan: facts.CampaignFacts, own: recorded.CampaignReadings): CampaignData {
+function campaignOf(
+	plan: facts.CampaignFacts,
+	own: recorded.CampaignReadings,
+	lab: LabKnowledge
+): CampaignData {
 	const { head } = plan;
 	const baseline = defaultBaseline(plan.profiles);
 	const figures =
@@ -76,7 +83,7 @@ function campaignOf(plan: facts.CampaignFacts, own: recorded.CampaignReadings): 
 			os: head.os
 		},
 		kit: kitOf(plan.kit),
-		profiles: profilesOf(plan),
+		profiles: profilesOf(plan, lab),
 		workloads: plan.workloads.map(workloadOf),
 		baseline: baseline ?? '',
 		...figures
@@ -132,15 +139,16 @@ export async function articleData(
 	]);
 	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
 	const rigIds = [...new Set(plans.map(({ head }) => head.rigId))];
-	const [rows, climbedAndSwept, stockRuns] = await Promise.all([
+	const [rows, climbedAndSwept, stockRuns, labOf] = await Promise.all([
 		duties.ofRigRevisions(db, revisions, now),
 		stabilityOf(db, rigIds),
-		stock.ofRigs(db, { rigs: rigIds })
+		stock.ofRigs(db, { rigs: rigIds }),
+		knowledge.ofRigs(db, rigIds)
 	]);
 	const ordered = campaignIds.flatMap((id) => plans.find(({ head }) => head.id === id) ?? []);
 	return {
 		campaigns: ordered.map((plan) =>
-			campaignOf(plan, readings.get(plan.head.id) ?? { runs: [], signatures: [] })
+			campaignOf(plan, readings.get(plan.head.id) ?? { runs: [], signatures: [] }, labOf(plan.head.rigId))
 		),
 		duties: rows.map(dutyOf),
 		...climbedAndSwept,

@@ -3,6 +3,7 @@ import { may } from '../../../domain/people/policy';
 import { grouped } from '../../../domain/shared/grouped';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as profiles from '../../db/queries/profile';
 import * as rigs from '../../db/queries/rig';
 
@@ -41,9 +42,13 @@ async function comparisonOf(
 	const tree = await profiles.ofRigs(ctx.db, [rig.id]);
 	const root = tree.find((one) => one.parentId === null);
 	const sides = { a: a || (root?.slug ?? ''), b };
-	const [first = null, second = null] = await linesOf(ctx, tree, [sides.a, sides.b]);
+	const [[first = null, second = null], labOf] = await Promise.all([
+		linesOf(ctx, tree, [sides.a, sides.b]),
+		knowledge.ofRigs(ctx.db, [rig.id])
+	]);
 	return {
 		rig: { slug: rig.slug, name: rig.name },
+		lab: labOf(rig.id),
 		profiles: tree.map(({ slug, name }) => ({ slug, name })),
 		a: first,
 		b: second,

@@ -2,6 +2,7 @@ import { may } from '../../../domain/people/policy';
 import { grouped } from '../../../domain/shared/grouped';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as profiles from '../../db/queries/profile';
 import * as rigs from '../../db/queries/rig';
 
@@ -9,13 +10,17 @@ async function offerOf(ctx: Context, rigRef: string) {
 	const [rig] = await rigs.byRefs(ctx.db, [rigRef]);
 	if (!rig) return null;
 	const tree = await profiles.ofRigs(ctx.db, [rig.id]);
-	const settings = await profiles.settingsOf(
-		ctx.db,
-		tree.map((one) => one.id)
-	);
+	const [settings, labOf] = await Promise.all([
+		profiles.settingsOf(
+			ctx.db,
+			tree.map((one) => one.id)
+		),
+		knowledge.ofRigs(ctx.db, [rig.id])
+	]);
 	const settingsOf = grouped(settings, (setting) => setting.profileId);
 	return {
 		rig: { slug: rig.slug, name: rig.name },
+		lab: labOf(rig.id),
 		profiles: tree.map(({ id, slug, name, parentId, notes }) => ({
 			id,
 			slug,

@@ -1,5 +1,4 @@
-import { effectiveSettings } from '../../../domain/bench/profile';
-import { derivedFacts } from '../../../domain/bench/tuning/derive';
+import { profileReading } from '../../../domain/bench/tuning/lab-reading';
 import { may } from '../../../domain/people/policy';
 import { grouped } from '../../../domain/shared/grouped';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
@@ -53,20 +52,21 @@ export async function listProfilesForApi(
 	);
 }
 
-function wholeProfile({ profile, lineage }: ProfilePage) {
-	const effective = effectiveSettings(lineage);
+function wholeProfile({ profile, lineage, lab }: ProfilePage) {
+	const { settings: effective, derived, advice } = profileReading(lineage, lab);
 	const parent = lineage.at(-2)?.slug ?? null;
 	return {
 		...describeProfile(profile, parent, lineage.at(-1)?.settings ?? []),
 		/** With what it inherits, in menu order, and what parent and stock have there. */
 		effective,
-		derived: derivedFacts(effective)
+		derived,
+		advice
 	};
 }
 
 export type WholeProfile = ReturnType<typeof wholeProfile>;
 
-/** A profile by id, or by slug of a rig, with what it inherits and what follows from it. */
+/** A profile by id, or by slug of a rig, with what it inherits, what follows from it and what is worth another look. */
 export async function profileForApi(
 	ctx: Context,
 	ref: string,

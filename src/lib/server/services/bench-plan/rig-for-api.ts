@@ -23,6 +23,7 @@ const describeRig = (row: Row, units: Unit[]) => ({
 	id: row.id,
 	slug: row.slug,
 	name: row.name,
+	firmwareFamily: row.firmwareFamily,
 	revision: row.revision,
 	firmware: row.firmware,
 	driver: row.driver,

@@ -2,56 +2,31 @@ import { chainTo } from '../../../domain/bench/profile';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
-import * as meanings from '../../db/queries/firmware-meaning';
-import * as limits from '../../db/queries/lab-limit';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as profiles from '../../db/queries/profile';
-import * as revisions from '../../db/queries/rig-revision';
 import * as rigs from '../../db/queries/rig';
 import { withHeirs } from './profile-tree';
 
 type Found = Awaited<ReturnType<typeof profiles.byIds>>[number];
 
-/** What the lab knows of the rig's firmware, and its own limits, by which a profile's settings are read. */
-async function labOf(ctx: Context, rigId: number) {
-	const [rig] = await rigs.byRefs(ctx.db, [String(rigId)]);
-	const family = rig?.firmwareFamily ?? '';
-	const [entries, limitRows, units] = await Promise.all([
-		family === '' ? [] : meanings.list(ctx.db, family),
-		limits.list(ctx.db),
-		revisions.samplesOf(ctx.db, rig ? [rig.revisionId] : [])
-	]);
-	return {
-		family,
-		meanings: entries.map(({ setting, quantity, coreGroup }) => ({ family, setting, quantity, coreGroup })),
-		limits: limitRows.map(({ quantity, partKind, limit, unit, source }) => ({
-			quantity,
-			partKind,
-			limit,
-			unit,
-			source
-		})),
-		/** Kinds of the parts in the rig as it stands now. */
-		kinds: [...new Set(units.map((unit) => unit.kind))]
-	};
-}
-
 async function pageOf(ctx: Context, profile: Found) {
 	const tree = await profiles.ofRigs(ctx.db, [profile.rigId]);
 	const line = chainTo(tree, profile.id);
 	const heirs = withHeirs(tree, profile.id);
-	const [settings, campaigns, measured, lab] = await Promise.all([
+	const [settings, campaigns, measured, labOf] = await Promise.all([
 		profiles.settingsOf(
 			ctx.db,
 			line.map((one) => one.id)
 		),
 		profiles.campaignsOf(ctx.db, [profile.id]),
 		profiles.measured(ctx.db, heirs),
-		labOf(ctx, profile.rigId)
+		knowledge.ofRigs(ctx.db, [profile.rigId])
 	]);
 	const name = (id: number) => tree.find((one) => one.id === id)?.name ?? '';
 	return {
 		profile,
-		lab,
+		/** What the lab knows of its rig, by which its settings are read. */
+		lab: labOf(profile.rigId),
 		/** From stock down to the profile itself, each with what it sets. */
 		lineage: line.map((one) => ({
 			slug: one.slug,

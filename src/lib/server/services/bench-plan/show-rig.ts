@@ -1,7 +1,9 @@
+import { unexplained } from '../../../domain/bench/tuning/lab-reading';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { grouped } from '../../../domain/shared/grouped';
 import type { Context } from '../../context';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as prices from '../../db/queries/part-price';
 import * as profiles from '../../db/queries/profile';
 import * as revisions from '../../db/queries/rig-revision';
@@ -16,12 +18,13 @@ async function pageOf(ctx: Context, ref: string) {
 	]);
 	const revisionIds = history.map((revision) => revision.id);
 	const profileIds = tree.map((profile) => profile.id);
-	const [units, campaigns, measured, settings, measuredProfiles] = await Promise.all([
+	const [units, campaigns, measured, settings, measuredProfiles, labOf] = await Promise.all([
 		revisions.samplesOf(ctx.db, revisionIds),
 		revisions.campaignsOf(ctx.db, revisionIds),
 		revisions.measured(ctx.db, revisionIds),
 		profiles.settingsOf(ctx.db, profileIds),
-		profiles.measured(ctx.db, profileIds)
+		profiles.measured(ctx.db, profileIds),
+		knowledge.ofRigs(ctx.db, [rig.id])
 	]);
 	const latest = await prices.latestOf(ctx.db, [...new Set(units.map((unit) => unit.partId))]);
 	const settingsOf = grouped(settings, (setting) => setting.profileId);
@@ -41,6 +44,8 @@ async function pageOf(ctx: Context, ref: string) {
 			settings: settingsOf.get(profile.id)?.length ?? 0,
 			measured: measuredProfiles.has(profile.id)
 		})),
+		/** Names of settings in its profiles that nothing explains. */
+		unexplained: unexplained(settings, labOf(rig.id)),
 		prices: latest.map(({ partId, amountMinor, currency, observedOn }) => ({
 			partId,
 			amountMinor,

@@ -50,7 +50,10 @@ async function write(ctx: Context, input: CampaignInput, chosen: Chosen): Promis
 				rig: rig.slug,
 				revision: rig.revision,
 				profiles: input.profiles,
-				workloads: input.workloads.map((row) => row.workload)
+				workloads: input.workloads.map((row) => row.workload),
+				instruments: Object.fromEntries(
+					input.workloads.flatMap((row) => (row.instrument ? [[row.workload, row.instrument]] : []))
+				)
 			}
 		}
 	]);

@@ -1,8 +1,10 @@
 import type { LadderStart } from '../../../domain/bench/stability/ladder-report';
-import { chainTo, effectiveSettings } from '../../../domain/bench/profile';
+import { chainTo } from '../../../domain/bench/profile';
 import { coreClocks } from '../../../domain/bench/tuning/core-facts';
+import { meantSettings } from '../../../domain/bench/tuning/lab-reading';
 import { valuesOf } from '../../../domain/bench/tuning/setting-values';
 import type { Db } from '../../db/client';
+import * as knowledge from '../../db/queries/lab-knowledge';
 import * as profiles from '../../db/queries/profile';
 
 /** Where a ladder begins: the lowest core clock and voltage that its profile sets; null where it sets none. */
@@ -11,12 +13,16 @@ export async function ladderStart(
 	{ rigId, profileId }: { rigId: number; profileId: number }
 ): Promise<LadderStart | null> {
 	const chain = chainTo(await profiles.ofRigs(db, [rigId]), profileId);
-	const settings = await profiles.settingsOf(
-		db,
-		chain.map((one) => one.id)
-	);
-	const effective = effectiveSettings(
-		chain.map((one) => ({ settings: settings.filter((setting) => setting.profileId === one.id) }))
+	const [settings, labOf] = await Promise.all([
+		profiles.settingsOf(
+			db,
+			chain.map((one) => one.id)
+		),
+		knowledge.ofRigs(db, [rigId])
+	]);
+	const effective = meantSettings(
+		chain.map((one) => ({ settings: settings.filter((setting) => setting.profileId === one.id) })),
+		labOf(rigId)
 	);
 	const clocks = coreClocks(effective).map((clock) => clock.mhz);
 	const volts = valuesOf(effective, 'core-voltage').map((voltage) => voltage.value);

@@ -1,6 +1,6 @@
 import type { RequestEvent } from './$types';
 import { campaignInput, campaignsApiQuery } from '$lib/schemas/campaign';
-import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { created, idempotent, readJson, readQuery } from '$lib/server/http/api';
 import { guardedApi } from '$lib/server/http/guarded';
 import { page } from '$lib/server/http/paging';
 import { problemFrom } from '$lib/server/http/problem';
@@ -19,5 +19,7 @@ export const GET = guardedApi('bench.read', async (event: RequestEvent, ctx) => 
 export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) => {
 	const body = await readJson(event, campaignInput);
 	if (!body.ok) return body.response;
-	return idempotent(event, ctx, async (tx) => answer(await planCampaign(tx, body.value), 201));
+	return idempotent(event, ctx, async (tx) =>
+		created(await planCampaign(tx, body.value), (row) => `/api/v1/campaigns/${row.slug}`)
+	);
 });

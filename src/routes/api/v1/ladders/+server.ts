@@ -1,5 +1,5 @@
 import { ladderInput, laddersApiQuery } from '$lib/schemas/ladder';
-import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { created, idempotent, readJson, readQuery } from '$lib/server/http/api';
 import { guardedApi } from '$lib/server/http/guarded';
 import { page } from '$lib/server/http/paging';
 import { problemFrom } from '$lib/server/http/problem';
@@ -20,7 +20,9 @@ export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) =>
 	const body = await readJson(event, ladderInput);
 	if (!body.ok) return body.response;
 	return idempotent(event, ctx, async (tx) => {
-		const created = await createLadder(tx, body.value);
-		return created.ok ? answer(await ladderForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+		const made = await createLadder(tx, body.value);
+		if (!made.ok) return problemFrom(made);
+		const whole = await ladderForApi(tx, String(made.value.id));
+		return created(whole, (row) => `/api/v1/ladders/${row.slug}`);
 	});
 });

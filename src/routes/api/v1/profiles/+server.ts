@@ -1,5 +1,5 @@
 import { profileInput, profilesApiQuery } from '$lib/schemas/profile';
-import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { created, idempotent, readJson, readQuery } from '$lib/server/http/api';
 import { guardedApi } from '$lib/server/http/guarded';
 import { page } from '$lib/server/http/paging';
 import { problemFrom } from '$lib/server/http/problem';
@@ -20,7 +20,9 @@ export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) =>
 	const body = await readJson(event, profileInput);
 	if (!body.ok) return body.response;
 	return idempotent(event, ctx, async (tx) => {
-		const created = await createProfile(tx, body.value);
-		return created.ok ? answer(await profileForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+		const made = await createProfile(tx, body.value);
+		if (!made.ok) return problemFrom(made);
+		const whole = await profileForApi(tx, String(made.value.id));
+		return created(whole, (row) => `/api/v1/profiles/${row.id}`);
 	});
 });

@@ -1,5 +1,5 @@
 import { rigInput, rigsApiQuery } from '$lib/schemas/rig';
-import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { created, idempotent, readJson, readQuery } from '$lib/server/http/api';
 import { guardedApi } from '$lib/server/http/guarded';
 import { page } from '$lib/server/http/paging';
 import { problemFrom } from '$lib/server/http/problem';
@@ -20,7 +20,9 @@ export const POST = guardedApi('bench.plan', async (event: RequestEvent, ctx) =>
 	const body = await readJson(event, rigInput);
 	if (!body.ok) return body.response;
 	return idempotent(event, ctx, async (tx) => {
-		const created = await createRig(tx, body.value);
-		return created.ok ? answer(await rigForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+		const made = await createRig(tx, body.value);
+		if (!made.ok) return problemFrom(made);
+		const whole = await rigForApi(tx, String(made.value.id));
+		return created(whole, (row) => `/api/v1/rigs/${row.slug}`);
 	});
 });

@@ -1,5 +1,5 @@
 import { sampleInput, samplesApiQuery } from '$lib/schemas/sample';
-import { answer, idempotent, readJson, readQuery } from '$lib/server/http/api';
+import { created, idempotent, readJson, readQuery } from '$lib/server/http/api';
 import { guardedApi } from '$lib/server/http/guarded';
 import { page } from '$lib/server/http/paging';
 import { problemFrom } from '$lib/server/http/problem';
@@ -20,7 +20,9 @@ export const POST = guardedApi('stores.edit', async (event: RequestEvent, ctx) =
 	const body = await readJson(event, sampleInput);
 	if (!body.ok) return body.response;
 	return idempotent(event, ctx, async (tx) => {
-		const created = await createSample(tx, body.value);
-		return created.ok ? answer(await sampleForApi(tx, String(created.value.id)), 201) : problemFrom(created);
+		const made = await createSample(tx, body.value);
+		if (!made.ok) return problemFrom(made);
+		const whole = await sampleForApi(tx, String(made.value.id));
+		return created(whole, (row) => `/api/v1/samples/${row.slug}`);
 	});
 });

@@ -7,12 +7,14 @@ import { showProfile } from '$lib/server/services/bench-plan/show-profile';
 import type { PageServerLoadEvent, RequestEvent } from './$types';
 
 export const load = guarded('bench.plan', async ({ params }: PageServerLoadEvent, ctx) => {
-	const { profile, lineage, measured } = valueOrError(await showProfile(ctx, params.rig, params.profile));
+	const page = valueOrError(await showProfile(ctx, params.rig, params.profile));
+	const { profile, lineage, lab, measured } = page;
 	const { version, name, notes } = profile;
 	const settings = asTypedSettings(lineage.at(-1)?.settings ?? [], measured.length > 0 ? 0 : 3);
 	return {
 		title: `Change ${name}`,
 		profile,
+		lab,
 		above: lineage.slice(0, -1),
 		measured,
 		form: await blankForm(profileEdit, { version, name, notes, settings })

@@ -170,6 +170,12 @@ export const access: Record<string, Record<string, Need>> = {
 	'/(staff)/bench/workloads/[workload=slug]/edit': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/bench/workloads/new': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/desk': { load: 'article.read' },
+	'/(staff)/desk/articles': {
+		load: 'article.read',
+		'?/bulk': 'article.edit',
+		'?/keep': 'article.read',
+		'?/forget': 'article.read'
+	},
 	'/(staff)/desk/articles/[slug]': {
 		load: 'article.read',
 		'?/save': 'article.edit',

@@ -182,6 +182,9 @@ export const access: Record<string, Record<string, Need>> = {
 		'?/submit': 'article.submit',
 		'?/campaigns': 'article.edit'
 	},
+	'/(staff)/desk/articles/[slug]/narration': { load: 'article.read' },
+	'/(staff)/desk/articles/[slug]/narration/[file]': { GET: 'article.read' },
+	'/(staff)/desk/articles/[slug]/narration/prompter': { load: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates': { POST: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates/[file]': { GET: 'article.read' },
 	'/(staff)/desk/articles/[slug]/review': {

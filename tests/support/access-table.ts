@@ -171,12 +171,21 @@ export const access: Record<string, Record<string, Need>> = {
 	'/(staff)/bench/workloads/[workload=slug]/edit': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/bench/workloads/new': { load: 'bench.plan', '?/default': 'bench.plan' },
 	'/(staff)/desk': { load: 'article.read' },
+	'/(staff)/desk/articles': {
+		load: 'article.read',
+		'?/bulk': 'article.edit',
+		'?/keep': 'article.read',
+		'?/forget': 'article.read'
+	},
 	'/(staff)/desk/articles/[slug]': {
 		load: 'article.read',
 		'?/save': 'article.edit',
 		'?/submit': 'article.submit',
 		'?/campaigns': 'article.edit'
 	},
+	'/(staff)/desk/articles/[slug]/narration': { load: 'article.read' },
+	'/(staff)/desk/articles/[slug]/narration/[file]': { GET: 'article.read' },
+	'/(staff)/desk/articles/[slug]/narration/prompter': { load: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates': { POST: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates/[file]': { GET: 'article.read' },
 	'/(staff)/desk/articles/[slug]/review': {

@@ -42,6 +42,13 @@ export interface Command {
 
 export const commands: readonly Command[] = [
 	...places.map(({ label, href, act }) => ({ label, href, act, group: 'Go to' as const })),
+	{
+		group: 'Go to',
+		label: 'Articles',
+		href: '/desk/articles',
+		act: 'article.read',
+		keywords: ['drafts', 'search', 'tags']
+	},
 	{ group: 'Go to', label: 'Workloads', href: '/bench/workloads', act: 'bench.read', keywords: ['bench'] },
 	{ group: 'Go to', label: 'Rigs', href: '/bench/rigs', act: 'bench.read', keywords: ['bench', 'profiles'] },
 	{ group: 'Go to', label: 'Suites', href: '/bench/suites', act: 'bench.read', keywords: ['bench', 'lab'] },

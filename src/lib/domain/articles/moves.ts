@@ -16,6 +16,12 @@ export const actOf: Record<Move, Act> = {
 	withdraw: 'article.withdraw'
 };
 
+/** Moves that nobody makes with an article they wrote, even after they handed it on. */
+export const judging: readonly Move[] = ['ask-changes', 'approve'];
+
 /** The moves that an actor can make with an article as it stands. */
-export const movesFor = (actor: Actor, standing: Standing, authorId: string): Move[] =>
-	moves.filter((move) => open(standing, move) && may(actor, actOf[move], { authorId }));
+export const movesFor = (actor: Actor, standing: Standing, authorId: string, handedItOn = false): Move[] =>
+	moves.filter(
+		(move) =>
+			open(standing, move) && may(actor, actOf[move], { authorId }) && !(handedItOn && judging.includes(move))
+	);

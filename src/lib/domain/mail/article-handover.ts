@@ -170,3 +170,25 @@ export const corrected = (facts: HandoverFacts, body: string, capacity: Capacity
 		publication: facts.publication,
 		because: reasonFor[capacity]
 	});
+
+/** To whoever takes articles over: which they are. */
+export const handedOver = (facts: {
+	by: string;
+	titles: string[];
+	/** Address of the list of what is theirs. */
+	href: string;
+	publication: string;
+}): Letter =>
+	letter({
+		subject:
+			facts.titles.length === 1
+				? `Yours now: ${facts.titles[0] ?? ''}`
+				: `Yours now: ${facts.titles.length} articles`,
+		paragraphs: [
+			`${facts.by} has handed you ${facts.titles.length === 1 ? 'this article' : 'these articles'}. You are the author from now on.`,
+			...facts.titles.map((title) => `• ${title}`)
+		],
+		link: { label: 'See what is yours', href: facts.href },
+		publication: facts.publication,
+		because: 'You get this because you write here.'
+	});

@@ -96,6 +96,7 @@ export const results = directive<Results>({
 			)
 		),
 		plain: `Results of ${campaign.name}`,
+		spoken: `[Table: results of ${campaign.name}]`,
 		cells
 	})
 });

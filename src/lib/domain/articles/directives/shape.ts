@@ -66,6 +66,8 @@ export interface Printed extends Trace {
 	html: string;
 	/** The same in plain text, for feeds, search and the word count; empty where it adds nothing. */
 	plain: string;
+	/** How a narrator says it, a line for each thing said, figures as printed; a line in square brackets is a cue. `plain` if left out. */
+	spoken?: string;
 }
 
 /** The names an attribute takes; null where any text will do. */

@@ -48,6 +48,14 @@ function stepHtml(step: Step): string {
 	);
 }
 
+/** One step as it is spoken, its caution right after it. */
+function stepSpoken(step: Step): string[] {
+	if (step.kind === 'leave') return [`Step ${step.number}: leave ${step.menu}.`];
+	if (step.kind === 'open-menu') return [`Step ${step.number}: open ${step.path.join(', then ')}.`];
+	const to = `Step ${step.number}: set ${step.setting} to ${valued(step.value, step.unit)}.`;
+	return step.caution ? [to, `Caution: ${stepCautions[step.caution.topic]}`] : [to];
+}
+
 /** `::steps{profile=}`: a profile as numbered steps in menu order, each caution beside the step it concerns. */
 export const steps = directive<ProfilePlace & { settings: SettingFact[] }>({
 	name: 'steps',
@@ -88,6 +96,12 @@ export const steps = directive<ProfilePlace & { settings: SettingFact[] }>({
 					`<ol>${items.join('')}</ol>`
 			),
 			plain: `Settings of ${profile.name}: ${settings.map((fact) => `${fact.setting} ${valued(fact.value, fact.unit)}`).join('; ')}.`,
+			spoken: [
+				`Settings of ${profile.name}.`,
+				where,
+				...list.flatMap(stepSpoken),
+				`Step ${list.length + 1}: save and restart.`
+			].join('\n'),
 			profiles: [{ campaign: campaign.slug, profile: profile.slug }],
 			cautions: [...new Set(topics)]
 		};

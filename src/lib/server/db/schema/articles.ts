@@ -56,6 +56,7 @@ export const article = mysqlTable(
 		uniqueIndex('article_slug').on(t.slug),
 		index('article_stage').on(t.stage, t.slotAt),
 		index('article_author').on(t.authorId),
+		index('article_updated').on(t.updatedAt),
 		index('article_published').on(t.liveEditionId, t.firstPublishedAt),
 		check(
 			'article_slot',

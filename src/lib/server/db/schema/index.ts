@@ -6,4 +6,5 @@ export * from './campaign';
 export * from './stability';
 export * from './lab';
 export * from './articles';
+export * from './desk';
 export * from './jobs';

@@ -6,14 +6,22 @@ import type { Context } from '../../context';
 import * as articles from '../../db/queries/article';
 import * as revisions from '../../db/queries/revision';
 import { plateDrawing } from '../../rendering/plate-cache';
+import { screenSvg, type Look, type Screen } from '../../rendering/screen-svg';
 import { standaloneSvg } from '../../rendering/standalone-svg';
 import { currentData } from './check-article';
+
+/** Which file of a plate: its numbers, its drawing, or the drawing set for a screen. */
+export interface PlateFile {
+	key: string;
+	kind: 'svg' | 'csv';
+	screen?: { screen: Screen; look: Look };
+}
 
 /** A plate of a text that is not printed yet, as a file: the one the newest revision draws from the bench as it is now. */
 export async function readDraftPlate(
 	ctx: Context,
 	slug: string,
-	{ key, kind }: { key: string; kind: 'svg' | 'csv' }
+	{ key, kind, screen }: PlateFile
 ): Promise<Outcome<string, 'forbidden' | 'not_found'>> {
 	if (!may(ctx.actor, 'article.read')) return refuse('forbidden', 'Your roles do not include the desk.');
 	const found = await articles.bySlug(ctx.db, slug);
@@ -26,5 +34,7 @@ export async function readDraftPlate(
 			'not_found',
 			'The saved text has no such plate, or its figures have changed. Save the text and open the plate again.'
 		);
-	return done(kind === 'csv' ? plateCsv(plate.spec) : standaloneSvg(plateDrawing(plate.spec)));
+	if (kind === 'csv') return done(plateCsv(plate.spec));
+	const drawing = plateDrawing(plate.spec);
+	return done(screen ? screenSvg(plate.spec, drawing, screen) : standaloneSvg(drawing));
 }

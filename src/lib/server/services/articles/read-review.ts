@@ -7,6 +7,7 @@ import { done, refuse } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import * as articles from '../../db/queries/article';
 import type { ArticleRow } from '../../db/queries/article';
+import * as filing from '../../db/queries/article-filing';
 import * as audit from '../../db/queries/audit';
 import * as comments from '../../db/queries/comment';
 import * as corrections from '../../db/queries/correction';
@@ -66,13 +67,14 @@ export async function readReview(ctx: Context, slug: string) {
 	const found = await articles.bySlug(ctx.db, slug);
 	if (!found) return refuse('not_found', 'There is no such article.');
 	const { article, authorName } = found;
-	const [shown, bound, said, printed, corrected, history] = await Promise.all([
+	const [shown, bound, said, printed, corrected, history, handedItOn] = await Promise.all([
 		pageOf(ctx, article),
 		articles.campaignsOf(ctx.db, article.id),
 		comments.ofArticle(ctx.db, article.id),
 		editions.listOf(ctx.db, article.id),
 		corrections.ofArticle(ctx.db, article.id),
-		audit.ofSubject(ctx.db, 'article', article.id, 40)
+		audit.ofSubject(ctx.db, 'article', article.id, 40),
+		filing.wasAuthor(ctx.db, article.id, ctx.actor.id)
 	]);
 	const subject = { authorId: article.authorId };
 	const mayResolve = may(ctx.actor, 'article.resolve', subject);
@@ -87,7 +89,12 @@ export async function readReview(ctx: Context, slug: string) {
 		editions: printed,
 		corrections: corrected,
 		history: history.map(({ id, at, act, actorName, reason }) => ({ id, at, act, actorName, reason })),
-		moves: movesFor(ctx.actor, { stage: article.stage, hasPage: hasPage(article) }, article.authorId),
+		moves: movesFor(
+			ctx.actor,
+			{ stage: article.stage, hasPage: hasPage(article) },
+			article.authorId,
+			handedItOn
+		),
 		mayComment: may(ctx.actor, 'article.comment'),
 		mayPlan: may(ctx.actor, 'article.schedule'),
 		mayCorrect: may(ctx.actor, 'article.correct'),

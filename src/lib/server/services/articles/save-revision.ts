@@ -7,6 +7,7 @@ import type { Context } from '../../context';
 import { inTransaction, type Transaction } from '../../db/client';
 import type { ArticleRow } from '../../db/queries/article';
 import * as articles from '../../db/queries/article';
+import * as filing from '../../db/queries/article-filing';
 import * as audit from '../../db/queries/audit';
 import * as editions from '../../db/queries/edition';
 import * as handover from '../../db/queries/handover';
@@ -107,6 +108,7 @@ async function write(
 		savedAt: ctx.now,
 		note
 	});
+	await filing.putText(tx, { articleId: row.id, title, standfirst, source });
 	await articles.update(tx, row.id, row.version, {
 		title,
 		standfirst,

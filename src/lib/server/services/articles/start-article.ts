@@ -6,6 +6,7 @@ import type { ArticleStart } from '../../../schemas/article';
 import type { Context } from '../../context';
 import { inTransaction, isDuplicate } from '../../db/client';
 import * as articles from '../../db/queries/article';
+import * as filing from '../../db/queries/article-filing';
 import * as audit from '../../db/queries/audit';
 import * as campaigns from '../../db/queries/campaign-choice';
 import * as revisions from '../../db/queries/revision';
@@ -45,6 +46,7 @@ export async function startArticle(
 			const data = await articleData({ db: tx, now: ctx.now }, ids);
 			// The template's own standfirst tells the writer what to say; in print it would say nothing.
 			const standfirst = '';
+			const source = fillTemplate(template.body, data);
 			const id = await articles.insert(tx, {
 				slug,
 				title: input.title,
@@ -62,11 +64,12 @@ export async function startArticle(
 				number: 1,
 				title: input.title,
 				standfirst,
-				source: fillTemplate(template.body, data),
+				source,
 				savedBy: ctx.actor.id,
 				savedAt: ctx.now,
 				note: 'from the template'
 			});
+			await filing.putText(tx, { articleId: id, title: input.title, standfirst, source });
 			await audit.append(tx, [
 				{
 					at: ctx.now,

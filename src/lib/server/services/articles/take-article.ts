@@ -1,9 +1,11 @@
 import { closedWords, open, type Move } from '../../../domain/articles/stage';
+import { actOf, judging } from '../../../domain/articles/moves';
 import { may, type Act } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import type { Context } from '../../context';
 import type { Transaction } from '../../db/client';
 import * as articles from '../../db/queries/article';
+import * as filing from '../../db/queries/article-filing';
 import type { ArticleRow } from '../../db/queries/article';
 
 export type TakeReason = 'not_found' | 'forbidden' | 'conflict';
@@ -38,6 +40,12 @@ export async function takeArticle(
 	if (!row) return refuse('not_found', 'There is no such article.');
 	if (!may(ctx.actor, wanted.act, { authorId: row.authorId }))
 		return refuse('forbidden', forbiddenWords(ctx, wanted.act, row.authorId));
+	const judges = judging.some((move) => actOf[move] === wanted.act);
+	if (judges && (await filing.wasAuthor(tx, row.id, ctx.actor.id)))
+		return refuse(
+			'forbidden',
+			'You wrote this article before you handed it on, so somebody else has to judge it. Nothing was changed.'
+		);
 	if (row.version !== wanted.seen)
 		return refuse(
 			'conflict',

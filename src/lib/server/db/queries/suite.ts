@@ -1,21 +1,27 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNull, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { suite, suiteWorkload, workload } from '../schema';
-import { containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import {
+	containsWords,
+	idsAmong,
+	inArchive,
+	ordered,
+	type ArchiveState,
+	type Way,
+	type Window
+} from '../search';
 
 export interface SuiteFilter {
 	q: string;
-	state: 'open' | 'archived' | 'all';
+	state: ArchiveState;
 }
 
 export type SuiteSort = 'name' | 'newest';
 
 const sorts = { name: [suite.name], newest: [suite.createdAt] } as const;
 
-const states = { open: isNull(suite.archivedAt), archived: isNotNull(suite.archivedAt), all: undefined };
-
 const matching = ({ q, state }: SuiteFilter) =>
-	and(containsWords(q, [suite.name, suite.slug, suite.purpose]), states[state]);
+	and(containsWords(q, [suite.name, suite.slug, suite.purpose]), inArchive(suite.archivedAt, state));
 
 export const list = (db: Db, filter: SuiteFilter & { sort: SuiteSort; way: Way } & Window) =>
 	db

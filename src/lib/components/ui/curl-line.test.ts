@@ -32,7 +32,7 @@ describe('the line for a shell', () => {
 });
 
 describe('what a form would send', () => {
-	it('leaves blank fields out, also in its lines, and keeps nought and no', () => {
+	it('leaves blank fields out, also in its lines, and keeps nought, no and an empty list', () => {
 		expect(
 			filledIn({
 				name: 'first',
@@ -43,6 +43,6 @@ describe('what a form would send', () => {
 				lines: [{ workload: 'render', minutes: '' }],
 				none: []
 			})
-		).toEqual({ name: 'first', count: 0, sure: false, lines: [{ workload: 'render' }] });
+		).toEqual({ name: 'first', count: 0, sure: false, lines: [{ workload: 'render' }], none: [] });
 	});
 });

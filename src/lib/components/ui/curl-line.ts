@@ -14,8 +14,7 @@ export const curlLine = (origin: string, path: string, body: unknown): string =>
 		`  -d ${quoted(JSON.stringify(body))}`
 	].join(' \\\n');
 
-const isBlank = (value: unknown): boolean =>
-	value === '' || value === null || value === undefined || (Array.isArray(value) && value.length === 0);
+const isBlank = (value: unknown): boolean => value === '' || value === null || value === undefined;
 
 /**
  * What a form holds, as a script would send it: fields left blank are left out, as the API takes its own value for them.

@@ -115,3 +115,63 @@ test('every answer carries the security headers, and pages a policy with a nonce
 	expect(policy).toMatch(/script-src[^;]*'nonce-/);
 	expect(policy).not.toMatch(/script-src[^;]*'unsafe-/);
 });
+
+test('without scripts a refused form shows its error beside the field and keeps what was typed', async ({
+	browser
+}) => {
+	const post = async (
+		role: 'liaison' | 'tester',
+		path: string,
+		typed: Record<string, string>,
+		opens = ''
+	) => {
+		const page = await pageOf(browser, role, { javaScriptEnabled: false });
+		await page.goto(path);
+		if (opens) {
+			await page.locator('main a[href^="/partners/loans/"]').first().click();
+			await page.getByText(opens).click();
+		}
+		const form = page
+			.locator('main form[method=post]')
+			.filter({ has: page.locator(`[name=${Object.keys(typed)[0]}]`) });
+		// The server is asked, not the browser's own checks.
+		await form.evaluate((element: HTMLFormElement) => (element.noValidate = true));
+		for (const [name, text] of Object.entries(typed)) await form.locator(`[name=${name}]`).fill(text);
+		await form.getByRole('button').first().click();
+		return { page, form };
+	};
+	const refusals = [
+		{
+			role: 'liaison',
+			path: '/partners/new',
+			typed: { contactEmail: 'no-address' },
+			label: 'E-mail',
+			says: /e-mail/
+		},
+		{
+			role: 'tester',
+			path: '/bench/workloads/new',
+			typed: { leastDifferencePercent: 'often' },
+			label: /least/i,
+			says: /figures/
+		},
+		{
+			role: 'tester',
+			path: '/stores/parts/aldermoor-1650',
+			typed: { amount: 'a lot', currency: 'ZZZ' },
+			label: 'Price',
+			says: /figures/
+		}
+	] as const;
+	for (const { role, path, typed, label, says } of refusals) {
+		const { page, form } = await post(role, path, typed);
+		for (const [name, text] of Object.entries(typed))
+			await expect(form.locator(`[name=${name}]`)).toHaveValue(text);
+		await expect(form.getByLabel(label).first()).toHaveAccessibleDescription(says);
+		await page.context().close();
+	}
+	const { page, form } = await post('liaison', '/partners', { until: '', zone: '' }, 'Set an embargo…');
+	await expect(form.getByLabel('Time zone')).toBeVisible();
+	await expect(form.getByLabel('Time zone')).toHaveAccessibleDescription(/time zone/i);
+	await page.context().close();
+});

@@ -158,7 +158,7 @@ test('the keys of the list do what it says', async ({ request }) => {
 	await expect(page.getByRole('cell', { name: '31.25', exact: true })).toBeVisible();
 
 	// Stored already: taken back by an exclusion with its reason, not by a deletion.
-	await expect(page.getByText('sending')).toHaveCount(0);
+	await expect(page.locator('#entry').getByText('sending')).toHaveCount(0);
 	await page.keyboard.press('Control+z');
 	await expect(page.getByRole('dialog').getByLabel('Reason')).toHaveValue('typed wrongly');
 	await page.getByRole('button', { name: 'Exclude the reading' }).click();
@@ -293,7 +293,7 @@ test('two testers in one cell see both values, and the second chooses', async ({
 			.first()
 			.press('Enter');
 	}
-	await expect(page.getByText('sending')).toHaveCount(0);
+	await expect(page.locator('#entry').getByText('sending')).toHaveCount(0);
 	await pelle.getByLabel('Reading 1, in s').fill('12.6');
 	await pelle.getByLabel('Reading 1, in s').press('Enter');
 	await expect(notice).toContainText('12.6');

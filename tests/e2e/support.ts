@@ -1,4 +1,10 @@
-import { expect, type APIRequestContext, type Browser, type Page } from '@playwright/test';
+import {
+	expect,
+	type APIRequestContext,
+	type Browser,
+	type BrowserContextOptions,
+	type Page
+} from '@playwright/test';
 
 export type Role = 'tester' | 'writer' | 'editor' | 'liaison' | 'admin';
 export const address = (role: Role) => `${role}@northlight.example`;
@@ -17,8 +23,12 @@ export async function signInAs(page: Page, email: string): Promise<void> {
 }
 
 /** A page of its own for a person, signed in; close its context when done. */
-export async function pageOf(browser: Browser, role: Role): Promise<Page> {
-	const page = await (await browser.newContext()).newPage();
+export async function pageOf(
+	browser: Browser,
+	role: Role,
+	options: BrowserContextOptions = {}
+): Promise<Page> {
+	const page = await (await browser.newContext(options)).newPage();
 	await signIn(page, role);
 	return page;
 }

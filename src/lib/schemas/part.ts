@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { isCurrency, minorUnits } from '../domain/shared/money';
+import { amountWanted, isAmount, isCurrency, minorUnits } from '../domain/shared/money';
 import { partKinds } from '../domain/stores/words';
 import { line, optionalSlug, unchosen, versionSeen } from './fields';
 import { apiListing, listing } from './listing';
@@ -29,12 +29,11 @@ const specification = z
 			.map(({ name, value, unit }) => (unit === '' ? { name, value } : { name, value, unit }))
 	);
 
+const amount = z.union([z.string(), z.number()], amountWanted).transform(String);
+
 const priceFields = z.object({
-	/** A decimal amount in the currency, such as "689.00". */
-	amount: z
-		.union([z.string(), z.number()], 'Write the amount in figures, such as 1249.50.')
-		.transform(String)
-		.default(''),
+	/** A decimal amount in the currency, such as "689.00". Checked by itself, so that a wrong currency hides no fault. */
+	amount: amount.refine(isAmount, amountWanted).default(''),
 	currency: z
 		.string('Write the three letters of the currency.')
 		.trim()
@@ -66,12 +65,17 @@ const partFields = {
 	specification
 };
 
+/** A price of a new part, whose row may be left without an amount. */
+const priceRow = priceFields.extend({
+	amount: amount.refine((text) => text.trim() === '' || isAmount(text), amountWanted).default('')
+});
+
 /** A new part, with the prices already seen. A price row without an amount is dropped. */
 export const partInput = z.object({
 	...partFields,
 	slug: optionalSlug,
 	prices: z
-		.array(priceFields.transform((row, ctx) => (row.amount.trim() === '' ? null : toMinorUnits(row, ctx))))
+		.array(priceRow.transform((row, ctx) => (row.amount.trim() === '' ? null : toMinorUnits(row, ctx))))
 		.max(50, 'Add at most 50 prices at once.')
 		.default([])
 		.transform((rows) => rows.filter((row) => row !== null))

@@ -1,18 +1,18 @@
-import { isRedirect, type ActionFailure } from '@sveltejs/kit';
-import type { SuperValidated } from 'sveltekit-superforms';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Actor } from '../../../src/lib/domain/people/roles';
 import type { Context } from '../../../src/lib/server/context';
 import { showPart } from '../../../src/lib/server/services/stores/show-part';
 import { showProfile } from '../../../src/lib/server/services/bench-plan/show-profile';
+import { actions as notePrice } from '../../../src/routes/(staff)/stores/parts/[slug=slug]/+page.server';
+import { actions as newWorkload } from '../../../src/routes/(staff)/bench/workloads/new/+page.server';
 import { actions as newPart } from '../../../src/routes/(staff)/stores/parts/new/+page.server';
 import { actions as editPart } from '../../../src/routes/(staff)/stores/parts/[slug=slug]/edit/+page.server';
 import { actions as newProfile } from '../../../src/routes/(staff)/bench/rigs/[rig=slug]/profiles/new/+page.server';
 import { useApp } from '../../support/app';
 import { contextFor } from '../../support/context';
 import { testDatabase, type TestDatabase } from '../../support/database';
-import { fakeEvent } from '../../support/event';
 import { people } from '../../support/people';
+import { postForm } from '../../support/post-form';
 import { addPart, addRig, must } from './plan';
 
 let database: TestDatabase;
@@ -27,26 +27,11 @@ beforeAll(async () => {
 });
 afterAll(() => database.close());
 
-interface Refused {
-	status: number;
-	form: SuperValidated<Record<string, unknown>, string>;
-}
-
-/** Posts a form as a browser without scripts does; where it leads, or the form that comes back. */
-async function post(
-	action: (event: never) => unknown,
+const post = (
+	action: Parameters<typeof postForm>[1],
 	form: Record<string, string>,
 	params: Record<string, string> = {}
-): Promise<string | Refused> {
-	try {
-		const event = fakeEvent({ path: '/x', form, params, actor: tester });
-		const failed = (await action(event as never)) as ActionFailure<{ form: Refused['form'] }>;
-		return { status: failed.status, form: failed.data.form };
-	} catch (thrown) {
-		if (isRedirect(thrown)) return thrown.location;
-		throw thrown;
-	}
-}
+) => postForm(tester, action, form, params);
 
 const forge = {
 	maker: 'Hollin',
@@ -88,6 +73,40 @@ describe('a form without scripts', () => {
 				errors: {
 					specification: { 1: { value: [expect.any(String)] } },
 					prices: { 0: { amount: [expect.any(String)] } }
+				}
+			}
+		});
+	});
+
+	it('names every fault of a price at once, and notes none', async () => {
+		const typed = { amount: 'a lot', currency: 'ZZZ', observedOn: 'soon', source: 'a shop' };
+		expect(await post(notePrice.price, typed, { slug: 'hollin-forge-x' })).toMatchObject({
+			status: 422,
+			form: {
+				data: typed,
+				errors: {
+					amount: [expect.stringContaining('figures')],
+					currency: [expect.stringContaining('ISO 4217')],
+					observedOn: [expect.any(String)]
+				}
+			}
+		});
+		const { prices } = await must(showPart(ctx, 'hollin-forge-x'));
+		expect(prices).toHaveLength(1);
+	});
+
+	it('says of a workload what is wrong beside each field, with the text that was no number', async () => {
+		const typed = { name: 'Loop', quantity: '', unit: 's', repeats: '2.5', leastDifferencePercent: 'often' };
+		expect(await post(newWorkload.default, typed)).toMatchObject({
+			status: 422,
+			form: {
+				data: { name: 'Loop', unit: 's', repeats: '2.5', leastDifferencePercent: 'often' },
+				errors: {
+					quantity: [expect.any(String)],
+					repeats: [expect.stringContaining('whole')],
+					leastDifferencePercent: [expect.stringContaining('figures')],
+					better: [expect.any(String)],
+					class: [expect.any(String)]
 				}
 			}
 		});

@@ -70,7 +70,12 @@ describe('in progress', () => {
 		await writtenArticle(database.db, who.writer);
 		wanted(await planSlot(as('editor'), slug, { version: await version(), slot: '2026-11-14T15:00' }));
 		const [row] = (await desk('editor')).inProgress.rows;
-		expect(row).toMatchObject({ title, stage: 'drafting', bench: '0 of 2 signed', print: { blocks: 1 } });
+		expect(row).toMatchObject({
+			title,
+			stage: 'drafting',
+			bench: '0 of 2 signed',
+			print: { parts: ['cells not signed off'] }
+		});
 		expect((await desk('editor', { stage: 'approved' })).inProgress.total).toBe(0);
 		expect((await desk('editor', { q: 'brisk' })).inProgress.total).toBe(1);
 		expect((await desk('editor', { q: '100%' })).inProgress.total).toBe(0);

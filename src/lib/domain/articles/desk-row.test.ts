@@ -13,7 +13,7 @@ describe('a row of the desk', () => {
 		expect(benchWords(addProgress([signed, measuring]))).toBe('81 of 100');
 	});
 
-	it('counts what stands before print', () => {
+	it('says what stands before print, and leaves the count to the preflight', () => {
 		const state = {
 			stage: 'in-review' as const,
 			slotAt: new Date('2026-11-12T08:00:00Z'),
@@ -21,10 +21,9 @@ describe('a row of the desk', () => {
 			blockingComments: 2,
 			embargoUntil: new Date('2026-11-13T13:00:00Z')
 		};
-		expect(beforePrint(state).blocks).toBe(4);
 		expect(beforePrint(state).parts).toEqual([
 			'2 blocking comments',
-			'8 cells not signed off',
+			'cells not signed off',
 			'a slot before the embargo ends'
 		]);
 	});
@@ -37,7 +36,7 @@ describe('a row of the desk', () => {
 			blockingComments: 0,
 			embargoUntil: new Date('2026-11-13T13:00:00Z')
 		};
-		expect(beforePrint(state)).toMatchObject({ blocks: 0, clear: false, embargo: state.embargoUntil });
+		expect(beforePrint(state)).toMatchObject({ parts: [], clear: false, embargo: state.embargoUntil });
 		expect(beforePrint({ ...state, embargoUntil: null }).clear).toBe(true);
 		expect(beforePrint({ ...state, stage: 'drafting', bench: signed, embargoUntil: null }).clear).toBe(false);
 	});

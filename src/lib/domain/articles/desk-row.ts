@@ -37,9 +37,11 @@ export interface PrintState {
 	embargoUntil: Date | null;
 }
 
-/** What stands before print, as far as the list knows; `blocks` counts matters, not words. */
+/**
+ * What stands before print, as far as the list knows. It gives words and no number of things to mend: that number is the
+ * preflight's, which counts what the rendered page shows, and two counts of one thing would not agree.
+ */
 export function beforePrint(state: PrintState): {
-	blocks: number;
 	embargo: Date | null;
 	clear: boolean;
 	parts: string[];
@@ -52,10 +54,9 @@ export function beforePrint(state: PrintState): {
 		...(blockingComments > 0
 			? [`${blockingComments} blocking comment${blockingComments === 1 ? '' : 's'}`]
 			: []),
-		...(!frozen && unsigned > 0 ? [`${unsigned} cell${unsigned === 1 ? '' : 's'} not signed off`] : []),
+		...(!frozen && unsigned > 0 ? ['cells not signed off'] : []),
 		...(embargoUntil && slotAt && slotAt < embargoUntil ? ['a slot before the embargo ends'] : [])
 	];
 	const embargo = embargoUntil && (!slotAt || slotAt < embargoUntil) ? embargoUntil : null;
-	const blocks = blockingComments + (!frozen && unsigned > 0 ? 1 : 0) + (embargo && slotAt ? 1 : 0);
-	return { blocks, embargo, clear: frozen && blocks === 0 && embargo === null, parts };
+	return { embargo, clear: frozen && parts.length === 0 && embargo === null, parts };
 }

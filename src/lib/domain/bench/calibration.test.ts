@@ -12,16 +12,16 @@ describe('an instrument’s calibration', () => {
 	])('on %s is %s', (today, state) => expect(calibrationState(meter, today)).toBe(state));
 
 	it('is said in words', () => {
-		expect(calibrationWords(meter, '2026-11-11')).toBe('calibrated 2026-01-12, due 2027-01-12');
-		expect(calibrationWords(meter, '2027-02-01')).toBe('calibration overdue since 2027-01-12');
+		expect(calibrationWords(meter, '2026-11-11')).toBe('calibrated 12 January 2026, due 12 January 2027');
+		expect(calibrationWords(meter, '2027-02-01')).toBe('calibration overdue since 12 January 2027');
 		expect(calibrationWords({ calibratedOn: '2026-01-12', calibrationDueOn: null }, '2030-01-01')).toBe(
-			'calibrated 2026-01-12'
+			'calibrated 12 January 2026'
 		);
 		expect(calibrationWords({ calibratedOn: null, calibrationDueOn: null }, '2030-01-01')).toBe(
 			'never calibrated'
 		);
 		expect(calibrationWords({ calibratedOn: null, calibrationDueOn: '2030-02-01' }, '2030-01-01')).toBe(
-			'to be calibrated by 2030-02-01'
+			'to be calibrated by 1 February 2030'
 		);
 	});
 });

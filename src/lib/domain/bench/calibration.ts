@@ -1,3 +1,5 @@
+import { DateTime } from 'luxon';
+
 export type CalibrationState = 'never' | 'valid' | 'overdue';
 
 export interface Calibrated {
@@ -13,14 +15,15 @@ export function calibrationState(instrument: Calibrated, today: string): Calibra
 	return calibratedOn === null ? 'never' : 'valid';
 }
 
-/** @example calibrationWords({ calibratedOn: '2026-01-12', calibrationDueOn: '2027-01-12' }, '2026-11-11') // 'calibrated 2026-01-12, due 2027-01-12' */
+const inWords = (day: string): string => DateTime.fromISO(day).setLocale('en-GB').toFormat('d LLLL yyyy');
+
+/** @example calibrationWords({ calibratedOn: '2026-01-12', calibrationDueOn: '2027-01-12' }, '2026-11-11') // 'calibrated 12 January 2026, due 12 January 2027' */
 export function calibrationWords(instrument: Calibrated, today: string): string {
-	const { calibratedOn, calibrationDueOn } = instrument;
+	const due = instrument.calibrationDueOn === null ? null : inWords(instrument.calibrationDueOn);
 	const state = calibrationState(instrument, today);
-	if (state === 'overdue') return `calibration overdue since ${calibrationDueOn}`;
-	if (state === 'never')
-		return calibrationDueOn === null ? 'never calibrated' : `to be calibrated by ${calibrationDueOn}`;
-	return calibrationDueOn === null
-		? `calibrated ${calibratedOn}`
-		: `calibrated ${calibratedOn}, due ${calibrationDueOn}`;
+	if (state === 'overdue') return `calibration overdue since ${due}`;
+	if (instrument.calibratedOn === null)
+		return due === null ? 'never calibrated' : `to be calibrated by ${due}`;
+	const calibrated = `calibrated ${inWords(instrument.calibratedOn)}`;
+	return due === null ? calibrated : `${calibrated}, due ${due}`;
 }

@@ -39,7 +39,7 @@ describe('the uncertainty of a cell', () => {
 		expect(of('2027-01-12')).toMatchObject({ overdue: false });
 		expect(of('2027-01-13')).toMatchObject({
 			overdue: true,
-			calibration: 'calibration overdue since 2027-01-12'
+			calibration: 'calibration overdue since 12 January 2027'
 		});
 	});
 

@@ -10,6 +10,12 @@ export const isCurrency = (code: string): boolean => known.has(code);
 export const currencyDigits = (currency: string): number =>
 	new Intl.NumberFormat('en', { style: 'currency', currency }).resolvedOptions().maximumFractionDigits ?? 2;
 
+const figures = /^(\d{1,3}(?:[\s'’]\d{3})+|\d+)(?:[.,](\d+))?$/;
+export const amountWanted = 'Write the amount in figures, such as 1249.50.';
+
+/** Whether a text is an amount in figures, whatever its currency. */
+export const isAmount = (typed: string): boolean => figures.test(typed.trim());
+
 export type Amount = { ok: true; amountMinor: number } | { ok: false; message: string };
 
 /**
@@ -19,8 +25,8 @@ export type Amount = { ok: true; amountMinor: number } | { ok: false; message: s
  * @example minorUnits('689.9', 'USD') // { ok: true, amountMinor: 68990 }
  */
 export function minorUnits(typed: string, currency: string): Amount {
-	const match = /^(\d{1,3}(?:[\s'’]\d{3})+|\d+)(?:[.,](\d+))?$/.exec(typed.trim());
-	if (!match) return { ok: false, message: 'Write the amount in figures, such as 1249.50.' };
+	const match = figures.exec(typed.trim());
+	if (!match) return { ok: false, message: amountWanted };
 	const digits = currencyDigits(currency);
 	const fraction = match[2] ?? '';
 	if (fraction.length > digits && /[1-9]/.test(fraction.slice(digits))) {

@@ -1,4 +1,4 @@
-import { and, asc, desc, gt, like, or, type Column, type SQL } from 'drizzle-orm';
+import { and, asc, desc, gt, isNotNull, isNull, like, or, type Column, type SQL } from 'drizzle-orm';
 
 /** Rows in which each word is found in one of the columns; undefined when there are no words. */
 export function containsWords(words: string, columns: Column[]): SQL | undefined {
@@ -31,3 +31,9 @@ export interface Window {
 /** Rows behind a cursor, which is the id of the last row seen; all of them without one. */
 export const behind = (id: Column, after: number | undefined): SQL | undefined =>
 	after === undefined ? undefined : gt(id, after);
+
+export type ArchiveState = 'open' | 'archived' | 'all';
+
+/** Rows that are still in use, those put away, or both. */
+export const inArchive = (archivedAt: Column, state: ArchiveState): SQL | undefined =>
+	state === 'all' ? undefined : state === 'archived' ? isNotNull(archivedAt) : isNull(archivedAt);

@@ -45,11 +45,13 @@ describe('highest passed', () => {
 		expect(stresses.map((one) => one.stress)).toEqual(['long-sums', 'wide-sums', 'frame-walk']);
 		expect(kinds.heaviest).toEqual({
 			clockMHz: 4700,
+			volts: 1.25,
 			heldBackBy: 'wide-sums',
 			lowestFailedMHz: 4800,
+			lowestFailedVolts: 1.25,
 			stresses: ['long-sums', 'wide-sums']
 		});
-		expect(kinds.everyday).toMatchObject({ clockMHz: 5100, lowestFailedMHz: null });
+		expect(kinds.everyday).toMatchObject({ clockMHz: 5100, lowestFailedMHz: null, lowestFailedVolts: null });
 	});
 
 	it('allows no clock to a kind while one of its stresses has passed none', () => {

@@ -17,9 +17,13 @@ export interface StressResult {
 export interface KindResult {
 	/** The highest clock that every stress of this kind passed; null where one has passed none. */
 	clockMHz: number | null;
+	/** The lowest voltage with which the stress that allows the least passed it, in V. */
+	volts: number | null;
 	/** The stress that allows the least. */
 	heldBackBy: string | null;
 	lowestFailedMHz: number | null;
+	/** The highest voltage it failed with, in V. */
+	lowestFailedVolts: number | null;
 	stresses: string[];
 }
 
@@ -54,11 +58,13 @@ function ofKind(kind: StressKind, results: readonly StressResult[]): KindResult 
 	const clockOf = (result: StressResult) => result.passed?.clockMHz ?? 0;
 	const [first, ...others] = mine;
 	const least = first && others.reduce((a, b) => (clockOf(b) < clockOf(a) ? b : a), first);
-	const fails = mine.flatMap((result) => result.failed?.clockMHz ?? []);
+	const failed = mine.flatMap((result) => result.failed ?? []).reduce<Attempt | null>(lowest, null);
 	return {
 		clockMHz: least?.passed?.clockMHz ?? null,
+		volts: least?.passed?.volts ?? null,
 		heldBackBy: least?.stress ?? null,
-		lowestFailedMHz: fails.length > 0 ? Math.min(...fails) : null,
+		lowestFailedMHz: failed?.clockMHz ?? null,
+		lowestFailedVolts: failed?.volts ?? null,
 		stresses: mine.map((result) => result.stress)
 	};
 }

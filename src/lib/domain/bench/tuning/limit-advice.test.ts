@@ -40,7 +40,7 @@ describe('the lab’s own limits', () => {
 				kind: 'over-the-lab-limit',
 				severity: 'warning',
 				words:
-					'Core voltage is set to 1.4 V, over the lab’s own limit of 1350 mV (two parts lost in May). The maker’s limit for your part stands above ours.',
+					'Core voltage is set to 1.4 V, over the lab’s own limit of 1350 mV. The maker’s limit for your part stands above ours.',
 				settings: ['Core voltage'],
 				source: 'the lab’s limits table: two parts lost in May'
 			}

@@ -39,7 +39,10 @@ function boundOf(quantity: SettingQuantity, limits: readonly LabLimit[]): Bound 
 function adviceOf(fact: SettingFact, { row, value }: Bound): Advice | null {
 	if (leftAlone.test(fact.value.trim())) return null;
 	const limit = `the lab’s own limit of ${short(row.limit)} ${row.unit}`.trim();
-	const about = { settings: [fact.setting], source: `the lab’s limits table: ${row.source}` };
+	const about = {
+		settings: [fact.setting],
+		source: `the lab’s limits table: ${row.source.replace(/\.$/, '')}`
+	};
 	const number = settingNumber(fact.quantity, fact.value, fact.unit);
 	const set = `${fact.setting} is set to ${written(fact.value, fact.unit)}`;
 	if (!number || number.offset) {
@@ -56,7 +59,7 @@ function adviceOf(fact: SettingFact, { row, value }: Bound): Advice | null {
 		...about,
 		kind: 'over-the-lab-limit',
 		severity: 'warning',
-		words: `${set}, over ${limit} (${row.source}). ${makersLimit}`
+		words: `${set}, over ${limit}. ${makersLimit}`
 	};
 }
 

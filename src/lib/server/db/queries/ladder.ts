@@ -1,13 +1,22 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { ladder, ladderStress, profile, rig, rigRevision, user, workload } from '../schema';
-import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import {
+	behind,
+	containsWords,
+	idsAmong,
+	inArchive,
+	ordered,
+	type ArchiveState,
+	type Way,
+	type Window
+} from '../search';
 
 export interface LadderFilter {
 	q: string;
 	/** Slug of a rig; empty for every rig. */
 	rig: string;
-	state: 'open' | 'archived' | 'all';
+	state: ArchiveState;
 	/** Only rows with a greater id. */
 	after?: number;
 }
@@ -23,19 +32,12 @@ const sorts: Record<LadderSort, Parameters<typeof ordered>[0]> = {
 	tried: [lastAttempt]
 };
 
-const inState = (state: LadderFilter['state']): SQL | undefined =>
-	state === 'all'
-		? undefined
-		: state === 'archived'
-			? isNotNull(ladder.archivedAt)
-			: isNull(ladder.archivedAt);
-
 const matching = ({ q, rig: rigSlug, state, after }: LadderFilter) =>
 	and(
 		behind(ladder.id, after),
 		containsWords(q, [ladder.name, ladder.slug, rig.name, profile.name]),
 		rigSlug === '' ? undefined : eq(rig.slug, rigSlug),
-		inState(state)
+		inArchive(ladder.archivedAt, state)
 	);
 
 const columns = {

@@ -1,23 +1,34 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNull, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { suite, suiteWorkload, workload } from '../schema';
-import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import {
+	behind,
+	containsWords,
+	idsAmong,
+	inArchive,
+	ordered,
+	type ArchiveState,
+	type Way,
+	type Window
+} from '../search';
 
 export interface SuiteFilter {
 	q: string;
 	/** Only rows with a greater id. */
 	after?: number;
-	state: 'open' | 'archived' | 'all';
+	state: ArchiveState;
 }
 
 export type SuiteSort = 'id' | 'name' | 'newest';
 
 const sorts = { id: [], name: [suite.name], newest: [suite.createdAt] } as const;
 
-const states = { open: isNull(suite.archivedAt), archived: isNotNull(suite.archivedAt), all: undefined };
-
 const matching = ({ q, state, after }: SuiteFilter) =>
-	and(behind(suite.id, after), containsWords(q, [suite.name, suite.slug, suite.purpose]), states[state]);
+	and(
+		behind(suite.id, after),
+		containsWords(q, [suite.name, suite.slug, suite.purpose]),
+		inArchive(suite.archivedAt, state)
+	);
 
 export const list = (db: Db, filter: SuiteFilter & { sort: SuiteSort; way: Way } & Window) =>
 	db

@@ -1,13 +1,22 @@
-import { and, asc, count, eq, inArray, isNotNull, isNull, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, or, sql } from 'drizzle-orm';
 import type { Db } from '../client';
 import { profile, rig, rigRevision, sweep, user, workload } from '../schema';
-import { behind, containsWords, idsAmong, ordered, type Way, type Window } from '../search';
+import {
+	behind,
+	containsWords,
+	idsAmong,
+	inArchive,
+	ordered,
+	type ArchiveState,
+	type Way,
+	type Window
+} from '../search';
 
 export interface SweepFilter {
 	q: string;
 	/** Slug of a rig; empty for every rig. */
 	rig: string;
-	state: 'open' | 'archived' | 'all';
+	state: ArchiveState;
 	/** Only rows with a greater id. */
 	after?: number;
 }
@@ -23,15 +32,12 @@ const sorts: Record<SweepSort, Parameters<typeof ordered>[0]> = {
 	driven: [lastPass]
 };
 
-const inState = (state: SweepFilter['state']): SQL | undefined =>
-	state === 'all' ? undefined : state === 'archived' ? isNotNull(sweep.archivedAt) : isNull(sweep.archivedAt);
-
 const matching = ({ q, rig: rigSlug, state, after }: SweepFilter) =>
 	and(
 		behind(sweep.id, after),
 		containsWords(q, [sweep.name, sweep.slug, rig.name, profile.name, workload.name]),
 		rigSlug === '' ? undefined : eq(rig.slug, rigSlug),
-		inState(state)
+		inArchive(sweep.archivedAt, state)
 	);
 
 const columns = {

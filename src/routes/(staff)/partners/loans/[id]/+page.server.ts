@@ -62,6 +62,7 @@ export const actions = {
 	}),
 	lift: guarded('loan.edit', async (event: Event, ctx) => {
 		const { form, value } = await readForm(event.request, embargoLift, blankLift, 'lift');
+		form.id = `lift-${form.data.embargo}`;
 		if (!value) return refuseForm(form);
 		const lifted = await liftEmbargo(ctx, loanId(event), value);
 		return lifted.ok ? { form } : refusedForm(form, lifted);

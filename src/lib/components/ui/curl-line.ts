@@ -13,3 +13,17 @@ export const curlLine = (origin: string, path: string, body: unknown): string =>
 		'  -H "Idempotency-Key: $(uuidgen)"',
 		`  -d ${quoted(JSON.stringify(body))}`
 	].join(' \\\n');
+
+const isBlank = (value: unknown): boolean => value === '' || value === null || value === undefined;
+
+/**
+ * What a form holds, as a script would send it: fields left blank are left out, as the API takes its own value for them.
+ * @example filledIn({ name: 'first', slug: '' }) // { name: 'first' }
+ */
+export function filledIn(value: unknown): unknown {
+	if (Array.isArray(value)) return value.map(filledIn);
+	if (value === null || typeof value !== 'object') return value;
+	return Object.fromEntries(
+		Object.entries(value).flatMap(([name, field]) => (isBlank(field) ? [] : [[name, filledIn(field)]]))
+	);
+}

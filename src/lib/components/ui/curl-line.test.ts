@@ -1,6 +1,6 @@
 import { execFileSync } from 'node:child_process';
 import { describe, expect, it } from 'vitest';
-import { curlLine } from './curl-line';
+import { curlLine, filledIn } from './curl-line';
 
 /** What a POSIX shell hands to curl: sh itself is the reference (POSIX.1-2017, Shell Command Language, 2.2). */
 const handed = (line: string): string[] =>
@@ -28,5 +28,21 @@ describe('the line for a shell', () => {
 			'-d',
 			JSON.stringify(body)
 		]);
+	});
+});
+
+describe('what a form would send', () => {
+	it('leaves blank fields out, also in its lines, and keeps nought, no and an empty list', () => {
+		expect(
+			filledIn({
+				name: 'first',
+				slug: '',
+				count: 0,
+				sure: false,
+				note: null,
+				lines: [{ workload: 'render', minutes: '' }],
+				none: []
+			})
+		).toEqual({ name: 'first', count: 0, sure: false, lines: [{ workload: 'render' }], none: [] });
 	});
 });

@@ -12,6 +12,8 @@ export interface Described {
 	summary: string;
 	/** What the API reads from JSON. */
 	body?: z.ZodType;
+	/** Types of a file that is the body itself. */
+	upload?: string[];
 	/** An object schema of the query string. */
 	query?: z.ZodObject;
 	response: z.ZodType;
@@ -56,6 +58,8 @@ const partsOf = (operations: Described[]): Json =>
 	) as Json;
 
 const content = (schema: Json, type = 'application/json') => ({ [type]: { schema } });
+const uploadContent = (types: string[]) =>
+	Object.assign({}, ...types.map((type) => content({}, type))) as Json;
 const problemRef = (description: string) => ({
 	description,
 	content: content({ $ref: '#/components/schemas/Problem' }, 'application/problem+json')
@@ -110,7 +114,7 @@ function responsesOf({ method, act, body, query, path, response, status = 200 }:
 const scopeOf = (act: Act) => ('scope' in policy[act] ? policy[act].scope : undefined);
 
 function operationOf(described: Described) {
-	const { method, path, act, summary, body, query } = described;
+	const { method, path, act, summary, body, upload, query } = described;
 	const scope = act === 'public' ? undefined : scopeOf(act);
 	return {
 		operationId: `${method} ${path.replace('/api/v1', '')}`.replace(/\W+(\w?)/g, (_, next: string) =>
@@ -122,9 +126,10 @@ function operationOf(described: Described) {
 		parameters: [
 			...pathParameters(path),
 			...queryParameters(query),
-			...(method === 'post' ? [idempotencyHeader] : [])
+			...(method === 'post' && !upload ? [idempotencyHeader] : [])
 		],
 		...(body ? { requestBody: { required: true, content: content(jsonSchema(body, 'input')) } } : {}),
+		...(upload ? { requestBody: { required: true, content: uploadContent(upload) } } : {}),
 		responses: responsesOf(described)
 	};
 }

@@ -1,16 +1,16 @@
 import { and, desc, eq, isNull, max } from 'drizzle-orm';
 import type { Db } from '../client';
-import { edition, editionPart, editionResult, plate, user } from '../schema';
+import { edition, editionPart, editionPicture, editionResult, plate, user } from '../schema';
 
 export type NewEdition = Omit<typeof edition.$inferInsert, 'id' | 'number' | 'publishedAt'>;
 export type NewPlate = Omit<typeof plate.$inferInsert, 'editionId'>;
 export type NewResult = Omit<typeof editionResult.$inferInsert, 'id' | 'editionId'>;
 
-/** Writes an edition with its plates, results and parts; call it while the article's row is locked. Returns its id and number. */
+/** Writes an edition with its plates, pictures, results and parts; call it while the article's row is locked. Returns its id and number. */
 export async function insert(
 	db: Db,
 	row: NewEdition,
-	parts: { plates: NewPlate[]; results: NewResult[]; partIds: number[] }
+	parts: { plates: NewPlate[]; pictures: string[]; results: NewResult[]; partIds: number[] }
 ): Promise<{ id: number; number: number }> {
 	const [last] = await db
 		.select({ number: max(edition.number) })
@@ -25,6 +25,8 @@ export async function insert(
 	const editionId = created.id;
 	if (parts.plates.length > 0)
 		await db.insert(plate).values(parts.plates.map((one) => ({ ...one, editionId })));
+	if (parts.pictures.length > 0)
+		await db.insert(editionPicture).values(parts.pictures.map((sha256) => ({ editionId, sha256 })));
 	if (parts.results.length > 0)
 		await db.insert(editionResult).values(parts.results.map((one) => ({ ...one, editionId })));
 	if (parts.partIds.length > 0)

@@ -196,7 +196,11 @@ export const access: Record<string, Record<string, Need>> = {
 		'?/unschedule': 'article.schedule',
 		'?/withdraw': 'article.withdraw'
 	},
-	'/(staff)/desk/articles/[slug]/revisions': { load: 'article.read', '?/restore': 'article.edit' },
+	'/(staff)/desk/articles/[slug]/revisions': {
+		load: 'article.read',
+		'?/restore': 'article.edit',
+		'?/name': 'article.edit'
+	},
 	'/(staff)/desk/articles/[slug]/save': { POST: 'article.edit' },
 	'/(staff)/desk/new': { load: 'article.create', '?/default': 'article.create' },
 	'/(staff)/partners': { load: 'partner.read' },

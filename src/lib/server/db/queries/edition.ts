@@ -38,6 +38,25 @@ export async function insert(
 export const byId = async (db: Db, id: number) =>
 	(await db.select().from(edition).where(eq(edition.id, id)).limit(1))[0];
 
+/** An edition of an article by its number, with what it froze and who approved it. */
+export const byNumber = async (db: Db, articleId: number, number: number) =>
+	(
+		await db
+			.select({
+				number: edition.number,
+				title: edition.title,
+				standfirst: edition.standfirst,
+				source: edition.source,
+				page: edition.page,
+				approvedAt: edition.approvedAt,
+				approvedByName: user.name
+			})
+			.from(edition)
+			.innerJoin(user, eq(user.id, edition.approvedBy))
+			.where(and(eq(edition.articleId, articleId), eq(edition.number, number)))
+			.limit(1)
+	)[0];
+
 /** The editions of an article without their pages, the newest first. */
 export const listOf = (db: Db, articleId: number) =>
 	db

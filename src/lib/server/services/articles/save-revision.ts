@@ -1,4 +1,5 @@
 import { after, closedWords } from '../../../domain/articles/stage';
+import { wholeText, wordsBetween } from '../../../domain/articles/revisions/words-between';
 import * as mails from '../../../domain/mail/article-handover';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
@@ -84,7 +85,7 @@ export async function saveRevisionIn(
 			{ detail: { number, title, standfirst, source, savedAt, savedByName } satisfies NewerRevision }
 		);
 	}
-	return done(await write(ctx, tx, row, stage, input, note));
+	return done(await write(ctx, tx, row, stage, input, note, head));
 }
 
 async function write(
@@ -93,9 +94,11 @@ async function write(
 	row: ArticleRow,
 	stage: ArticleRow['stage'],
 	input: RevisionSave,
-	note: string
+	note: string,
+	head: Pick<RevisionSave, 'title' | 'standfirst' | 'source'>
 ): Promise<Saved> {
 	const number = row.head + 1;
+	const words = wordsBetween(wholeText(head), wholeText(input));
 	const { title, standfirst, source } = input;
 	await revisions.insert(tx, {
 		articleId: row.id,
@@ -105,7 +108,9 @@ async function write(
 		source,
 		savedBy: ctx.actor.id,
 		savedAt: ctx.now,
-		note
+		note,
+		wordsAdded: words.added,
+		wordsRemoved: words.removed
 	});
 	await articles.update(tx, row.id, row.version, {
 		title,

@@ -1,4 +1,5 @@
 import { fillTemplate } from '../../../domain/articles/fill-template';
+import { wholeText, wordsBetween } from '../../../domain/articles/revisions/words-between';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { isReserved, slugOf } from '../../../domain/shared/slug';
@@ -57,12 +58,13 @@ export async function startArticle(
 				updatedAt: ctx.now
 			});
 			await articles.setCampaigns(tx, id, ids);
+			const text = { title: input.title, standfirst, source: fillTemplate(template.body, data) };
 			await revisions.insert(tx, {
 				articleId: id,
 				number: 1,
-				title: input.title,
-				standfirst,
-				source: fillTemplate(template.body, data),
+				...text,
+				wordsAdded: wordsBetween('', wholeText(text)).added,
+				wordsRemoved: 0,
 				savedBy: ctx.actor.id,
 				savedAt: ctx.now,
 				note: 'from the template'

@@ -179,6 +179,7 @@ export const access: Record<string, Record<string, Need>> = {
 	},
 	'/(staff)/desk/articles/[slug]/plates': { POST: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates/[file]': { GET: 'article.read' },
+	'/(staff)/desk/articles/[slug]/presence': { POST: 'article.edit' },
 	'/(staff)/desk/articles/[slug]/review': {
 		load: 'article.read',
 		'?/approve': 'article.approve',

@@ -81,6 +81,14 @@ export const revisionsQuery = z.object({
 });
 export type RevisionsQuery = z.output<typeof revisionsQuery>;
 
+/** What an open editor says of its person. */
+export const presenceSaid = z.object({
+	/** Null while they only look. */
+	lastKeyAgoS: z.number().int().min(0).max(1_000_000).nullable().default(null),
+	leaving: z.boolean().default(false)
+});
+export type PresenceSaid = z.output<typeof presenceSaid>;
+
 export const campaignsChoice = z.object({ version, campaigns });
 export type CampaignsChoice = z.output<typeof campaignsChoice>;
 

@@ -34,6 +34,8 @@ export interface NewerRevision {
 	source: string;
 	savedAt: Date;
 	savedByName: string;
+	/** The revision that both were written on, to put the two together by; null where there is none of that number. */
+	base: Pick<RevisionSave, 'title' | 'standfirst' | 'source'> | null;
 }
 
 /**
@@ -79,13 +81,19 @@ export async function saveRevisionIn(
 		});
 	if (row.head !== input.basedOn) {
 		const { number, title, standfirst, source, savedAt, savedByName } = head;
+		const base = await baseOf(tx, row.id, input.basedOn);
 		return refuse(
 			'conflict',
 			`${savedByName} saved revision ${number} after you began from revision ${input.basedOn}. Yours is not saved yet, and nothing of it is lost: choose what to keep.`,
-			{ detail: { number, title, standfirst, source, savedAt, savedByName } satisfies NewerRevision }
+			{ detail: { number, title, standfirst, source, savedAt, savedByName, base } satisfies NewerRevision }
 		);
 	}
 	return done(await write(ctx, tx, row, stage, input, note, head));
+}
+
+async function baseOf(tx: Transaction, articleId: number, number: number): Promise<NewerRevision['base']> {
+	const found = await revisions.byNumber(tx, articleId, number);
+	return found ? { title: found.title, standfirst: found.standfirst, source: found.source } : null;
 }
 
 async function write(

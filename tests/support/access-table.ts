@@ -177,6 +177,8 @@ export const access: Record<string, Record<string, Need>> = {
 		'?/submit': 'article.submit',
 		'?/campaigns': 'article.edit'
 	},
+	'/(staff)/desk/articles/[slug]/export': { GET: 'article.read' },
+	'/(staff)/desk/articles/[slug]/import': { load: 'article.edit', '?/default': 'article.edit' },
 	'/(staff)/desk/articles/[slug]/plates': { POST: 'article.read' },
 	'/(staff)/desk/articles/[slug]/plates/[file]': { GET: 'article.read' },
 	'/(staff)/desk/articles/[slug]/presence': { POST: 'article.edit' },
@@ -203,6 +205,7 @@ export const access: Record<string, Record<string, Need>> = {
 		'?/name': 'article.edit'
 	},
 	'/(staff)/desk/articles/[slug]/save': { POST: 'article.edit' },
+	'/(staff)/desk/new/import': { load: 'article.create', '?/default': 'article.create' },
 	'/(staff)/desk/new': { load: 'article.create', '?/default': 'article.create' },
 	'/(staff)/partners': { load: 'partner.read' },
 	'/(staff)/partners/[slug]': { load: 'partner.read', '?/edit': 'partner.edit' },

@@ -5,7 +5,7 @@ import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 /** What stands at the head of an article's file. */
 export interface FrontMatter {
 	title?: string;
-	standfirst: string;
+	standfirst?: string;
 	template?: string;
 	campaigns: string[];
 	tags: string[];
@@ -26,7 +26,7 @@ const names = z
 const words = z.string('Write text here, in quotes where it begins with a sign.').trim();
 const shape = z.object({
 	title: words.max(200, 'Keep the title to 200 characters.').optional(),
-	standfirst: words.max(500, 'Keep the standfirst to 500 characters.').default(''),
+	standfirst: words.max(500, 'Keep the standfirst to 500 characters.').optional(),
 	template: words.max(60).optional(),
 	campaigns: names,
 	tags: names

@@ -1,17 +1,14 @@
 import { fillTemplate } from '../../../domain/articles/fill-template';
-import { wholeText, wordsBetween } from '../../../domain/articles/revisions/words-between';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
 import { isReserved, slugOf } from '../../../domain/shared/slug';
 import type { ArticleStart } from '../../../schemas/article';
 import type { Context } from '../../context';
 import { inTransaction, isDuplicate } from '../../db/client';
-import * as articles from '../../db/queries/article';
-import * as audit from '../../db/queries/audit';
 import * as campaigns from '../../db/queries/campaign-choice';
-import * as revisions from '../../db/queries/revision';
 import { templateOf } from '../../rendering/templates';
 import { articleData } from './article-data';
+import { createArticle } from './create-article';
 
 const taken = 'Another article has this title, or one that makes the same address. Choose another.';
 
@@ -46,39 +43,12 @@ export async function startArticle(
 			const data = await articleData({ db: tx, now: ctx.now }, ids);
 			// The template's own standfirst tells the writer what to say; in print it would say nothing.
 			const standfirst = '';
-			const id = await articles.insert(tx, {
-				slug,
-				title: input.title,
-				standfirst,
-				template: input.template,
-				stage: 'drafting',
-				authorId: ctx.actor.id,
-				head: 1,
-				createdAt: ctx.now,
-				updatedAt: ctx.now
+			const source = fillTemplate(template.body, data);
+			await createArticle(ctx, tx, {
+				...{ slug, title: input.title, standfirst, template: input.template, source, campaignIds: ids },
+				note: 'from the template',
+				log: { campaigns: input.campaigns }
 			});
-			await articles.setCampaigns(tx, id, ids);
-			const text = { title: input.title, standfirst, source: fillTemplate(template.body, data) };
-			await revisions.insert(tx, {
-				articleId: id,
-				number: 1,
-				...text,
-				wordsAdded: wordsBetween('', wholeText(text)).added,
-				wordsRemoved: 0,
-				savedBy: ctx.actor.id,
-				savedAt: ctx.now,
-				note: 'from the template'
-			});
-			await audit.append(tx, [
-				{
-					at: ctx.now,
-					actorId: ctx.actor.id,
-					act: 'article.start',
-					subjectKind: 'article',
-					subjectId: id,
-					after: { slug, title: input.title, template: input.template, campaigns: input.campaigns }
-				}
-			]);
 			return done({ slug });
 		});
 	} catch (error) {

@@ -7,7 +7,7 @@ import * as audit from '../../db/queries/audit';
 import * as pictures from '../../db/queries/picture';
 import {
 	enterPictures,
-	readyPicture,
+	readyPictures,
 	storedOf,
 	subjectOf,
 	type SentPicture,
@@ -25,11 +25,13 @@ export async function storePicture(
 	sent: SentPicture
 ): Promise<Outcome<StoredPicture, 'forbidden' | 'invalid' | 'too_many'>> {
 	if (!may(ctx.actor, 'picture.store')) return refuse('forbidden', notYours);
-	const ready = await readyPicture(ctx, sent);
+	const ready = await readyPictures(ctx, [sent], false);
 	if (!ready.ok) return ready;
-	const { row, known, notes } = ready.value;
+	const [first] = ready.value;
+	if (!first) throw new Error('Of one picture none was made ready.');
+	const { row, known, notes } = first;
 	try {
-		await inTransaction(ctx.db, (tx) => enterPictures(ctx, tx, [ready.value]));
+		await inTransaction(ctx.db, (tx) => enterPictures(ctx, tx, [first]));
 		return done(storedOf(row, known, notes));
 	} catch (error) {
 		// Somebody sent the same file at the same moment.

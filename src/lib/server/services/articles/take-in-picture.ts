@@ -62,26 +62,54 @@ async function keepFiles({ sha256, whole, narrower, standIn }: ProcessedPicture)
 	await store.put(pictureKey(sha256, 'whole'), whole);
 }
 
-/** Makes a picture ready, unless the same file is here already; nothing is entered yet. */
-export async function readyPicture(
+/** Files that one act may bring, so that none holds the decoder for an hour. */
+export const mostPictures = 200;
+
+const hashOf = (bytes: Uint8Array): string => createHash('sha256').update(bytes).digest('hex');
+
+/**
+ * Makes pictures ready, those apart whose file is here already; nothing is entered yet. In the order they were sent. The
+ * first that is no picture refuses them all, by its name unless there is but one to mean.
+ */
+export async function readyPictures(
 	ctx: Context,
-	{ bytes, fileName, alt, credit }: SentPicture
-): Promise<Outcome<ReadyPicture, 'invalid' | 'too_many'>> {
-	const uploadSha256 = createHash('sha256').update(bytes).digest('hex');
-	const there = await pictures.byHash(ctx.db, uploadSha256);
-	if (there) return done({ row: there, known: true, notes: [] });
-	const made = await processPicture(bytes);
-	if (!made.ok) return made;
-	const { sha256, width, height, fallback, whole, notes } = made.value;
-	const same = await pictures.byHash(ctx.db, sha256);
-	if (same) return done({ row: same, known: true, notes });
-	await keepFiles(made.value);
-	const row = {
-		...{ sha256, uploadSha256, width, height, fallback },
-		...{ mime: 'image/webp', bytes: whole.byteLength, alt, credit, fileName: fileName.slice(0, 200) },
-		...{ storedBy: ctx.actor.id, storedAt: ctx.now }
-	};
-	return done({ row, known: false, notes });
+	sent: SentPicture[],
+	named = true
+): Promise<Outcome<ReadyPicture[], 'invalid' | 'too_many'>> {
+	const uploads = sent.map(({ bytes }) => hashOf(bytes));
+	const there = await pictures.byHashes(ctx.db, uploads);
+	const rowOf = (rows: pictures.PictureRow[], hash: string) =>
+		rows.find((row) => row.sha256 === hash || row.uploadSha256 === hash);
+	const made = new Map<string, ProcessedPicture>();
+	for (const [index, { bytes, fileName }] of sent.entries()) {
+		const hash = uploads[index] ?? '';
+		if (rowOf(there, hash) || made.has(hash)) continue;
+		const one = await processPicture(bytes);
+		if (!one.ok) return !named ? one : { ...one, message: `“${fileName}”: ${one.message}` };
+		made.set(hash, one.value);
+	}
+	const same = await pictures.byHashes(
+		ctx.db,
+		[...made.values()].map((one) => one.sha256)
+	);
+	await Promise.all([...made.values()].filter((one) => !rowOf(same, one.sha256)).map(keepFiles));
+	return done(
+		sent.map(({ fileName, alt, credit }, index): ReadyPicture => {
+			const upload = uploads[index] ?? '';
+			const processed = made.get(upload);
+			const known = rowOf(there, upload) ?? rowOf(same, processed?.sha256 ?? '');
+			const notes = processed?.notes ?? [];
+			if (known) return { row: known, known: true, notes };
+			if (!processed) throw new Error('A picture was neither here nor made.');
+			const { sha256, width, height, fallback, whole } = processed;
+			const row = {
+				...{ sha256, uploadSha256: upload, width, height, fallback },
+				...{ mime: 'image/webp', bytes: whole.byteLength, alt, credit, fileName: fileName.slice(0, 200) },
+				...{ storedBy: ctx.actor.id, storedAt: ctx.now }
+			};
+			return { row, known: false, notes };
+		})
+	);
 }
 
 /** A picture in the audit log: its hash, as much as fits there. */

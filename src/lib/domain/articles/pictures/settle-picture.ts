@@ -17,7 +17,7 @@ const wordsOf = ({ text, title }: Image) => ({ alt: text.trim(), title: title ||
 export function pictureOf(
 	token: object,
 	known: Known
-): { html: string; problem?: undefined } | { problem: string } | undefined {
+): { html: string; problem?: undefined } | { html?: undefined; problem: string } | undefined {
 	const image = token as Image;
 	const sha256 = pictureAt(image.href ?? '');
 	if (sha256 !== null && known.missingPictures?.includes(sha256))

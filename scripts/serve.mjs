@@ -8,8 +8,8 @@ const noticeMs = Number(process.env.SHUTDOWN_NOTICE_MS || 0);
 const host = process.env.HOST || '127.0.0.1';
 const port = Number(process.env.PORT || 3000);
 process.env.ORIGIN ||= `http://localhost:${port}`;
-// Uploads have routes and limits of their own; forms and JSON stay small.
-process.env.BODY_SIZE_LIMIT ||= '2M';
+// The largest upload; each route has a limit of its own under it, and forms and JSON stay small (http/body-limit.ts).
+process.env.BODY_SIZE_LIMIT ||= '64M';
 if (Number(process.env.PROXY_DEPTH) > 0) {
 	process.env.ADDRESS_HEADER ||= 'x-forwarded-for';
 	process.env.XFF_DEPTH ||= process.env.PROXY_DEPTH;

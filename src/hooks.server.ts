@@ -7,6 +7,7 @@ import { identify } from '$lib/server/auth/identify';
 import { clock } from '$lib/server/clock';
 import { env } from '$lib/server/env';
 import { apiProblems } from '$lib/server/http/api-problems';
+import { bodyLimit } from '$lib/server/http/body-limit';
 import { requestLog } from '$lib/server/http/request-log';
 import { sameOrigin } from '$lib/server/http/same-origin';
 import { securityHeaders } from '$lib/server/http/security-headers';
@@ -31,6 +32,7 @@ export const handle = sequence(
 	requestLog,
 	securityHeaders,
 	sameOrigin,
+	bodyLimit,
 	theme,
 	authHandle,
 	identify,

@@ -74,8 +74,8 @@ test('two people who save at once lose nothing: the second is shown the differen
 	await expect(one.getByText(/Saved \d\d:\d\d.*revision/)).toBeVisible();
 	await write(two, 'Second words.');
 	await expect(two.getByText(/newer revision/).first()).toBeVisible();
-	const conflict = two.getByRole('alert').filter({ hasText: 'Two of you changed this text' });
-	await expect(conflict.locator('del').filter({ hasText: 'First' })).toBeVisible();
+	const conflict = two.getByRole('region', { name: 'Two of you changed this text' });
+	await expect(conflict.locator('ins').filter({ hasText: 'First' })).toBeVisible();
 	await expect(conflict.locator('ins').filter({ hasText: 'Second' })).toBeVisible();
 	await expect(two.locator('.cm-content')).toContainText('Second words.');
 	await Promise.all([one.context().close(), two.context().close()]);

@@ -46,12 +46,48 @@ export type RevisionSave = z.output<typeof revisionSave>;
 export const revisionRestore = z.object({ number: revisionNumber, basedOn: revisionNumber });
 export type RevisionRestore = z.output<typeof revisionRestore>;
 
+/** A name to find a revision by; empty takes it away. */
+export const revisionName = z.object({
+	number: revisionNumber,
+	label: z.string().trim().max(80, 'Keep the name to 80 characters.').default('')
+});
+export type RevisionName = z.output<typeof revisionName>;
+
+/** One of two texts that are compared: a revision by its number, or an edition as `e` and its number. */
+export interface Side {
+	kind: 'revision' | 'edition';
+	number: number;
+}
+const side = z
+	.string()
+	.regex(/^e?[1-9]\d{0,8}$/)
+	.transform((text): Side => ({
+		kind: text.startsWith('e') ? 'edition' : 'revision',
+		number: Number(text.replace('e', ''))
+	}))
+	.nullable()
+	.default(null);
+
 /** Which revisions to list and which two to compare; the newest and the one before it when left out. */
 export const revisionsQuery = z.object({
 	page: z.coerce.number().int().min(1).max(10_000).default(1),
-	from: z.coerce.number().int().min(1).nullable().default(null),
-	to: z.coerce.number().int().min(1).nullable().default(null)
+	from: side,
+	to: side,
+	view: z.enum(['page', 'source']).default('page'),
+	/** Unchanged parts of the page too. */
+	all: z.stringbool().default(false),
+	named: z.stringbool().default(false),
+	q: z.string().trim().max(80).default('')
 });
+export type RevisionsQuery = z.output<typeof revisionsQuery>;
+
+/** What an open editor says of its person. */
+export const presenceSaid = z.object({
+	/** Null while they only look. */
+	lastKeyAgoS: z.number().int().min(0).max(1_000_000).nullable().default(null),
+	leaving: z.boolean().default(false)
+});
+export type PresenceSaid = z.output<typeof presenceSaid>;
 
 export const campaignsChoice = z.object({ version, campaigns });
 export type CampaignsChoice = z.output<typeof campaignsChoice>;

@@ -31,7 +31,8 @@ const schema = z.object({
 	SHUTDOWN_TIMEOUT_MS: z.coerce.number('is not a number').int().min(0).max(600_000).default(20_000),
 	/** How long `/readyz` says no before the port closes, for a load balancer to notice. */
 	SHUTDOWN_NOTICE_MS: z.coerce.number('is not a number').int().min(0).max(600_000).default(0),
-	BODY_SIZE_LIMIT: z.string().default('2M'),
+	/** The largest body of any kind; what a route takes is less. */
+	BODY_SIZE_LIMIT: z.string().default('64M'),
 	/** Reverse proxies to trust for the visitor's address; 0 when people connect directly. */
 	PROXY_DEPTH: z.coerce.number('is not a number').int().min(0).max(5).default(0)
 });

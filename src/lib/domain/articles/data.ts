@@ -5,6 +5,7 @@ import type { SweepFacts } from '../bench/stability/sweep-facts';
 import type { Advice } from '../bench/tuning/advice';
 import type { SettingQuantity } from '../bench/words';
 import type { EmbargoField, PartKind, Provenance } from '../stores/words';
+import type { PictureFacts } from './pictures/picture';
 
 /** One setting of a profile, with the value of the stock profile beside it where stock has one. */
 export interface SettingFact {
@@ -89,6 +90,10 @@ export interface ArticleData {
 	sweeps?: SweepFacts[];
 	/** Stock of those rigs over time, workload by workload; left out of older editions as well. */
 	drifts?: DriftFacts[];
+	/** The stored pictures that the text names; one that is in neither list is printed without its size. */
+	pictures?: PictureFacts[];
+	/** Hashes that the text names and the store does not have. */
+	missingPictures?: string[];
 	/** The publication's zone for the dates it prints, such as Europe/Oslo. */
 	zone: string;
 }

@@ -4,7 +4,7 @@ import { element, escapeHtml } from './html';
 import { isSafeLink, relOf } from './links';
 
 /** A token with the line it starts on, from 1, and what was settled about it before printing. */
-export type Placed = Token & { line?: number; id?: string; refused?: string };
+export type Placed = Token & { line?: number; id?: string; refused?: string; printed?: string };
 
 const at = (token: object): number | undefined => (token as { line?: number }).line;
 
@@ -28,6 +28,9 @@ marked.use({
 			return element(tag, { id, 'data-line': at(token) }, this.parser.parseInline(token.tokens));
 		},
 		paragraph(token) {
+			// A picture alone in its paragraph is a figure, which must not stand in one.
+			const { printed } = token as Placed;
+			if (printed !== undefined) return printed;
 			return element('p', { 'data-line': at(token) }, this.parser.parseInline(token.tokens));
 		},
 		blockquote(token) {
@@ -84,8 +87,9 @@ marked.use({
 			);
 		},
 		image(token) {
-			const { refused } = token as Placed;
-			if (refused !== undefined) return refused;
+			const { refused, printed } = token as Placed;
+			const settled = refused ?? printed;
+			if (settled !== undefined) return settled;
 			const title = token.title ? ` title="${escapeHtml(token.title)}"` : '';
 			return `<img src="${escapeHtml(token.href)}" alt="${escapeHtml(token.text)}"${title} loading="lazy">`;
 		},

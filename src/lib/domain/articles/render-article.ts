@@ -7,6 +7,7 @@ import { isSafeLink, isSameSitePath } from './links';
 import { refusalOf } from './limits';
 import { eachToken, parseMarkdown, printInside, printMarkdown, type Placed } from './markdown';
 import { countWords, plainText } from './plain-text';
+import { pictureOf, pictureOfParagraph } from './pictures/settle-picture';
 import { plateKey, type PlateSpec } from './plates/spec';
 import { runDirective } from './run-directive';
 import { slugOf } from '../shared/slug';
@@ -94,6 +95,7 @@ class Setting {
 		if (isDirective(token)) this.directive(token, token.line ?? 1);
 		else if (token.type === 'heading') this.heading(token);
 		else if (token.type === 'image') this.image(token);
+		else if (token.type === 'paragraph') token.printed = pictureOfParagraph(token, this.data);
 		else if (token.type === 'link' && !isSafeLink(String(token.href))) {
 			token.refused = this.fault(token, 'link', {
 				message:
@@ -125,7 +127,9 @@ class Setting {
 			: (token.text ?? '').trim() === ''
 				? 'This image has no text for those who cannot see it. Write it between the square brackets.'
 				: null;
-		if (problem !== null) token.refused = this.fault(token, 'image', { message: problem, nearest: [] });
+		const set = problem === null ? pictureOf(token, this.data) : { problem };
+		if (set?.problem) token.refused = this.fault(token, 'image', { message: set.problem, nearest: [] });
+		else token.printed = set?.html;
 	}
 
 	private directive(token: DirectiveToken, line: number): void {

@@ -23,7 +23,9 @@ export const sanitiseConfig = {
 			'strong',
 			'del',
 			'a',
-			'img'
+			'img',
+			'picture',
+			'source'
 		],
 		...['ul', 'ol', 'li', 'table', 'caption', 'thead', 'tbody', 'tfoot', 'tr', 'th', 'td'],
 		...['figure', 'figcaption', 'details', 'summary', 'aside', 'section', 'div', 'span'],
@@ -39,7 +41,11 @@ export const sanitiseConfig = {
 			'rel',
 			'src',
 			'alt',
+			'srcset',
+			'sizes',
+			'type',
 			'loading',
+			'decoding',
 			'start',
 			'scope',
 			'colspan',
@@ -84,6 +90,9 @@ export const sanitiseConfig = {
 	SANITIZE_DOM: true
 } satisfies Config;
 
+const candidate = String.raw`\/pictures\/[0-9a-f]{64}\.webp(?:\?w=\d{1,5})? \d{1,5}w`;
+const storedPictures = new RegExp(`^${candidate}(?:, ${candidate}){0,5}$`);
+
 const paint = /^(?:none|currentcolor|var\(--color-[a-z-]+\))$/i;
 
 /**
@@ -93,6 +102,8 @@ const paint = /^(?:none|currentcolor|var\(--color-[a-z-]+\))$/i;
 export function mayStay(tag: string, name: string, value: string): boolean {
 	if (name === 'href') return isSafeLink(value) || /^plates\/[\w.-]+$/.test(value);
 	if (name === 'src') return tag === 'img' && isSameSitePath(value) && value.startsWith('/');
+	if (name === 'srcset') return tag === 'source' && storedPictures.test(value);
+	if (name === 'type') return tag === 'source' && value === 'image/webp';
 	if (name === 'fill' || name === 'stroke') return paint.test(value);
 	return true;
 }

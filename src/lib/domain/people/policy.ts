@@ -32,6 +32,8 @@ export const policy = {
 	'loan.duties': { roles: ['liaison', 'editor', 'writer'] },
 	'usage.read': { roles: ['liaison', 'editor', 'writer', 'tester'] },
 
+	'picture.store': { roles: ['tester', 'writer', 'editor'], scope: 'pictures:write' },
+
 	'article.read': { roles: desk },
 	'article.create': { roles: ['writer', 'editor'] },
 	'article.edit': { roles: ['editor'], author: 'also' },

@@ -11,5 +11,5 @@ export interface Actor {
 	scopes?: readonly Scope[];
 }
 
-export const scopes = ['bench:read', 'bench:write', 'stores:read', 'stores:write'] as const;
+export const scopes = ['bench:read', 'bench:write', 'stores:read', 'stores:write', 'pictures:write'] as const;
 export type Scope = (typeof scopes)[number];

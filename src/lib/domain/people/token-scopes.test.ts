@@ -5,8 +5,14 @@ import { scopesOf } from './token-scopes';
 import { isZone } from './zone';
 
 it('offers a role the scopes that can do something for it', () => {
-	expect(scopesOf(['tester'])).toEqual(['bench:read', 'bench:write', 'stores:read', 'stores:write']);
-	expect(scopesOf(['writer'])).toEqual(['bench:read', 'stores:read']);
+	expect(scopesOf(['tester'])).toEqual([
+		'bench:read',
+		'bench:write',
+		'stores:read',
+		'stores:write',
+		'pictures:write'
+	]);
+	expect(scopesOf(['writer'])).toEqual(['bench:read', 'stores:read', 'pictures:write']);
 	expect(scopesOf(['liaison'])).toEqual(['stores:read', 'stores:write']);
 	expect(scopesOf([])).toEqual([]);
 });

@@ -13,5 +13,6 @@ export const scopeWords: Record<Scope, string> = {
 	'bench:read': 'read workloads, rigs, profiles, campaigns and figures',
 	'bench:write': 'plan campaigns and send readings',
 	'stores:read': 'read parts and samples',
-	'stores:write': 'add and change parts and samples'
+	'stores:write': 'add and change parts and samples',
+	'pictures:write': 'put pictures in for articles'
 };

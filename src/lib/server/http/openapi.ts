@@ -12,6 +12,8 @@ export interface Described {
 	summary: string;
 	/** What the API reads from JSON. */
 	body?: z.ZodType;
+	/** Types of a file that is the body itself. */
+	upload?: string[];
 	/** An object schema of the query string. */
 	query?: z.ZodObject;
 	response: z.ZodType;
@@ -56,6 +58,8 @@ const partsOf = (operations: Described[]): Json =>
 	) as Json;
 
 const content = (schema: Json, type = 'application/json') => ({ [type]: { schema } });
+const uploadContent = (types: string[]) =>
+	Object.assign({}, ...types.map((type) => content({}, type))) as Json;
 const problemRef = (description: string) => ({
 	description,
 	content: content({ $ref: '#/components/schemas/Problem' }, 'application/problem+json')
@@ -121,7 +125,7 @@ function responsesOf(
 const scopeOf = (act: Act) => ('scope' in policy[act] ? policy[act].scope : undefined);
 
 function operationOf(described: Described, located: boolean) {
-	const { method, path, act, summary, body, query } = described;
+	const { method, path, act, summary, body, upload, query } = described;
 	const scope = act === 'public' ? undefined : scopeOf(act);
 	return {
 		operationId: `${method} ${path.replace('/api/v1', '')}`.replace(/\W+(\w?)/g, (_, next: string) =>
@@ -133,9 +137,10 @@ function operationOf(described: Described, located: boolean) {
 		parameters: [
 			...pathParameters(path),
 			...queryParameters(query),
-			...(method === 'post' || method === 'put' ? [idempotencyHeader] : [])
+			...((method === 'post' && !upload) || method === 'put' ? [idempotencyHeader] : [])
 		],
 		...(body ? { requestBody: { required: true, content: content(jsonSchema(body, 'input')) } } : {}),
+		...(upload ? { requestBody: { required: true, content: uploadContent(upload) } } : {}),
 		responses: responsesOf(described, located)
 	};
 }

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import type { ArticleData } from '../../domain/articles/data';
 import { plateCsv } from '../../domain/articles/plates/numbers';
+import { picturesIn, type PictureFacts } from '../../domain/articles/pictures/picture';
 import { renderArticle, type Rendered } from '../../domain/articles/render-article';
 import type { PlateSpec } from '../../domain/articles/plates/spec';
 import type { Comparison, Summary } from '../../domain/bench/figures';
@@ -52,13 +53,15 @@ export interface FrozenEdition {
 	page: string;
 	plain: string;
 	plates: FrozenPlate[];
+	/** Hashes of the stored pictures the page shows, in its order. */
+	pictures: string[];
 	/** Cells whose readings the page shows. */
 	results: FrozenResult[];
 	/** Slugs of the parts on the rigs of the campaigns the page shows, for `edition_part`. */
 	partSlugs: string[];
 	/** Names of those who took the readings shown, in the order they first appear. */
 	testerNames: string[];
-	/** SHA-256 over title, standfirst, source, data, page and plates. */
+	/** SHA-256 over title, standfirst, source, data, page, plates and pictures. */
 	hash: string;
 	/** What was found out about the page, errors included: preflight decides what they mean. */
 	facts: Rendered;
@@ -73,16 +76,22 @@ export function canonicalJson(value: unknown): string {
 	);
 }
 
-/** The hash of an edition: SHA-256 in hex, other as soon as any of it is. */
+/**
+ * The hash of an edition: SHA-256 in hex, other as soon as any of it is. Its pictures are in it by the hashes of their
+ * files, which are also their addresses.
+ */
 export function editionHash(
 	edition: Pick<EditionInput, 'title' | 'standfirst' | 'source' | 'data'> & {
 		page: string;
 		plates: FrozenPlate[];
+		/** Left out where there are none, as in editions from before there were any. */
+		pictures?: PictureFacts[];
 	}
 ): string {
 	const { title, standfirst, source, data, page, plates } = edition;
+	const pictures = edition.pictures?.length ? edition.pictures : undefined;
 	return createHash('sha256')
-		.update(canonicalJson({ title, standfirst, source, data, page, plates }))
+		.update(canonicalJson({ title, standfirst, source, data, page, plates, pictures }))
 		.digest('hex');
 }
 
@@ -144,15 +153,18 @@ export function freezeEdition(input: EditionInput): FrozenEdition {
 		svg: standaloneSvg(sanitisePage(drawings.get(spec) ?? drawPlate(spec))),
 		csv: plateCsv(spec)
 	}));
+	const named = picturesIn(page);
+	const pictures = (data.pictures ?? []).filter((one) => named.includes(one.sha256));
 	const shown = data.campaigns.filter((campaign) => facts.uses.campaigns.includes(campaign.slug));
 	return {
 		page,
 		plain: facts.plain,
 		plates,
+		pictures: pictures.map((one) => one.sha256),
 		results: resultsOf(facts, data),
 		partSlugs: [...new Set(shown.flatMap((campaign) => campaign.kit.map((line) => line.part)))],
 		testerNames: testersOf(facts, data),
-		hash: editionHash({ title, standfirst, source, data, page, plates }),
+		hash: editionHash({ title, standfirst, source, data, page, plates, pictures }),
 		facts
 	};
 }

@@ -10,6 +10,15 @@ export interface Theirs extends Draft {
 	number: number;
 	savedAt: string;
 	savedByName: string;
+	/** The revision that both began from; absent from a server that does not say. */
+	base?: Draft | null;
+}
+
+/** A text as it is kept in this browser while it is not saved. */
+export interface Unsaved extends Draft {
+	basedOn: number;
+	/** The text that was sent last and not answered: the server may have it. */
+	sent?: Draft | null;
 }
 
 /** What came of a save. */
@@ -35,7 +44,7 @@ export interface AutosaveOptions {
 	savedAt: string;
 	send: (draft: Draft & { basedOn: number }) => Promise<SaveAnswer>;
 	/** Keeps a text in this browser, or forgets it once it is saved. */
-	keep: (draft: (Draft & { basedOn: number }) | null) => void;
+	keep: (draft: Unsaved | null) => void;
 	onsaved?: (answer: Extract<SaveAnswer, { kind: 'saved' }>) => void;
 	/** After the last key. */
 	delayMs?: number;
@@ -63,6 +72,16 @@ export class Autosave {
 		this.latest = this.stored = options.draft;
 		this.revision = options.revision;
 		this.savedAt = options.savedAt;
+	}
+
+	/** Goes on from a text that this browser kept over a reload. */
+	resume({ basedOn, sent, title, standfirst, source }: Unsaved): void {
+		const head = { ...this.stored };
+		// What was sent and never answered arrived after all.
+		const arrived = sent !== undefined && sent !== null && same(sent, head);
+		if (!arrived) this.revision = basedOn;
+		this.sent = sent ?? null;
+		this.edit({ title, standfirst, source });
 	}
 
 	/** Takes what is in the fields now and saves it once no key came for a while. */
@@ -114,6 +133,12 @@ export class Autosave {
 		if (same(this.latest, this.stored) && this.state === 'typing') this.settle();
 	}
 
+	/** Settles a conflict by a text put together of both, which becomes the next revision over theirs. */
+	async takeMerged(merged: Draft): Promise<void> {
+		this.latest = merged;
+		await this.keepMine();
+	}
+
 	stop(): void {
 		clearTimeout(this.timer);
 	}
@@ -124,7 +149,8 @@ export class Autosave {
 	}
 
 	private keep(): void {
-		this.options.keep({ ...this.latest, basedOn: this.revision });
+		const sent = this.sent && !same(this.sent, this.stored) ? { sent: this.sent } : {};
+		this.options.keep({ ...this.latest, basedOn: this.revision, ...sent });
 	}
 
 	private settle(): void {
@@ -137,14 +163,16 @@ export class Autosave {
 		const draft = this.latest;
 		this.state = 'saving';
 		this.message = '';
+		const before = this.sent;
+		this.sent = draft;
+		this.keep();
 		const answer = await this.options.send({ ...draft, basedOn: this.revision });
-		if (answer.kind === 'conflict' && this.sent && same(answer.theirs, this.sent)) {
+		if (answer.kind === 'conflict' && before && same(answer.theirs, before)) {
 			// "Theirs" is a save of ours whose answer got lost: go on from it.
 			this.revision = answer.theirs.number;
-			this.stored = this.sent;
+			this.stored = before;
 			return this.run();
 		}
-		this.sent = draft;
 		this.take(answer, draft);
 	}
 

@@ -112,10 +112,44 @@ describe('a revision of somebody else', () => {
 		expect(kept()).toBeNull();
 	});
 
+	it('can be put together with ours, which is the next revision over theirs', async () => {
+		const { autosave, sent, kept } = await inConflict([saved(6)]);
+		await autosave.takeMerged({ ...first, source: 'mine and theirs' });
+		expect(sent.at(-1)).toEqual({ ...first, source: 'mine and theirs', basedOn: 5 });
+		expect(autosave).toMatchObject({ state: 'saved', revision: 6, theirs: null });
+		expect(kept()).toBeNull();
+	});
+
+	it('that is overtaken by a third is a conflict again, with nothing lost', async () => {
+		const third = { ...theirs, number: 6, source: 'a third' };
+		const { autosave, kept } = await inConflict([{ kind: 'conflict', theirs: third, message: '' }]);
+		await autosave.takeMerged({ ...first, source: 'mine and theirs' });
+		expect(autosave).toMatchObject({ state: 'conflict', theirs: { number: 6 } });
+		expect(kept()).toMatchObject({ source: 'mine and theirs' });
+	});
+
 	it('can be followed by ours as the next revision', async () => {
 		const { autosave, sent } = await inConflict([saved(6)]);
 		await autosave.keepMine();
 		expect(sent.at(-1)).toEqual({ ...first, source: 'mine', basedOn: 5 });
 		expect(autosave).toMatchObject({ state: 'saved', revision: 6 });
+	});
+});
+
+describe('a page that was closed with a text in it', () => {
+	it('goes on from the revision the text was written on, so that a newer one is seen', async () => {
+		const { autosave, sent } = started([{ kind: 'conflict', theirs, message: '' }]);
+		autosave.resume({ ...first, source: 'kept', basedOn: 3 });
+		await vi.advanceTimersByTimeAsync(1600);
+		expect(sent).toEqual([{ ...first, source: 'kept', basedOn: 3 }]);
+		expect(autosave.state).toBe('conflict');
+	});
+
+	it('knows the newest revision for its own, whose answer got lost, and goes on from there', async () => {
+		const { autosave, sent } = started([saved(5)]);
+		autosave.resume({ ...first, source: 'one and more', basedOn: 3, sent: { ...first } });
+		await vi.advanceTimersByTimeAsync(1600);
+		expect(sent).toEqual([{ ...first, source: 'one and more', basedOn: 4 }]);
+		expect(autosave.state).toBe('saved');
 	});
 });

@@ -1,8 +1,7 @@
-import type { Draft } from './autosave.svelte';
+import type { Unsaved } from './autosave.svelte';
 
 /** A text that was typed in this browser and not saved. */
-export interface KeptDraft extends Draft {
-	basedOn: number;
+export interface KeptDraft extends Unsaved {
 	/** ISO time of the last key. */
 	at: string;
 }
@@ -26,7 +25,7 @@ export function readKept(personId: string, slug: string): KeptDraft | null {
 }
 
 /** Keeps a text, or forgets it with null. A browser that refuses (private window, full) is let be: the save goes on. */
-export function keepDraft(personId: string, slug: string, draft: (Draft & { basedOn: number }) | null): void {
+export function keepDraft(personId: string, slug: string, draft: Unsaved | null): void {
 	try {
 		if (draft === null) localStorage.removeItem(keyOf(personId, slug));
 		else

@@ -13,12 +13,15 @@ const unreachable = (why: string): SaveAnswer => ({
 
 /** Sends a text to be saved as the next revision, and turns whatever comes back into an answer; it never throws. */
 export async function sendRevision(address: string, draft: Draft & { basedOn: number }): Promise<SaveAnswer> {
+	const { title, standfirst, source, basedOn } = draft;
 	let response: Response;
 	try {
 		response = await fetch(address, {
 			method: 'POST',
 			headers: { 'content-type': 'application/json' },
-			body: JSON.stringify(draft)
+			body: JSON.stringify({ title, standfirst, source, basedOn }),
+			// A line that is cut without a word would otherwise hold everything up.
+			signal: AbortSignal.timeout(30_000)
 		});
 	} catch {
 		return unreachable('no connection');

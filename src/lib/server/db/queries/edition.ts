@@ -1,16 +1,16 @@
 import { and, desc, eq, isNull, max } from 'drizzle-orm';
 import type { Db } from '../client';
-import { edition, editionPart, editionResult, plate, user } from '../schema';
+import { edition, editionPart, editionPicture, editionResult, plate, user } from '../schema';
 
 export type NewEdition = Omit<typeof edition.$inferInsert, 'id' | 'number' | 'publishedAt'>;
 export type NewPlate = Omit<typeof plate.$inferInsert, 'editionId'>;
 export type NewResult = Omit<typeof editionResult.$inferInsert, 'id' | 'editionId'>;
 
-/** Writes an edition with its plates, results and parts; call it while the article's row is locked. Returns its id and number. */
+/** Writes an edition with its plates, pictures, results and parts; call it while the article's row is locked. Returns its id and number. */
 export async function insert(
 	db: Db,
 	row: NewEdition,
-	parts: { plates: NewPlate[]; results: NewResult[]; partIds: number[] }
+	parts: { plates: NewPlate[]; pictures: string[]; results: NewResult[]; partIds: number[] }
 ): Promise<{ id: number; number: number }> {
 	const [last] = await db
 		.select({ number: max(edition.number) })
@@ -25,6 +25,8 @@ export async function insert(
 	const editionId = created.id;
 	if (parts.plates.length > 0)
 		await db.insert(plate).values(parts.plates.map((one) => ({ ...one, editionId })));
+	if (parts.pictures.length > 0)
+		await db.insert(editionPicture).values(parts.pictures.map((sha256) => ({ editionId, sha256 })));
 	if (parts.results.length > 0)
 		await db.insert(editionResult).values(parts.results.map((one) => ({ ...one, editionId })));
 	if (parts.partIds.length > 0)
@@ -35,6 +37,25 @@ export async function insert(
 /** An edition with what it froze. */
 export const byId = async (db: Db, id: number) =>
 	(await db.select().from(edition).where(eq(edition.id, id)).limit(1))[0];
+
+/** An edition of an article by its number, with what it froze and who approved it. */
+export const byNumber = async (db: Db, articleId: number, number: number) =>
+	(
+		await db
+			.select({
+				number: edition.number,
+				title: edition.title,
+				standfirst: edition.standfirst,
+				source: edition.source,
+				page: edition.page,
+				approvedAt: edition.approvedAt,
+				approvedByName: user.name
+			})
+			.from(edition)
+			.innerJoin(user, eq(user.id, edition.approvedBy))
+			.where(and(eq(edition.articleId, articleId), eq(edition.number, number)))
+			.limit(1)
+	)[0];
 
 /** The editions of an article without their pages, the newest first. */
 export const listOf = (db: Db, articleId: number) =>

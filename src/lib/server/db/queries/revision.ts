@@ -1,4 +1,4 @@
-import { and, count, desc, eq, inArray } from 'drizzle-orm';
+import { and, count, desc, eq, inArray, isNotNull, like, type SQL } from 'drizzle-orm';
 import type { Db } from '../client';
 import { revision, user } from '../schema';
 
@@ -22,32 +22,59 @@ export const byNumbers = (db: Db, articleId: number, numbers: number[]) =>
 					savedAt: revision.savedAt,
 					savedBy: revision.savedBy,
 					savedByName: user.name,
-					note: revision.note
+					note: revision.note,
+					label: revision.label
 				})
 				.from(revision)
 				.innerJoin(user, eq(user.id, revision.savedBy))
 				.where(and(eq(revision.articleId, articleId), inArray(revision.number, numbers)))
 				.orderBy(desc(revision.number));
 
+export interface RevisionFilter {
+	/** Only those with a name. */
+	named: boolean;
+	/** Words their name holds; empty for any. */
+	words: string;
+}
+
+const matches = (articleId: number, { named, words }: RevisionFilter): SQL | undefined =>
+	and(
+		eq(revision.articleId, articleId),
+		named ? isNotNull(revision.label) : undefined,
+		words === '' ? undefined : like(revision.label, `%${words.replace(/[\\%_]/g, '\\$&')}%`)
+	);
+
 /** The revisions of an article without their texts, the newest first. */
-export const list = (db: Db, articleId: number, { limit, offset }: { limit: number; offset: number }) =>
+export const list = (
+	db: Db,
+	articleId: number,
+	filter: RevisionFilter,
+	{ limit, offset }: { limit: number; offset: number }
+) =>
 	db
 		.select({
 			number: revision.number,
 			title: revision.title,
 			savedAt: revision.savedAt,
 			savedByName: user.name,
-			note: revision.note
+			note: revision.note,
+			label: revision.label,
+			wordsAdded: revision.wordsAdded,
+			wordsRemoved: revision.wordsRemoved
 		})
 		.from(revision)
 		.innerJoin(user, eq(user.id, revision.savedBy))
-		.where(eq(revision.articleId, articleId))
+		.where(matches(articleId, filter))
 		.orderBy(desc(revision.number))
 		.limit(limit)
 		.offset(offset);
 
-export const countOf = async (db: Db, articleId: number): Promise<number> =>
-	(await db.select({ n: count() }).from(revision).where(eq(revision.articleId, articleId)))[0]?.n ?? 0;
+export const countOf = async (db: Db, articleId: number, filter: RevisionFilter): Promise<number> =>
+	(await db.select({ n: count() }).from(revision).where(matches(articleId, filter)))[0]?.n ?? 0;
+
+export async function setLabel(db: Db, id: number, label: string | null): Promise<void> {
+	await db.update(revision).set({ label }).where(eq(revision.id, id));
+}
 
 export async function insert(db: Db, row: typeof revision.$inferInsert): Promise<number> {
 	const [created] = await db.insert(revision).values(row).$returningId();

@@ -108,9 +108,34 @@ export const revision = mysqlTable(
 			.notNull()
 			.references(() => user.id),
 		savedAt: at('saved_at').notNull(),
-		note: varchar('note', { length: 200 }).notNull().default('')
+		note: varchar('note', { length: 200 }).notNull().default(''),
+		/** A name somebody gave it, to find it again; null for most. */
+		label: varchar('label', { length: 80 }),
+		/** Words against the revision before, counted when it was saved; null of those saved before there was a count. */
+		wordsAdded: int('words_added'),
+		wordsRemoved: int('words_removed')
 	},
-	(t) => [uniqueIndex('revision_number').on(t.articleId, t.number)]
+	(t) => [
+		uniqueIndex('revision_number').on(t.articleId, t.number),
+		index('revision_label').on(t.articleId, t.label)
+	]
+);
+
+/** Who has an article open to edit it: a row each, raised by their browser now and then, old ones count for nothing. */
+export const articlePresence = mysqlTable(
+	'article_presence',
+	{
+		articleId: int('article_id')
+			.notNull()
+			.references(() => article.id),
+		personId: personId('person_id')
+			.notNull()
+			.references(() => user.id),
+		/** Their last key in the text; null while they only look. */
+		lastKeyAt: at('last_key_at'),
+		seenAt: at('seen_at').notNull()
+	},
+	(t) => [primaryKey({ columns: [t.articleId, t.personId] }), index('article_presence_seen').on(t.seenAt)]
 );
 
 export const comment = mysqlTable(

@@ -7,4 +7,5 @@ export * from './stability';
 export * from './lab';
 export * from './articles';
 export * from './desk';
+export * from './pictures';
 export * from './jobs';

@@ -14,6 +14,7 @@ import * as revisions from '../../db/queries/revision';
 import { freezeEdition, type FrozenEdition } from '../../rendering/freeze-edition';
 import type { ArticleData } from '../../../domain/articles/data';
 import { checkText, currentData, stopWords } from './check-article';
+import { withPictures } from './known-pictures';
 import { moveTo } from './move-to';
 import { takeArticle, type TakeReason } from './take-article';
 import { tell } from './tell';
@@ -48,6 +49,7 @@ async function write(
 		},
 		{
 			plates: frozen.plates,
+			pictures: frozen.pictures,
 			results: frozen.results,
 			partIds: await parts.ofSlugs(tx, frozen.partSlugs)
 		}
@@ -75,7 +77,7 @@ export const approveArticle = (
 		const row = taken.value;
 		const head = await revisions.byNumber(tx, row.id, row.head);
 		if (!head) throw new Error(`Article ${row.id} has no revision ${row.head}.`);
-		const data = await currentData(ctx, tx, row.id);
+		const data = await withPictures(tx, await currentData(ctx, tx, row.id), head.source);
 		const { title, standfirst } = row;
 		const frozen = freezeEdition({ slug, title, standfirst, source: head.source, data });
 		const stops: Finding[] = blocking(await checkText(ctx, tx, row, frozen.facts, data, row.slotAt));

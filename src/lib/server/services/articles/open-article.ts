@@ -12,6 +12,7 @@ import * as revisions from '../../db/queries/revision';
 import { plateDrawing } from '../../rendering/plate-cache';
 import { sanitisePage } from '../../rendering/sanitise-page';
 import { articleData } from './article-data';
+import { withPictures } from './known-pictures';
 
 /** The page of a source as it would be printed now, sanitised, with the drawings of its plates by key. */
 export function renderNow(slug: string, source: string, data: ArticleData) {
@@ -33,10 +34,11 @@ export async function openArticle(ctx: Context, slug: string) {
 		articles.campaignsOf(ctx.db, article.id)
 	]);
 	if (!head) throw new Error(`Article ${article.id} has no revision ${article.head}.`);
-	const data = await articleData(
+	const measured = await articleData(
 		ctx,
 		bound.map((one) => one.id)
 	);
+	const data = await withPictures(ctx.db, measured, head.source);
 	const { html, drawings, rendered } = renderNow(slug, head.source, data);
 	const allowed = may(ctx.actor, 'article.edit', { authorId: article.authorId });
 	return done({

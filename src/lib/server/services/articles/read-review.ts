@@ -15,6 +15,7 @@ import * as editions from '../../db/queries/edition';
 import * as revisions from '../../db/queries/revision';
 import { canonicalJson } from '../../rendering/freeze-edition';
 import { checkEdition, checkText, currentData } from './check-article';
+import { withPictures } from './known-pictures';
 import { renderNow } from './open-article';
 import { hasPage } from './take-article';
 
@@ -47,7 +48,7 @@ async function frozen(ctx: Context, row: ArticleRow, editionId: number): Promise
 async function asItStands(ctx: Context, row: ArticleRow): Promise<Shown> {
 	const head = await revisions.byNumber(ctx.db, row.id, row.head);
 	if (!head) throw new Error(`Article ${row.id} has no revision ${row.head}.`);
-	const data = await currentData(ctx, ctx.db, row.id);
+	const data = await withPictures(ctx.db, await currentData(ctx, ctx.db, row.id), head.source);
 	const { rendered, html } = renderNow(row.slug, head.source, data);
 	const findings = await checkText(ctx, ctx.db, row, rendered, data, row.slotAt);
 	const { title, standfirst } = head;

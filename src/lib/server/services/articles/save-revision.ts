@@ -1,4 +1,5 @@
 import { after, closedWords } from '../../../domain/articles/stage';
+import { wholeText, wordsBetween } from '../../../domain/articles/revisions/words-between';
 import * as mails from '../../../domain/mail/article-handover';
 import { may } from '../../../domain/people/policy';
 import { done, refuse, type Outcome } from '../../../domain/shared/outcome';
@@ -34,6 +35,8 @@ export interface NewerRevision {
 	source: string;
 	savedAt: Date;
 	savedByName: string;
+	/** The revision that both were written on, to put the two together by; null where there is none of that number. */
+	base: Pick<RevisionSave, 'title' | 'standfirst' | 'source'> | null;
 }
 
 /**
@@ -79,13 +82,19 @@ export async function saveRevisionIn(
 		});
 	if (row.head !== input.basedOn) {
 		const { number, title, standfirst, source, savedAt, savedByName } = head;
+		const base = await baseOf(tx, row.id, input.basedOn);
 		return refuse(
 			'conflict',
 			`${savedByName} saved revision ${number} after you began from revision ${input.basedOn}. Yours is not saved yet, and nothing of it is lost: choose what to keep.`,
-			{ detail: { number, title, standfirst, source, savedAt, savedByName } satisfies NewerRevision }
+			{ detail: { number, title, standfirst, source, savedAt, savedByName, base } satisfies NewerRevision }
 		);
 	}
-	return done(await write(ctx, tx, row, stage, input, note));
+	return done(await write(ctx, tx, row, stage, input, note, head));
+}
+
+async function baseOf(tx: Transaction, articleId: number, number: number): Promise<NewerRevision['base']> {
+	const found = await revisions.byNumber(tx, articleId, number);
+	return found ? { title: found.title, standfirst: found.standfirst, source: found.source } : null;
 }
 
 async function write(
@@ -94,9 +103,11 @@ async function write(
 	row: ArticleRow,
 	stage: ArticleRow['stage'],
 	input: RevisionSave,
-	note: string
+	note: string,
+	head: Pick<RevisionSave, 'title' | 'standfirst' | 'source'>
 ): Promise<Saved> {
 	const number = row.head + 1;
+	const words = wordsBetween(wholeText(head), wholeText(input));
 	const { title, standfirst, source } = input;
 	await revisions.insert(tx, {
 		articleId: row.id,
@@ -106,7 +117,9 @@ async function write(
 		source,
 		savedBy: ctx.actor.id,
 		savedAt: ctx.now,
-		note
+		note,
+		wordsAdded: words.added,
+		wordsRemoved: words.removed
 	});
 	await filing.putText(tx, { articleId: row.id, title, standfirst, source });
 	await articles.update(tx, row.id, row.version, {

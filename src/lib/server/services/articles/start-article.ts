@@ -5,13 +5,10 @@ import { isReserved, slugOf } from '../../../domain/shared/slug';
 import type { ArticleStart } from '../../../schemas/article';
 import type { Context } from '../../context';
 import { inTransaction, isDuplicate } from '../../db/client';
-import * as articles from '../../db/queries/article';
-import * as filing from '../../db/queries/article-filing';
-import * as audit from '../../db/queries/audit';
 import * as campaigns from '../../db/queries/campaign-choice';
-import * as revisions from '../../db/queries/revision';
 import { templateOf } from '../../rendering/templates';
 import { articleData } from './article-data';
+import { createArticle } from './create-article';
 
 const taken = 'Another article has this title, or one that makes the same address. Choose another.';
 
@@ -47,39 +44,11 @@ export async function startArticle(
 			// The template's own standfirst tells the writer what to say; in print it would say nothing.
 			const standfirst = '';
 			const source = fillTemplate(template.body, data);
-			const id = await articles.insert(tx, {
-				slug,
-				title: input.title,
-				standfirst,
-				template: input.template,
-				stage: 'drafting',
-				authorId: ctx.actor.id,
-				head: 1,
-				createdAt: ctx.now,
-				updatedAt: ctx.now
+			await createArticle(ctx, tx, {
+				...{ slug, title: input.title, standfirst, template: input.template, source, campaignIds: ids },
+				note: 'from the template',
+				log: { campaigns: input.campaigns }
 			});
-			await articles.setCampaigns(tx, id, ids);
-			await revisions.insert(tx, {
-				articleId: id,
-				number: 1,
-				title: input.title,
-				standfirst,
-				source,
-				savedBy: ctx.actor.id,
-				savedAt: ctx.now,
-				note: 'from the template'
-			});
-			await filing.putText(tx, { articleId: id, title: input.title, standfirst, source });
-			await audit.append(tx, [
-				{
-					at: ctx.now,
-					actorId: ctx.actor.id,
-					act: 'article.start',
-					subjectKind: 'article',
-					subjectId: id,
-					after: { slug, title: input.title, template: input.template, campaigns: input.campaigns }
-				}
-			]);
 			return done({ slug });
 		});
 	} catch (error) {

@@ -7,8 +7,6 @@ import { nearest } from '../shared/nearest';
 const byName = new Map(allDirectives.map((one) => [one.name, one]));
 const names = [...byName.keys()];
 
-const marks = { inline: ':', block: '::', container: ':::' } as const;
-
 /** Attributes it does not know, lacks, or was given another value for than it takes. */
 function attributeProblem(one: AnyDirective, { call, data }: Press): ReturnType<typeof missing> | null {
 	const known = one.attributes.map((attribute) => attribute.name);
@@ -44,10 +42,12 @@ function valueProblem(one: AnyDirective, { call, data }: Press): ReturnType<type
 }
 const fixed = new Set(['kind', 'show', 'topic', 'depth', 'columns']);
 
-const places = {
-	inline: 'stands in a sentence',
-	block: 'stands on a line of its own',
-	container: 'stands around text and is closed by :::'
+/** How a directive of each level is written, for one that was written otherwise. */
+const manner = {
+	inline: (name: string) => `“${name}” stands in a sentence: write :${name}.`,
+	block: (name: string) => `“${name}” stands on a line of its own: write ::${name}.`,
+	container: (name: string) =>
+		`“${name}” stands around text: write :::${name}, then the text, then ::: on a line of its own.`
 } as const;
 
 /** Why a directive cannot stand where it does; null where it can. */
@@ -76,9 +76,7 @@ export function runDirective(
 ): Lookup<Printed> {
 	const one = byName.get(token.name);
 	if (!one) return unknownName(`There is no directive called “${token.name}”.`, token.name, names);
-	if (one.level !== token.level) {
-		return missing(`“${one.name}” ${places[one.level]}: write ${marks[one.level]}${one.name}.`, []);
-	}
+	if (one.level !== token.level) return missing(manner[one.level](one.name), []);
 	if (token.fault !== null) return missing(token.fault);
 	return (
 		placeProblem(one, around) ?? attributeProblem(one, press) ?? valueProblem(one, press) ?? one.print(press)

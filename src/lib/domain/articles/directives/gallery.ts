@@ -23,7 +23,7 @@ function picturesOf(tokens: readonly Token[]): Tokens.Image[] | null {
 
 function figure(picture: Tokens.Image): string {
 	const caption = picture.title ?? '';
-	const html = printMarkdown([{ ...picture, title: null } as Token]);
+	const html = printMarkdown([{ type: 'text', raw: '', text: '', tokens: [{ ...picture, title: null }] }]);
 	return element('figure', {}, html + (caption ? element('figcaption', {}, escapeHtml(caption)) : ''));
 }
 

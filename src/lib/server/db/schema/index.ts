@@ -5,4 +5,5 @@ export * from './bench';
 export * from './stability';
 export * from './lab';
 export * from './articles';
+export * from './desk';
 export * from './jobs';

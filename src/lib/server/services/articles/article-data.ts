@@ -15,6 +15,7 @@ import type { Context } from '../../context';
 import * as facts from '../../db/queries/campaign-facts';
 import * as recorded from '../../db/queries/campaign-readings';
 import * as duties from '../../db/queries/sample-duties';
+import * as terms from '../../db/queries/glossary-term';
 import * as ladders from '../../db/queries/ladder';
 import * as stock from '../../db/queries/stock-runs';
 import { publication } from '../../db/queries/settings';
@@ -125,10 +126,11 @@ export async function articleData(
 	{ db, now }: Pick<Context, 'db' | 'now'>,
 	campaignIds: number[]
 ): Promise<ArticleData> {
-	const [plans, readings, { zone }] = await Promise.all([
+	const [plans, readings, { zone }, glossary] = await Promise.all([
 		facts.forCampaigns(db, campaignIds),
 		recorded.forCampaigns(db, campaignIds),
-		publication(db)
+		publication(db),
+		terms.standing(db)
 	]);
 	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
 	const rigIds = [...new Set(plans.map(({ head }) => head.rigId))];
@@ -145,6 +147,7 @@ export async function articleData(
 		duties: rows.map(dutyOf),
 		...climbedAndSwept,
 		drifts: driftFacts(stockRuns),
+		glossary,
 		zone
 	};
 }

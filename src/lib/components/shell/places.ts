@@ -67,6 +67,20 @@ export const commands: readonly Command[] = [
 		act: 'bench.read',
 		keywords: ['bench', 'lab', 'settings', 'family']
 	},
+	{
+		group: 'Go to',
+		label: 'Glossary',
+		href: '/desk/glossary',
+		act: 'article.read',
+		keywords: ['terms', 'words']
+	},
+	{
+		group: 'Go to',
+		label: 'Templates',
+		href: '/desk/templates',
+		act: 'article.read',
+		keywords: ['checklist']
+	},
 	{ group: 'Go to', label: 'My page', href: '/me', act: 'account.use', keywords: ['password', 'tokens'] },
 	{ group: 'Go to', label: 'The readers’ site', href: '/', act: 'account.use', keywords: ['home', 'public'] },
 	{ group: 'Go to', label: 'Mail and jobs', href: '/people/jobs', act: 'jobs.manage', keywords: ['outbox'] },

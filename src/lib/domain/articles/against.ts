@@ -7,7 +7,8 @@ type HeldCells = CampaignData['cells'];
 /** Tables over other profiles than the baseline, so that a page of many gains computes each once. */
 const tables = new WeakMap<CampaignData, Map<string, HeldCells>>();
 
-function cellsOver(campaign: CampaignData, over: string): HeldCells {
+/** A campaign's cells, each held against the same workload of a profile. */
+export function cellsOver(campaign: CampaignData, over: string): HeldCells {
 	if (over === campaign.baseline) return campaign.cells;
 	const known = tables.get(campaign) ?? new Map<string, HeldCells>();
 	tables.set(campaign, known);

@@ -81,6 +81,16 @@ export interface SampleDuty {
 	embargoes: { field: EmbargoField; until: string }[];
 }
 
+/** A word of the trade, as the lab explains it to its readers. */
+export interface GlossaryTerm {
+	slug: string;
+	term: string;
+	/** In plain text. */
+	explanation: string;
+	/** Other words it goes by. */
+	aliases?: string[];
+}
+
 /** Everything an article's directives may name: plain JSON, made on the server, used by the one renderer everywhere. */
 export interface ArticleData {
 	campaigns: CampaignData[];
@@ -94,6 +104,8 @@ export interface ArticleData {
 	pictures?: PictureFacts[];
 	/** Hashes that the text names and the store does not have. */
 	missingPictures?: string[];
+	/** The lab's terms; in an edition, those that its page uses. Left out of older editions. */
+	glossary?: GlossaryTerm[];
 	/** The publication's zone for the dates it prints, such as Europe/Oslo. */
 	zone: string;
 }

@@ -1,5 +1,6 @@
 import { createDirectives } from 'marked-directive';
 import type { MarkedExtension, TokenizerAndRendererExtension, Tokens } from 'marked';
+import { insideOf } from './container-lines';
 import { escapeHtml } from './html';
 
 /** A directive in the token tree; `html` is filled in before the tree is printed. */
@@ -11,20 +12,21 @@ export interface DirectiveToken extends Tokens.Generic {
 	/** Why it could not be read; null where it could. */
 	fault: string | null;
 	html?: string;
+	/** The same in plain text, and as a narrator says it. */
+	plain?: string;
+	spoken?: string;
+	line?: number;
 }
 
 /** A directive on a line is read from this many characters at most, so that a missing brace costs nothing. */
 const longestLine = 700;
-/** And a container, from its opening to its closing line. */
-const longestContainer = 4000;
 
 /** What counts as a directive; everything else with a colon is text. */
 const written = {
 	inline: /^:([a-z][\w-]*)(\{[^{}]*\})/i,
 	block: /^::([a-z][\w-]*)(\{[^{}\n]*\})?[ \t]*(?:\n+|$)/i,
-	container: /^:::([a-z][\w-]*)(\{[^{}\n]*\})?[ \t]*(?:\n+|$)/i
+	container: /^:::([a-z][\w-]*)(\{[^{}\n]*\})?[ \t]*(?:\n|$)/i
 };
-const closing = /\n:::[ \t]*(?:\n+|$)/;
 
 /** Where an inline directive may start. Looked for in a window, since this is asked at every piece of text. */
 function inlineStart(source: string): number | undefined {
@@ -86,13 +88,11 @@ function wrapped(
 					'What stands between the braces cannot be read. Write name=value, with quotes around a value that has spaces.';
 			}
 			if (level === 'container') {
-				const rest = source.slice(raw.length - 1, longestContainer);
-				const end = closing.exec(rest);
-				if (!end || !raw.endsWith('\n')) {
-					token.fault = `This is not closed. End it with ::: on a line of its own, within ${longestContainer} characters.`;
-				} else {
-					token.raw = raw + rest.slice(1, end.index + end[0].length);
-					token.tokens = this.lexer.blockTokens(rest.slice(1, Math.max(1, end.index)), []);
+				const inside = insideOf(source, raw.length);
+				if ('fault' in inside) token.fault = inside.fault;
+				else {
+					token.raw = source.slice(0, inside.end);
+					token.tokens = this.lexer.blockTokens(inside.text, []);
 				}
 			}
 			return token;

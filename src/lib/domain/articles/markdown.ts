@@ -1,19 +1,45 @@
-import { Marked, type Token, type Tokens } from 'marked';
-import { directiveSyntax, isDirective, type DirectiveToken } from './directive-syntax';
+import { decodeHTML } from 'entities/decode';
+import { Marked, type MarkedExtension, type Token, type Tokens } from 'marked';
+import { directiveSyntax, isDirective } from './directive-syntax';
+import { footnoteSyntax } from './footnote-syntax';
 import { element, escapeHtml } from './html';
 import { isSafeLink, relOf } from './links';
+import { inlineText } from './plain-text';
 
 /** A token with the line it starts on, from 1, and what was settled about it before printing. */
 export type Placed = Token & { line?: number; id?: string; refused?: string; printed?: string };
 
 const at = (token: object): number | undefined => (token as { line?: number }).line;
 
+/** How marked is set up before any rule of this house: CommonMark with tables, and bare addresses are links. */
+export const markedOptions = { gfm: true, breaks: false };
+
+/** Marked leaves entities in addresses and titles as they were typed; CommonMark decodes them. */
+export const decodedAddresses: MarkedExtension = {
+	walkTokens(token) {
+		if (token.type !== 'link' && token.type !== 'image') return;
+		const link = token as Tokens.Link | Tokens.Image;
+		link.href = decodeHTML(link.href);
+		if (link.title) link.title = decodeHTML(link.title);
+	}
+};
+
+/** An address as it stands in an attribute: percent-encoded where CommonMark's examples are, and not twice. */
+function encoded(href: string): string {
+	try {
+		return encodeURI(href).replace(/%25/g, '%');
+	} catch {
+		// Half a surrogate pair: no address has one.
+		return href.toWellFormed();
+	}
+}
+
 /**
  * CommonMark with tables and our directives; HTML in a source is text. The renderers print what was settled
  * in the token tree beforehand and keep no state, so that one parser serves everybody.
  */
-const marked = new Marked({ gfm: true, breaks: false });
-marked.use(directiveSyntax());
+const marked = new Marked(markedOptions);
+marked.use(directiveSyntax(), footnoteSyntax());
 marked.use({
 	tokenizer: {
 		// No token, and not marked's own reading either: what looks like HTML stays text and is escaped.
@@ -40,10 +66,11 @@ marked.use({
 			return `<hr data-line="${at(token) ?? ''}">`;
 		},
 		code(token) {
+			const text = token.text.replace(/\n$/, '');
 			return element(
 				'pre',
 				{ 'data-line': at(token), tabindex: 0 },
-				`<code>${escapeHtml(token.text)}\n</code>`
+				`<code>${text === '' ? '' : `${escapeHtml(text)}\n`}</code>`
 			);
 		},
 		list(token) {
@@ -82,7 +109,7 @@ marked.use({
 			if (!isSafeLink(token.href)) return inner + ((token as Placed).refused ?? '');
 			return element(
 				'a',
-				{ href: token.href, title: token.title ?? undefined, rel: relOf(token.href) },
+				{ href: encoded(token.href), title: token.title ?? undefined, rel: relOf(token.href) },
 				inner
 			);
 		},
@@ -91,12 +118,14 @@ marked.use({
 			const settled = refused ?? printed;
 			if (settled !== undefined) return settled;
 			const title = token.title ? ` title="${escapeHtml(token.title)}"` : '';
-			return `<img src="${escapeHtml(token.href)}" alt="${escapeHtml(token.text)}"${title} loading="lazy">`;
+			return `<img src="${escapeHtml(encoded(token.href))}" alt="${escapeHtml(token.text)}"${title} loading="lazy">`;
 		},
 		text(token) {
 			if ('tokens' in token && token.tokens) return this.parser.parseInline(token.tokens);
 			// Entities that a writer typed are decoded by the browser, so they stay as they are.
-			return token.text.replace(/&(?!#?\w{1,31};)/g, '&amp;').replace(/[<>"']/g, (sign) => escapeHtml(sign));
+			return token.text
+				.replace(/&(?!(?:#\d{1,7}|#x[\da-f]{1,6}|\w+);)/gi, '&amp;')
+				.replace(/[<>"']/g, (sign) => escapeHtml(sign));
 		}
 	}
 });
@@ -118,11 +147,17 @@ function inside(token: Token): { tokens: Token[]; offset: number }[] {
 	return tokens ? [{ tokens, offset: container ? 1 : 0 }] : [];
 }
 
+/** The tokens that stand directly in one. */
+export const childrenOf = (token: Token): Token[] => inside(token).flatMap((list) => list.tokens);
+
 function place(tokens: Token[], first: number): void {
 	let line = first;
 	for (const token of tokens) {
 		(token as Placed).line = line;
+		void decodedAddresses.walkTokens?.(token);
 		for (const { tokens: inner, offset } of inside(token)) place(inner, line + offset);
+		// What is said for a picture is its text without marks.
+		if (token.type === 'image' && token.tokens) token.text = inlineText(token.tokens);
 		line += linesIn(token.raw);
 	}
 }
@@ -144,6 +179,3 @@ export function eachToken(tokens: Token[], visit: (token: Placed) => void): void
 
 /** The markup of a token tree. */
 export const printMarkdown = (tokens: Token[]): string => marked.parser(tokens);
-
-/** What a container directive holds, as markup. */
-export const printInside = (token: DirectiveToken): string => marked.parser(token.tokens ?? []);

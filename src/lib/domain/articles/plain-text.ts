@@ -1,17 +1,27 @@
+import { decodeHTML } from 'entities/decode';
 import type { Token, Tokens } from 'marked';
 
-const decoded: Record<string, string> = { amp: '&', lt: '<', gt: '>', quot: '"', '#39': "'", nbsp: '\u00a0' };
-const decode = (text: string): string =>
-	text.replace(/&(amp|lt|gt|quot|#39|nbsp);/g, (_, name: string) => decoded[name] ?? '');
+/** Which text of a directive is wanted: as it is read, or as a narrator says it. */
+type Voice = 'plain' | 'spoken';
 
-function inline(tokens: Token[]): string {
+/** What a directive or a footnote left as its text; undefined for everything else. */
+function left(token: Token, voice: Voice): string | undefined {
+	const { plain, spoken } = token as { plain?: unknown; spoken?: unknown };
+	const text = voice === 'spoken' ? (spoken ?? plain) : plain;
+	return typeof text === 'string' ? text : undefined;
+}
+
+/** The text of inline tokens without their marks, entities decoded. */
+export function inlineText(tokens: Token[], voice: Voice = 'plain'): string {
 	return tokens
 		.map((token) => {
 			if (token.type === 'br') return ' ';
 			if (token.type === 'image') return (token as Tokens.Image).text;
-			if ('plain' in token && typeof token.plain === 'string') return token.plain;
-			if ('tokens' in token && token.tokens) return inline(token.tokens);
-			return 'text' in token && typeof token.text === 'string' ? decode(token.text) : '';
+			const own = left(token, voice);
+			if (own !== undefined) return own;
+			if ('tokens' in token && token.tokens) return inlineText(token.tokens, voice);
+			if (!('text' in token) || typeof token.text !== 'string') return '';
+			return token.type === 'codespan' || token.type === 'escape' ? token.text : decodeHTML(token.text);
 		})
 		.join('');
 }
@@ -19,20 +29,24 @@ function inline(tokens: Token[]): string {
 const tidy = (text: string): string => text.replace(/[ \t\n]+/g, ' ').trim();
 
 /** The text of a token tree without its marks: one paragraph to a block, for feeds, search and the word count. */
-export function plainText(tokens: Token[]): string {
+export function plainText(tokens: Token[], voice: Voice = 'plain'): string {
 	const blocks = tokens.flatMap((token): string[] => {
 		if (token.type === 'space' || token.type === 'def' || token.type === 'hr') return [];
-		if ('plain' in token && typeof token.plain === 'string') return [token.plain];
-		if (token.type === 'list') return (token as Tokens.List).items.map((item) => plainText(item.tokens));
+		const own = left(token, voice);
+		if (own !== undefined) return [own];
+		if (token.type === 'list')
+			return (token as Tokens.List).items.map((item) => plainText(item.tokens, voice));
 		if (token.type === 'table') {
 			const { header, rows } = token as Tokens.Table;
-			return [header, ...rows].map((row) => tidy(row.map((cell) => inline(cell.tokens)).join(' ')));
+			return [header, ...rows].map((row) =>
+				tidy(row.map((cell) => inlineText(cell.tokens, voice)).join(' '))
+			);
 		}
 		if (token.type === 'code') return [(token as Tokens.Code).text];
 		if (token.type === 'blockquote' || token.type === 'directive-container') {
-			return [plainText((token as Tokens.Blockquote).tokens)];
+			return [plainText((token as Tokens.Blockquote).tokens, voice)];
 		}
-		return [tidy(inline([token]))];
+		return [tidy(inlineText([token], voice))];
 	});
 	return blocks.filter((block) => block !== '').join('\n\n');
 }

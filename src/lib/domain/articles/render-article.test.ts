@@ -232,7 +232,8 @@ describe('blocks', () => {
 			cells: [
 				{ campaign: 'two-cores', workload: 'source-build', profile: 'huge-pages' },
 				{ campaign: 'two-cores', workload: 'source-build', profile: 'stock' }
-			]
+			],
+			terms: []
 		});
 	});
 });

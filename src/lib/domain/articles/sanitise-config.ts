@@ -28,7 +28,8 @@ export const sanitiseConfig = {
 			'source'
 		],
 		...['ul', 'ol', 'li', 'table', 'caption', 'thead', 'tbody', 'tfoot', 'tr', 'th', 'td'],
-		...['figure', 'figcaption', 'details', 'summary', 'aside', 'section', 'div', 'span'],
+		...['figure', 'figcaption', 'details', 'summary', 'aside', 'section', 'div', 'span', 'nav'],
+		...['dl', 'dt', 'dd', 'dfn', 'sup'],
 		// Plates: shapes and words alone, nothing that links, embeds, animates or refers.
 		...['svg', 'g', 'path', 'rect', 'circle', 'line', 'text', 'tspan', 'title', 'desc', '#text']
 	],

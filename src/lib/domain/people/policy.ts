@@ -46,6 +46,9 @@ export const policy = {
 	'article.publish': { roles: ['editor'] },
 	'article.correct': { roles: ['editor'] },
 	'article.withdraw': { roles: ['editor'] },
+	'article.check': { roles: ['tester', 'editor'] },
+	'glossary.edit': { roles: ['writer', 'editor'] },
+	'template.edit': { roles: ['editor'] },
 
 	'people.read': { roles: staff },
 	'people.manage': { roles: ['admin'] },

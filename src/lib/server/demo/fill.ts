@@ -7,6 +7,7 @@ import { articlesInHand } from './articles/in-hand';
 import { printedArticles } from './articles/printed';
 import { calendarAround, demoZone } from './calendar';
 import { campaigns } from './campaigns/all';
+import { glossaryActs } from './glossary';
 import { labActs } from './lab';
 import { lenders } from './lenders';
 import { settleJobs } from './settle-jobs';
@@ -34,6 +35,7 @@ const story = (world: World) => [
 	...lenders(world),
 	...workloads(world),
 	...labActs(world),
+	...glossaryActs(world),
 	...rigActs(world),
 	...[rigN12, rigM4, rigG2].flatMap((tree) => treeActs(world, tree)),
 	...sweepActs(world),

@@ -63,6 +63,8 @@ export interface FrozenEdition {
 	testerNames: string[];
 	/** SHA-256 over title, standfirst, source, data, page, plates and pictures. */
 	hash: string;
+	/** The data it was made from; of the glossary, the terms it uses. */
+	data: ArticleData;
 	/** What was found out about the page, errors included: preflight decides what they mean. */
 	facts: Rendered;
 }
@@ -132,19 +134,26 @@ function testersOf({ uses }: Rendered, data: ArticleData): string[] {
 	return [...new Set(names)];
 }
 
+/** What an edition keeps of its data: of the glossary, the terms that stand on the page. */
+function keptData(data: ArticleData, { uses }: Rendered): ArticleData {
+	const { glossary } = data;
+	return glossary ? { ...data, glossary: glossary.filter(({ slug }) => uses.terms.includes(slug)) } : data;
+}
+
 /**
  * Freezes what is approved: page, plates and figures made once from source and data, sanitised last, with the
  * hash over all of it. Takes some 100 ms for a long article.
  */
 export function freezeEdition(input: EditionInput): FrozenEdition {
-	const { slug, title, standfirst, source, data } = input;
+	const { slug, title, standfirst, source } = input;
 	const drawings = new Map<PlateSpec, string>();
 	const draw = (spec: PlateSpec): string => {
 		const drawing = drawPlate(spec);
 		drawings.set(spec, drawing);
 		return drawing;
 	};
-	const facts = renderArticle(source, data, draw, { platesAt: `/articles/${slug}/plates/` });
+	const facts = renderArticle(source, input.data, draw, { platesAt: `/articles/${slug}/plates/` });
+	const data = keptData(input.data, facts);
 	const page = sanitisePage(facts.html);
 	const plates = facts.plates.map(({ key, spec }): FrozenPlate => ({
 		key,
@@ -165,6 +174,7 @@ export function freezeEdition(input: EditionInput): FrozenEdition {
 		partSlugs: [...new Set(shown.flatMap((campaign) => campaign.kit.map((line) => line.part)))],
 		testerNames: testersOf(facts, data),
 		hash: editionHash({ title, standfirst, source, data, page, plates, pictures }),
+		data,
 		facts
 	};
 }

@@ -2,7 +2,7 @@ import type { Completion, CompletionContext, CompletionResult } from '@codemirro
 import type { ArticleData } from '../../../domain/articles/data';
 import { allDirectives } from '../../../domain/articles/directives/all-directives';
 
-const marks = { inline: ':', block: '::' } as const;
+const marks = { inline: ':', block: '::', container: ':::' } as const;
 
 /** What has been written between the braces before the cursor. */
 const given = (text: string): Record<string, string> =>
@@ -14,9 +14,9 @@ const given = (text: string): Record<string, string> =>
 	);
 
 function names(before: string, from: number): CompletionResult | null {
-	const typed = /(^|[^:\w]):{1,2}([a-z]*)$/.exec(before);
+	const typed = /(^|[^:\w]):{1,3}([a-z]*)$/.exec(before);
 	if (!typed) return null;
-	const onOwnLine = /^:{1,2}[a-z]*$/.test(before);
+	const onOwnLine = /^:{1,3}[a-z]*$/.test(before);
 	const written = typed[0].slice((typed[1] ?? '').length);
 	return {
 		from: from - written.length,
@@ -26,13 +26,13 @@ function names(before: string, from: number): CompletionResult | null {
 			.map((one): Completion => ({
 				label: `${marks[one.level]}${one.name}`,
 				detail: one.words,
-				apply: `${marks[one.level]}${one.name}${one.attributes.length > 0 ? '{' : ''}`
+				apply: `${marks[one.level]}${one.name}${one.attributes.length > 0 && one.level !== 'container' ? '{' : ''}`
 			}))
 	};
 }
 
 function attributes(before: string, from: number, data: ArticleData): CompletionResult | null {
-	const open = /:{1,2}([a-z][\w-]*)\{([^{}]*)$/.exec(before);
+	const open = /:{1,3}([a-z][\w-]*)\{([^{}]*)$/.exec(before);
 	const one = open && allDirectives.find((directive) => directive.name === open[1]);
 	if (!open || !one) return null;
 	const inside = open[2] ?? '';

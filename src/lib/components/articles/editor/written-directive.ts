@@ -1,5 +1,6 @@
 import type { AnyDirective } from '../../../domain/articles/directives/shape';
 
+const marks = { inline: ':', block: '::', container: ':::' } as const;
 const bare = /^[^\s"'{}]+$/;
 
 const written = (value: string): string => (bare.test(value) ? value : `"${value.replace(/["{}\n]/g, '')}"`);
@@ -13,8 +14,8 @@ export function writtenDirective(one: AnyDirective, values: Record<string, strin
 		.map(({ name }) => [name, values[name] ?? ''] as const)
 		.filter(([, value]) => value !== '')
 		.map(([name, value]) => `${name}=${written(value)}`);
-	const head = `${one.level === 'inline' ? ':' : '::'}${one.name}`;
-	if (given.length > 0) return `${head}{${given.join(' ')}}`;
+	const head = `${marks[one.level]}${one.name}`;
 	// In a sentence the braces are what makes it a directive.
-	return one.level === 'inline' ? `${head}{}` : head;
+	const braces = given.length > 0 || one.level === 'inline' ? `{${given.join(' ')}}` : '';
+	return one.level === 'container' ? `${head}${braces}\n${one.sample ?? ''}\n:::` : head + braces;
 }

@@ -176,5 +176,11 @@ export const attribute = {
 		required,
 		words,
 		values: () => values
+	}),
+	text: (name: string, words: string, required = false): Attribute => ({
+		name,
+		required,
+		words,
+		values: () => null
 	})
 };

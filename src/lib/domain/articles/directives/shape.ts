@@ -1,5 +1,7 @@
+import type { Token } from 'marked';
 import type { ArticleData } from '../data';
 import type { PlateSpec } from '../plates/spec';
+import type { Heading } from '../rendered';
 
 /** What a directive could not do, in words for its writer, with the names that exist. */
 export interface Problem {
@@ -60,14 +62,24 @@ export interface Trace {
 	campaigns?: string[];
 	cautions?: CautionTopic[];
 	disclosure?: true;
+	/** Slugs of the glossary's terms. */
+	terms?: string[];
 }
 
 export interface Printed extends Trace {
 	html: string;
 	/** The same in plain text, for feeds, search and the word count; empty where it adds nothing. */
 	plain: string;
-	/** How a narrator says it, a line for each thing said, figures as printed; a line in square brackets is a cue. `plain` if left out. */
+	/** How a narrator says it, figures and units as printed; a cue in square brackets; empty for silence. As `plain` if left out. */
 	spoken?: string;
+}
+
+/** What stands in a container, settled and printed already. */
+export interface Inside {
+	tokens: Token[];
+	html: string;
+	plain: string;
+	spoken: string;
 }
 
 /** The names an attribute takes; null where any text will do. */
@@ -92,33 +104,46 @@ export interface Press {
 	call: Call;
 	/** Where the plates' files are, with a slash at its end. */
 	platesAt: string;
+	/** Null for what is no container. */
+	inside: Inside | null;
+	/** The page's own headings; complete for a directive that is printed `late`. */
+	headings: readonly Heading[];
+	/** Terms that stand on the page before this one. */
+	termsSoFar: ReadonlySet<string>;
+	/** How many step cards there are since the last heading, this one included. */
+	step: number;
 }
 
 /** One directive: how it is written, how its names are resolved, how what was found is printed. */
 export interface Directive<T> {
 	name: string;
-	/** In a sentence, or on a line of its own. */
-	level: 'inline' | 'block';
+	/** In a sentence, on a line of its own, or around text. */
+	level: 'inline' | 'block' | 'container';
 	/** What it prints, in a sentence for the insert panel. */
 	words: string;
 	attributes: Attribute[];
-	resolve: (call: Call, data: ArticleData) => Lookup<T>;
+	/** Blocks and containers that may stand in it; text may always. */
+	holds?: readonly string[];
+	/** The one container it makes sense in. */
+	within?: string;
+	/** What a container holds at first, for the insert panel. */
+	sample?: string;
+	/** Printed when the rest of the page is known. */
+	late?: true;
+	resolve: (call: Call, data: ArticleData, press: Press) => Lookup<T>;
 	render: (value: T, press: Press) => Printed;
 }
 
 /** A directive with its own types closed over, so that all of them fit one list. */
-export interface AnyDirective extends Pick<Directive<unknown>, 'name' | 'level' | 'words' | 'attributes'> {
+export interface AnyDirective extends Omit<Directive<unknown>, 'resolve' | 'render'> {
 	print: (press: Press) => Lookup<Printed>;
 }
 
 /** Closes a directive over the type it resolves to. */
-export const directive = <T>(it: Directive<T>): AnyDirective => ({
-	name: it.name,
-	level: it.level,
-	words: it.words,
-	attributes: it.attributes,
+export const directive = <T>({ resolve, render, ...it }: Directive<T>): AnyDirective => ({
+	...it,
 	print: (press) => {
-		const result = it.resolve(press.call, press.data);
-		return result.ok ? found(it.render(result.value, press)) : result;
+		const result = resolve(press.call, press.data, press);
+		return result.ok ? found(render(result.value, press)) : result;
 	}
 });

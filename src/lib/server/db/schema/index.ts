@@ -7,5 +7,6 @@ export * from './stability';
 export * from './lab';
 export * from './articles';
 export * from './desk';
+export * from './filing';
 export * from './pictures';
 export * from './jobs';

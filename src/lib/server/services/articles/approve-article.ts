@@ -12,7 +12,6 @@ import * as handover from '../../db/queries/handover';
 import * as parts from '../../db/queries/part-ids';
 import * as revisions from '../../db/queries/revision';
 import { freezeEdition, type FrozenEdition } from '../../rendering/freeze-edition';
-import type { ArticleData } from '../../../domain/articles/data';
 import { checkText, currentData, stopWords } from './check-article';
 import { withPictures } from './known-pictures';
 import { moveTo } from './move-to';
@@ -26,7 +25,6 @@ async function write(
 	row: ArticleRow,
 	revisionId: number,
 	frozen: FrozenEdition,
-	data: ArticleData,
 	source: string
 ): Promise<{ id: number; number: number }> {
 	const [author] = await handover.personById(tx, row.authorId);
@@ -38,7 +36,7 @@ async function write(
 			title: row.title,
 			standfirst: row.standfirst,
 			source,
-			data: JSON.stringify(data),
+			data: JSON.stringify(frozen.data),
 			page: frozen.page,
 			plain: frozen.plain,
 			authorName: author?.name ?? '',
@@ -83,7 +81,7 @@ export const approveArticle = (
 		const stops: Finding[] = blocking(await checkText(ctx, tx, row, frozen.facts, data, row.slotAt));
 		if (stops.length > 0)
 			return refuse('invalid', stopWords('It cannot be approved yet.', stops), { detail: stops });
-		const edition = await write(ctx, tx, row, head.id, frozen, data, head.source);
+		const edition = await write(ctx, tx, row, head.id, frozen, head.source);
 		const moved = await moveTo(ctx, tx, row, {
 			act: 'article.approve',
 			stage: after(row.stage, 'approve'),

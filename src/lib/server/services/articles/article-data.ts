@@ -16,6 +16,7 @@ import * as facts from '../../db/queries/campaign-facts';
 import * as recorded from '../../db/queries/campaign-readings';
 import * as duties from '../../db/queries/sample-duties';
 import * as knowledge from '../../db/queries/lab-knowledge';
+import * as terms from '../../db/queries/glossary-term';
 import * as ladders from '../../db/queries/ladder';
 import * as stock from '../../db/queries/stock-runs';
 import { publication } from '../../db/queries/settings';
@@ -132,10 +133,11 @@ export async function articleData(
 	{ db, now }: Pick<Context, 'db' | 'now'>,
 	campaignIds: number[]
 ): Promise<ArticleData> {
-	const [plans, readings, { zone }] = await Promise.all([
+	const [plans, readings, { zone }, glossary] = await Promise.all([
 		facts.forCampaigns(db, campaignIds),
 		recorded.forCampaigns(db, campaignIds),
-		publication(db)
+		publication(db),
+		terms.standing(db)
 	]);
 	const revisions = [...new Set(plans.map(({ head }) => head.rigRevisionId))];
 	const rigIds = [...new Set(plans.map(({ head }) => head.rigId))];
@@ -153,6 +155,7 @@ export async function articleData(
 		duties: rows.map(dutyOf),
 		...climbedAndSwept,
 		drifts: driftFacts(stockRuns),
+		glossary,
 		zone
 	};
 }

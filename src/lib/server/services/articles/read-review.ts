@@ -9,6 +9,7 @@ import * as articles from '../../db/queries/article';
 import type { ArticleRow } from '../../db/queries/article';
 import * as filing from '../../db/queries/article-filing';
 import * as audit from '../../db/queries/audit';
+import * as checks from '../../db/queries/article-check';
 import * as comments from '../../db/queries/comment';
 import * as corrections from '../../db/queries/correction';
 import * as editions from '../../db/queries/edition';
@@ -18,6 +19,7 @@ import { checkEdition, checkText, currentData } from './check-article';
 import { withPictures } from './known-pictures';
 import { renderNow } from './open-article';
 import { hasPage } from './take-article';
+import { templateInUse } from './templates-in-use';
 
 /** What the review page shows as the page: the edition that is approved or live, else the newest text as it would print. */
 interface Shown {
@@ -68,20 +70,22 @@ export async function readReview(ctx: Context, slug: string) {
 	const found = await articles.bySlug(ctx.db, slug);
 	if (!found) return refuse('not_found', 'There is no such article.');
 	const { article, authorName } = found;
-	const [shown, bound, said, printed, corrected, history, handedItOn] = await Promise.all([
+	const [shown, bound, said, printed, corrected, history, handedItOn, template, ticked] = await Promise.all([
 		pageOf(ctx, article),
 		articles.campaignsOf(ctx.db, article.id),
 		comments.ofArticle(ctx.db, article.id),
 		editions.listOf(ctx.db, article.id),
 		corrections.ofArticle(ctx.db, article.id),
 		audit.ofSubject(ctx.db, 'article', article.id, 40),
-		filing.wasAuthor(ctx.db, article.id, ctx.actor.id)
+		filing.wasAuthor(ctx.db, article.id, ctx.actor.id),
+		templateInUse(ctx.db, article.template),
+		checks.ofArticle(ctx.db, article.id)
 	]);
 	const subject = { authorId: article.authorId };
 	const mayResolve = may(ctx.actor, 'article.resolve', subject);
 	return done({
 		article,
-		kind: kindOf(article.template),
+		kind: template?.name ?? kindOf(article.template),
 		authorName,
 		isOwn: article.authorId === ctx.actor.id,
 		campaigns: bound.map(({ slug: name, name: title }) => ({ slug: name, name: title })),
@@ -90,6 +94,11 @@ export async function readReview(ctx: Context, slug: string) {
 		editions: printed,
 		corrections: corrected,
 		history: history.map(({ id, at, act, actorName, reason }) => ({ id, at, act, actorName, reason })),
+		checklist: (template?.checklist ?? []).map((item) => ({
+			...item,
+			ticked: ticked.find((one) => one.group === item.group && one.item === item.text) ?? null
+		})),
+		mayCheck: may(ctx.actor, 'article.check'),
 		moves: movesFor(
 			ctx.actor,
 			{ stage: article.stage, hasPage: hasPage(article) },

@@ -6,9 +6,9 @@ import type { ArticleStart } from '../../../schemas/article';
 import type { Context } from '../../context';
 import { inTransaction, isDuplicate } from '../../db/client';
 import * as campaigns from '../../db/queries/campaign-choice';
-import { templateOf } from '../../rendering/templates';
 import { articleData } from './article-data';
 import { createArticle } from './create-article';
+import { templateInUse } from './templates-in-use';
 
 const taken = 'Another article has this title, or one that makes the same address. Choose another.';
 
@@ -22,8 +22,8 @@ export async function startArticle(
 ): Promise<Outcome<{ slug: string }, 'forbidden' | 'invalid' | 'conflict'>> {
 	if (!may(ctx.actor, 'article.create'))
 		return refuse('forbidden', 'Only writers and editors start articles.');
-	const template = templateOf(input.template);
-	if (!template)
+	const template = await templateInUse(ctx.db, input.template);
+	if (!template || template.retired)
 		return refuse('invalid', 'There is no such template.', {
 			fields: { template: ['There is no such template any more. Choose another.'] }
 		});

@@ -4,11 +4,13 @@ import type { Act } from '$lib/domain/people/policy';
 import type { Outcome } from '$lib/domain/shared/outcome';
 import * as schemas from '$lib/schemas/article';
 import type { Context } from '$lib/server/context';
+import { checkInput } from '$lib/schemas/template';
 import { guarded, valueOrError } from '$lib/server/http/guarded';
 import { statusOf } from '$lib/server/http/problem';
 import { readPlainForm } from '$lib/server/http/read-plain-form';
 import { approveArticle } from '$lib/server/services/articles/approve-article';
 import { askChanges } from '$lib/server/services/articles/ask-changes';
+import { checkItem } from '$lib/server/services/articles/check-item';
 import { commentOnArticle, resolveComment } from '$lib/server/services/articles/comment-on-article';
 import { correctArticle } from '$lib/server/services/articles/correct-article';
 import { publishArticle } from '$lib/server/services/articles/publish-article';
@@ -56,6 +58,7 @@ export const actions = {
 	keep: act('keep', 'article.correct', plainMove, keepAsPrinted),
 	correct: act('correct', 'article.correct', correctionInput, correctArticle),
 	withdraw: act('withdraw', 'article.withdraw', withdrawal, withdrawArticle),
+	check: act('check', 'article.check', checkInput, checkItem),
 	comment: act('comment', 'article.comment', commentInput, commentOnArticle),
 	resolve: act('resolve', 'article.comment', commentResolve, resolveComment)
 };

@@ -31,6 +31,8 @@ export interface Heading {
 /** An article as set: its page, not yet sanitised, and all that stands on it. */
 export interface Rendered {
 	html: string;
+	/** The same page block by block, each with the line of the source it begins on; null for what has none. */
+	blocks: { line: number | null; html: string }[];
 	/** Each plate once, with its key. */
 	plates: { key: string; spec: PlateSpec }[];
 	errors: DirectiveError[];
@@ -51,10 +53,13 @@ export interface Rendered {
 export interface RenderOptions {
 	/** Where the plates' files are, with a slash at its end. */
 	platesAt?: string;
+	/** Gives the token tree, as a reader that knows the text from before does. */
+	read?: (source: string) => Token[];
 }
 
 const empty = (): Rendered => ({
 	html: '',
+	blocks: [],
 	plates: [],
 	errors: [],
 	bound: [],
@@ -172,7 +177,8 @@ class Setting {
 	finish(tokens: Token[]): Rendered {
 		const { out } = this;
 		closeNotes(tokens);
-		out.html = printMarkdown(tokens);
+		out.blocks = tokens.map((token) => ({ line: (token as Placed).line ?? 1, html: printMarkdown([token]) }));
+		out.html = out.blocks.map(({ html }) => html).join('');
 		out.plain = plainText(tokens);
 		out.wordCount = countWords(out.plain);
 		out.plates = unique(out.plates, (plate) => plate.key);
@@ -212,13 +218,13 @@ export function renderArticle(
 	source: string,
 	data: ArticleData,
 	draw: Draw,
-	{ platesAt = 'plates/' }: RenderOptions = {}
+	{ platesAt = 'plates/', read = parseMarkdown }: RenderOptions = {}
 ): Rendered {
 	const refusal = refusalOf(source);
 	if (refusal) return refused(refusal.message, refusal.line);
 	let tokens: Token[];
 	try {
-		tokens = parseMarkdown(source);
+		tokens = read(source);
 	} catch (error) {
 		if (!(error instanceof RangeError)) throw error;
 		return refused(
@@ -233,5 +239,6 @@ export function renderArticle(
 
 function refused(message: string, line: number): Rendered {
 	const error: DirectiveError = { line, directive: 'source', message, nearest: [] };
-	return { ...empty(), errors: [error], html: errorHtml(error, 'block') };
+	const html = errorHtml(error, 'block');
+	return { ...empty(), errors: [error], html, blocks: [{ line, html }] };
 }

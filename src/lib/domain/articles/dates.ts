@@ -13,14 +13,25 @@ const months = [
 	'December'
 ];
 
-/** Year, month and day of a moment in a zone; spelled out here, so that every platform prints the same words. */
-function dayIn(iso: string, zone: string): [year: number, month: number, day: number] {
-	const parts = new Intl.DateTimeFormat('en-GB', {
+/** A calendar of each zone: making one costs more than all that is printed with it. */
+const calendars = new Map<string, Intl.DateTimeFormat>();
+
+function calendarOf(zone: string): Intl.DateTimeFormat {
+	const known = calendars.get(zone);
+	if (known) return known;
+	const calendar = new Intl.DateTimeFormat('en-GB', {
 		timeZone: zone,
 		year: 'numeric',
 		month: 'numeric',
 		day: 'numeric'
-	}).formatToParts(new Date(iso));
+	});
+	calendars.set(zone, calendar);
+	return calendar;
+}
+
+/** Year, month and day of a moment in a zone; spelled out here, so that every platform prints the same words. */
+function dayIn(iso: string, zone: string): [year: number, month: number, day: number] {
+	const parts = calendarOf(zone).formatToParts(new Date(iso));
 	const part = (type: string) => Number(parts.find((one) => one.type === type)?.value);
 	return [part('year'), part('month'), part('day')];
 }

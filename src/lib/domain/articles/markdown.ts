@@ -1,5 +1,5 @@
 import { decodeHTML } from 'entities/decode';
-import { Marked, type MarkedExtension, type Token, type Tokens } from 'marked';
+import { Marked, type MarkedExtension, type Token, type Tokens, type TokensList } from 'marked';
 import { directiveSyntax, isDirective } from './directive-syntax';
 import { footnoteSyntax } from './footnote-syntax';
 import { element, escapeHtml } from './html';
@@ -162,12 +162,17 @@ function place(tokens: Token[], first: number): void {
 	}
 }
 
-/** The token tree of a source, each token with the line it starts on. RangeError where it is nested too deep. */
-export function parseMarkdown(source: string): Token[] {
-	const tokens = marked.lexer(source);
+/** The token tree of a source as it is read, nothing settled yet. RangeError where it is nested too deep. */
+export const lexMarkdown = (source: string): TokensList => marked.lexer(source);
+
+/** A tree as it was read, each token now with the line it starts on. */
+export function placed(tokens: Token[]): Token[] {
 	place(tokens, 1);
 	return tokens;
 }
+
+/** The token tree of a source, each token with the line it starts on. RangeError where it is nested too deep. */
+export const parseMarkdown = (source: string): Token[] => placed(lexMarkdown(source));
 
 /** Calls for every token of a tree, outermost first. */
 export function eachToken(tokens: Token[], visit: (token: Placed) => void): void {

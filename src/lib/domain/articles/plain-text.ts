@@ -52,4 +52,5 @@ export function plainText(tokens: Token[], voice: Voice = 'plain'): string {
 }
 
 /** Words of a plain text: runs that have a letter or a digit. */
-export const countWords = (text: string): number => (text.match(/[^\s]*[\p{L}\p{N}][^\s]*/gu) ?? []).length;
+export const countWords = (text: string): number =>
+	text.split(/\s+/).filter((word) => /[\p{L}\p{N}]/u.test(word)).length;

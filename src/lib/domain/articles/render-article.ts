@@ -12,6 +12,8 @@ export type { DirectiveError, Heading, Rendered } from './rendered';
 export interface RenderOptions {
 	/** Where the plates' files are, with a slash at its end. */
 	platesAt?: string;
+	/** Gives the token tree, as a reader that knows the text from before does. */
+	read?: (source: string) => Token[];
 }
 
 /**
@@ -24,13 +26,13 @@ export function renderArticle(
 	source: string,
 	data: ArticleData,
 	draw: Draw,
-	{ platesAt = 'plates/' }: RenderOptions = {}
+	{ platesAt = 'plates/', read = parseMarkdown }: RenderOptions = {}
 ): Rendered {
 	const refusal = refusalOf(source);
 	if (refusal) return refused(refusal.message, refusal.line);
 	let tokens: Token[];
 	try {
-		tokens = parseMarkdown(source);
+		tokens = read(source);
 	} catch (error) {
 		if (!(error instanceof RangeError)) throw error;
 		return refused(
@@ -43,5 +45,6 @@ export function renderArticle(
 
 function refused(message: string, line: number): Rendered {
 	const error: DirectiveError = { line, directive: 'source', message, nearest: [] };
-	return { ...emptyPage(), errors: [error], html: errorHtml(error, 'block') };
+	const html = errorHtml(error, 'block');
+	return { ...emptyPage(), errors: [error], html, blocks: [{ line, html }] };
 }

@@ -21,6 +21,8 @@ export interface Heading {
 /** An article as set: its page, not yet sanitised, and all that stands on it. */
 export interface Rendered {
 	html: string;
+	/** The same page block by block, each with the line of the source it begins on; null for what has none. */
+	blocks: { line: number | null; html: string }[];
 	/** Each plate once, with its key. */
 	plates: { key: string; spec: PlateSpec }[];
 	/** In the order of their lines. */
@@ -44,6 +46,7 @@ export interface Rendered {
 /** A page with nothing on it. */
 export const emptyPage = (): Rendered => ({
 	html: '',
+	blocks: [],
 	plates: [],
 	errors: [],
 	bound: [],

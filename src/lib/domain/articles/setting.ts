@@ -152,7 +152,12 @@ export class Setting {
 		const { out } = this;
 		const { cells, profiles, campaigns } = out.uses;
 		out.uses.terms = [...this.terms];
-		out.html = printMarkdown(tokens) + footnotes.html() + termsHtml(this.data, out.uses.terms);
+		out.blocks = [
+			...tokens.map((token) => ({ line: (token as Placed).line ?? 1, html: printMarkdown([token]) })),
+			{ line: null, html: footnotes.html() },
+			{ line: null, html: termsHtml(this.data, out.uses.terms) }
+		].filter(({ line, html }) => line !== null || html !== '');
+		out.html = out.blocks.map(({ html }) => html).join('');
 		out.plain = [plainText(tokens), footnotes.plain(), termsPlain(this.data, out.uses.terms)]
 			.filter((text) => text !== '')
 			.join('\n\n');

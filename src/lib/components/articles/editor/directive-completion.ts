@@ -1,17 +1,37 @@
-import type { Completion, CompletionContext, CompletionResult } from '@codemirror/autocomplete';
+import {
+	startCompletion,
+	type Completion,
+	type CompletionContext,
+	type CompletionResult
+} from '@codemirror/autocomplete';
+import type { EditorView } from '@codemirror/view';
 import type { ArticleData } from '../../../domain/articles/data';
 import { allDirectives } from '../../../domain/articles/directives/all-directives';
+import type { AnyDirective } from '../../../domain/articles/directives/shape';
+import { nameInWords } from '../../../domain/articles/names-in-words';
+import { writtenDirectives } from '../../../domain/articles/written-directives';
 
-const marks = { inline: ':', block: '::', container: ':::' } as const;
+const marks: Record<string, string> = { inline: ':', block: '::', container: ':::' };
+/** A directive is completed from what stands so far before the cursor. */
+const reach = 700;
 
-/** What has been written between the braces before the cursor. */
-const given = (text: string): Record<string, string> =>
-	Object.fromEntries(
-		[...text.matchAll(/([\w-]+)=(?:"([^"]*)"|([^\s"{}]*))/g)].map(([, name, quoted, bare]) => [
-			name ?? '',
-			quoted ?? bare ?? ''
-		])
-	);
+/** Puts text in place of what was typed, the cursor `back` signs before its end, and offers what comes next. */
+const putting =
+	(text: string, back: number) =>
+	(view: EditorView, _completion: Completion, from: number, to: number): void => {
+		view.dispatch({
+			changes: { from, to, insert: text },
+			selection: { anchor: from + text.length - back },
+			userEvent: 'input.complete'
+		});
+		if (back > 0 || text.endsWith('=')) startCompletion(view);
+	};
+
+function applied(one: AnyDirective): Completion['apply'] {
+	const head = `${marks[one.level] ?? ':'}${one.name}`;
+	if ((one.level as string) === 'container') return putting(`${head}\n\n:::`, 4);
+	return one.attributes.length > 0 || one.level === 'inline' ? putting(`${head}{}`, 1) : head;
+}
 
 function names(before: string, from: number): CompletionResult | null {
 	const typed = /(^|[^:\w]):{1,3}([a-z]*)$/.exec(before);
@@ -24,38 +44,48 @@ function names(before: string, from: number): CompletionResult | null {
 		options: allDirectives
 			.filter((one) => (onOwnLine || one.level === 'inline') && one.name.startsWith(typed[2] ?? ''))
 			.map((one): Completion => ({
-				label: `${marks[one.level]}${one.name}`,
+				label: `${marks[one.level] ?? ':'}${one.name}`,
 				detail: one.words,
-				apply: `${marks[one.level]}${one.name}${one.attributes.length > 0 && one.level !== 'container' ? '{' : ''}`
+				apply: applied(one)
 			}))
 	};
 }
 
+/** Names in a list with commas are those of the one attribute that takes a single one. */
+const single: Record<string, string> = { profiles: 'subject' };
+
+function valuesOf(one: AnyDirective, name: string, data: ArticleData, given: Record<string, string>) {
+	const known = one.attributes.find((attribute) => attribute.name === (single[name] ?? name));
+	return [...(known?.values(data, given) ?? [])].map((label): Completion => ({
+		label,
+		detail: nameInWords(name, label, data)
+	}));
+}
+
 function attributes(before: string, from: number, data: ArticleData): CompletionResult | null {
-	const open = /:{1,3}([a-z][\w-]*)\{([^{}]*)$/.exec(before);
-	const one = open && allDirectives.find((directive) => directive.name === open[1]);
-	if (!open || !one) return null;
-	const inside = open[2] ?? '';
-	const value = /([\w-]+)=("?)([^\s"{}]*)$/.exec(inside);
-	if (value) {
-		const attribute = one.attributes.find((known) => known.name === value[1]);
-		const options = attribute?.values(data, given(inside)) ?? [];
-		const typed = value[3] ?? '';
-		return { from: from - typed.length, options: options.map((label) => ({ label })), validFor: /^[\w-]*$/ };
+	const written = writtenDirectives(before).at(-1);
+	const one = written && allDirectives.find((directive) => directive.name === written.name);
+	if (!one || written.closed || !written.inside || written.to !== before.length) return null;
+	const inside = before.slice(written.inside.from);
+	const given = Object.fromEntries(written.attributes.map(({ name, value }) => [name, value]));
+	const value = /([\w-]+)=(?:"[^"]*|[^\s"{}]*)$/.exec(inside);
+	if (value?.[1] !== undefined) {
+		const typed = /[\w-]*$/.exec(inside)?.[0] ?? '';
+		const options = valuesOf(one, value[1], data, given);
+		return options.length === 0 ? null : { from: from - typed.length, options, validFor: /^[\w-]*$/ };
 	}
 	const typed = /(?:^|\s)([\w-]*)$/.exec(inside)?.[1];
 	if (typed === undefined) return null;
-	const used = given(inside);
 	return {
 		from: from - typed.length,
 		validFor: /^[\w-]*$/,
 		options: one.attributes
-			.filter((attribute) => !(attribute.name in used))
-			.map((attribute, index) => ({
-				label: attribute.name,
-				detail: attribute.words,
-				apply: `${attribute.name}=`,
-				boost: (attribute.required ? 50 : 0) - index
+			.filter(({ name }) => !(name in given) || name === typed)
+			.map(({ name, words, required }, index): Completion => ({
+				label: name,
+				detail: required ? `${words} (needed)` : words,
+				apply: putting(`${name}=`, 0),
+				boost: (required ? 50 : 0) - index
 			}))
 	};
 }
@@ -64,7 +94,11 @@ function attributes(before: string, from: number, data: ArticleData): Completion
 export const directiveCompletion =
 	(data: () => ArticleData) =>
 	(context: CompletionContext): CompletionResult | null => {
-		const line = context.state.doc.lineAt(context.pos);
-		const before = line.text.slice(0, context.pos - line.from);
-		return attributes(before, context.pos, data()) ?? names(before, context.pos);
+		const { doc } = context.state;
+		const line = doc.lineAt(context.pos);
+		const start = doc.lineAt(Math.max(0, context.pos - reach)).from;
+		return (
+			attributes(doc.sliceString(start, context.pos), context.pos, data()) ??
+			names(line.text.slice(0, context.pos - line.from), context.pos)
+		);
 	};

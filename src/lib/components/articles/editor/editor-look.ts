@@ -30,10 +30,6 @@ const look = EditorView.theme({
 		background: 'color-mix(in srgb, var(--color-blue) 22%, transparent)'
 	},
 	'.cm-directive': { color: 'var(--color-blue)', fontWeight: '500' },
-	'.cm-directive-wrong': {
-		textDecoration: 'underline wavy var(--color-red)',
-		textUnderlineOffset: '4px'
-	},
 	'.cm-tooltip': {
 		background: 'var(--color-sheet)',
 		border: '1px solid var(--color-ink)',
@@ -56,23 +52,85 @@ const look = EditorView.theme({
 		marginLeft: '12px'
 	},
 	'.cm-completionIcon': { display: 'none' },
-	'.cm-panels': {
-		background: 'var(--color-sheet)',
-		color: 'var(--color-ink)',
-		fontFamily: 'var(--font-sans)'
+	// The library's underline is a picture in a data: address; a text decoration follows our colours.
+	'.cm-lintRange-error': {
+		backgroundImage: 'none',
+		textDecoration: 'underline wavy var(--color-red)',
+		textUnderlineOffset: '4px'
 	},
-	'.cm-panels.cm-panels-bottom': { borderTop: '1px solid var(--color-rule)' },
-	'.cm-textfield': {
-		background: 'var(--color-paper)',
-		border: '1px solid var(--color-edge)',
-		borderRadius: '3px'
+	'.cm-lintRange-active': { backgroundColor: 'color-mix(in srgb, var(--color-red) 14%, transparent)' },
+	'.cm-lintPoint': { display: 'none' },
+	'.cm-diagnostic': {
+		maxWidth: '34rem',
+		padding: '8px 12px',
+		fontFamily: 'var(--font-sans)',
+		fontSize: '13.5px',
+		lineHeight: '1.45'
 	},
-	'.cm-button': {
+	'.cm-diagnostic-error': { borderLeft: '3px solid var(--color-red)' },
+	'.cm-diagnosticAction': {
+		margin: '6px 10px 0 0',
+		padding: '2px 8px',
 		background: 'none',
 		border: '1px solid var(--color-blue)',
 		borderRadius: '3px',
 		color: 'var(--color-blue)'
 	},
+	'.cm-peek': {
+		maxWidth: '26rem',
+		padding: '8px 12px',
+		fontFamily: 'var(--font-sans)',
+		fontSize: '13.5px',
+		lineHeight: '1.45'
+	},
+	'.cm-peek p': { margin: '0' },
+	'.cm-peek-value': { fontFamily: 'var(--font-serif)', fontSize: '20px', fontWeight: '600' },
+	'.cm-peek-title': { fontFamily: 'var(--font-serif)', fontWeight: '600' },
+	'.cm-peek-sub': { color: 'var(--color-graphite)' },
+	'.cm-peek-plate svg': { display: 'block', width: '24rem', height: 'auto', marginTop: '6px' },
+	// Of the two drawings of a plate the wide one.
+	'.cm-peek-plate .plate-narrow': { display: 'none' },
+	'.cm-awaited': {
+		padding: '1px 8px',
+		borderBottom: '1px dashed var(--color-edge)',
+		fontFamily: 'var(--font-sans)',
+		color: 'var(--color-graphite)'
+	},
+	'.cm-panels': {
+		background: 'var(--color-sheet)',
+		color: 'var(--color-ink)',
+		fontFamily: 'var(--font-sans)',
+		fontSize: '13.5px'
+	},
+	'.cm-panels.cm-panels-top': { borderBottom: '1px solid var(--color-rule)' },
+	'.cm-panels.cm-panels-bottom': { borderTop: '1px solid var(--color-rule)' },
+	'.cm-panel.cm-search': { padding: '8px 40px 8px 6px', lineHeight: '1.9' },
+	'.cm-panel.cm-search label': { fontSize: 'inherit', marginRight: '10px' },
+	'.cm-panel.cm-search [name=close]': {
+		top: '6px',
+		right: '8px',
+		padding: '0 6px',
+		fontSize: '18px',
+		color: 'var(--color-ink)'
+	},
+	'.cm-textfield': {
+		background: 'var(--color-paper)',
+		border: '1px solid var(--color-edge)',
+		borderRadius: '3px',
+		color: 'var(--color-ink)',
+		fontSize: 'inherit',
+		padding: '2px 6px'
+	},
+	'.cm-button': {
+		background: 'none',
+		border: '1px solid var(--color-blue)',
+		borderRadius: '3px',
+		color: 'var(--color-blue)',
+		fontSize: 'inherit',
+		padding: '1px 8px'
+	},
+	'.cm-textfield:focus-visible, .cm-button:focus-visible, .cm-panel input:focus-visible, .cm-panel button:focus-visible, .cm-diagnosticAction:focus-visible':
+		{ outline: '2px solid var(--color-blue)', outlineOffset: '1px' },
 	'.cm-searchMatch': { backgroundColor: 'var(--color-brass-tint)' },
 	'.cm-searchMatch-selected': { outline: '1px solid var(--color-brass)' },
 	'.cm-matchingBracket, &.cm-focused .cm-matchingBracket': { backgroundColor: 'var(--color-blue-tint)' }
@@ -89,35 +147,26 @@ const marksOfText = HighlightStyle.define([
 
 const written = /:{1,3}[a-z][\w-]*(?:\{[^{}\n]*\}?)?/gi;
 
-/** Colours directives, and underlines those on lines where the page has an error. */
-function directiveMarks(wrongLines: () => ReadonlySet<number>) {
-	const decorator = new MatchDecorator({
-		regexp: written,
-		decorate(add, from, to, match, view) {
-			const before = view.state.sliceDoc(Math.max(0, from - 1), from);
-			// A colon in a word or a time is no directive, nor one without braces in a sentence.
-			if (/[\w:]/.test(before) || !(match[0].startsWith('::') || match[0].includes('{'))) return;
-			const wrong = wrongLines().has(view.state.doc.lineAt(from).number);
-			add(from, to, Decoration.mark({ class: wrong ? 'cm-directive cm-directive-wrong' : 'cm-directive' }));
+/** Colours directives. */
+const decorator = new MatchDecorator({
+	regexp: written,
+	decorate(add, from, to, match, view) {
+		const before = view.state.sliceDoc(Math.max(0, from - 1), from);
+		// A colon in a word or a time is no directive, nor one without braces in a sentence.
+		if (/[\w:]/.test(before) || !(match[0].startsWith('::') || match[0].includes('{'))) return;
+		add(from, to, Decoration.mark({ class: 'cm-directive' }));
+	}
+});
+
+const directiveMarks = ViewPlugin.define<{ decorations: DecorationSet; update(update: ViewUpdate): void }>(
+	(view) => ({
+		decorations: decorator.createDeco(view),
+		update(update) {
+			this.decorations = decorator.updateDeco(update, this.decorations);
 		}
-	});
-	return ViewPlugin.define<{ decorations: DecorationSet; update(update: ViewUpdate): void }>(
-		(view) => ({
-			decorations: decorator.createDeco(view),
-			update(update) {
-				const marked = update.transactions.some((one) => one.isUserEvent('calipress.marks'));
-				this.decorations = marked
-					? decorator.createDeco(update.view)
-					: decorator.updateDeco(update, this.decorations);
-			}
-		}),
-		{ decorations: (plugin) => plugin.decorations }
-	);
-}
+	}),
+	{ decorations: (plugin) => plugin.decorations }
+);
 
 /** Everything about how the editor looks. */
-export const editorLook = (wrongLines: () => ReadonlySet<number>) => [
-	look,
-	syntaxHighlighting(marksOfText),
-	directiveMarks(wrongLines)
-];
+export const editorLook = [look, syntaxHighlighting(marksOfText), directiveMarks];

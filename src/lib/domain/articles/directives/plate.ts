@@ -5,6 +5,7 @@ import { scoresSpec } from '../plates/scores-spec';
 import { plateKinds, type PlateSpec } from '../plates/spec';
 import { unknownName } from '../names-near';
 import type { ArticleData } from '../data';
+import { onceFor } from '../once-for';
 import { attribute, findBaseline, findCampaign, findWorkload } from './lookup';
 import { ladderPlate, sweepPlate } from './plate-of-bench';
 import { chosen, driftPlate, overallPlate, tradeOffPlate, valuePlate } from './plate-of-comparison';
@@ -147,7 +148,8 @@ export const plate = directive<PlateSpec>({
 	],
 	resolve: (call, data) => {
 		const { kind = 'scores' } = call.attributes;
-		return isKind(kind) ? byKind[kind](call, data) : missing(`There is no plate of the kind “${kind}”.`);
+		if (!isKind(kind)) return missing(`There is no plate of the kind “${kind}”.`);
+		return onceFor(data, JSON.stringify(call.attributes), () => byKind[kind](call, data));
 	},
 	render: (spec, { draw, call, platesAt }) => ({
 		html: plateFigure(spec, draw(spec), call.line, platesAt),

@@ -145,11 +145,18 @@ function subjectOf(spec: PlateSpec): string {
 	}
 }
 
+/** A specification is never changed once made, so its name is computed once. */
+const keys = new WeakMap<PlateSpec, string>();
+
 /**
  * A plate's name: the same for the same figures, another for others. It is the key of the preview's drawings
  * and the name of the edition's files; at most 60 characters.
  * @example plateKey(spec) // 'scores-tile-render-0f3k2m9x1ab'
  */
 export function plateKey(spec: PlateSpec): string {
-	return `${spec.kind}-${subjectOf(spec).slice(0, 38).replace(/-+$/, '')}-${hashOf(JSON.stringify(spec))}`;
+	const known = keys.get(spec);
+	if (known !== undefined) return known;
+	const key = `${spec.kind}-${subjectOf(spec).slice(0, 38).replace(/-+$/, '')}-${hashOf(JSON.stringify(spec))}`;
+	keys.set(spec, key);
+	return key;
 }

@@ -1,0 +1,95 @@
+import { unitOf } from '../../shared/units';
+import type { WorkloadFacts } from '../../bench/figures';
+
+/** What a claim of direction says: of which quantity, and which way. */
+export interface Saying {
+	pattern: RegExp;
+	/** The way it says things go for the quantity: better or worse, its number up or down, or no difference. */
+	way: 'better' | 'worse' | 'lower' | 'higher' | 'same' | 'not-better' | 'not-worse';
+	/** Which workloads it can be about. */
+	about: 'speed' | 'temperature' | 'sound' | 'power' | 'energy' | 'any';
+}
+
+const degree =
+	'(?:(?:a (?:little|bit|touch|shade|hair)|slightly|much|far|clearly|noticeably|considerably|even|a lot|no|not|not any|any|never) )?';
+const saying = (words: string, way: Saying['way'], about: Saying['about']): Saying => ({
+	pattern: new RegExp(`(?<![\\p{L}-])${degree}(?:${words})(?![\\p{L}-])`, 'giu'),
+	way,
+	about
+});
+
+/** Words that say which way something goes, without a number. */
+export const sayings: readonly Saying[] = [
+	saying(
+		'no (?:gain|benefit|advantage|improvement|speed-?up)(?: (?:worth naming|to speak of|at all|whatever))?|gains? nothing|gained nothing|wins? nothing|brings nothing|buys nothing',
+		'not-better',
+		'any'
+	),
+	saying('no (?:loss|penalty)|loses? nothing|lost nothing|costs? nothing', 'not-worse', 'any'),
+	saying(
+		'(?:makes? )?no (?:real |measurable )?difference(?: that matters)?|the same(?= (?:speed|time|rate|as|either|with|under|in both|for both)|[.,;]|$)|no (?:different|change)|unchanged|indistinguishable|as (?:fast|quick|cool|quiet|loud|hot) as|just as (?:fast|quick|cool|quiet|loud|hot)|does not (?:change|move|differ)|equally (?:fast|quick|cool|quiet|loud|hot)|on a par|neither faster nor slower',
+		'same',
+		'any'
+	),
+	saying('faster|quicker|sped up|speeds up', 'better', 'speed'),
+	saying('slower|slows down|slowed down', 'worse', 'speed'),
+	saying('cooler', 'lower', 'temperature'),
+	saying('hotter|warmer', 'higher', 'temperature'),
+	saying('quieter', 'lower', 'sound'),
+	saying('louder|noisier', 'higher', 'sound'),
+	saying('more efficient|more frugal', 'better', 'energy'),
+	saying('less efficient', 'worse', 'energy'),
+	saying('draws? less(?: power)?|uses? less power|less power', 'lower', 'power'),
+	saying('draws? more(?: power)?|uses? more power|more power', 'higher', 'power'),
+	saying('uses? less energy|less energy', 'lower', 'energy'),
+	saying('uses? more energy|more energy', 'higher', 'energy'),
+	saying('better', 'better', 'any'),
+	saying('worse', 'worse', 'any'),
+	saying(
+		'(?<=\\b(?:is|are|was|were|gets?|falls?|comes?|stays?|sits?) (?:\\p{L}+ )?)(?:lower|shorter)',
+		'lower',
+		'any'
+	),
+	saying(
+		'(?<=\\b(?:is|are|was|were|gets?|rises?|comes?|stays?|sits?) (?:\\p{L}+ )?)(?:higher|longer)',
+		'higher',
+		'any'
+	),
+	saying('gains|improves|wins', 'better', 'any'),
+	saying('loses|suffers', 'worse', 'any')
+];
+
+const soundWords = /\b(?:loud|noise|sound)/i;
+const warmWords = /\b(?:temperature|heat|thermal|warm)/i;
+
+/** Whether words of one sort can be said of a workload at all. */
+export function fitsAbout(
+	workload: Pick<WorkloadFacts, 'unit' | 'quantity' | 'name'>,
+	about: Saying['about']
+): boolean {
+	const kind = unitOf(workload.unit)?.kind;
+	const said = `${workload.quantity} ${workload.name}`;
+	const isSound = kind === 'sound' || /^sones?$/.test(workload.unit) || soundWords.test(said);
+	const isWarm = kind === 'temperature' || warmWords.test(workload.quantity);
+	switch (about) {
+		case 'any':
+			return true;
+		case 'sound':
+			return isSound;
+		case 'temperature':
+			return isWarm;
+		case 'power':
+			return kind === 'power' || kind === 'energy';
+		case 'energy':
+			return kind === 'energy' || kind === 'power' || /efficien|per watt/i.test(said);
+		case 'speed':
+			return (
+				!isSound &&
+				!isWarm &&
+				kind !== 'power' &&
+				kind !== 'energy' &&
+				kind !== 'voltage' &&
+				kind !== 'current'
+			);
+	}
+}

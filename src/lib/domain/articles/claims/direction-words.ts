@@ -27,7 +27,7 @@ export const sayings: readonly Saying[] = [
 	),
 	saying('no (?:loss|penalty)|loses? nothing|lost nothing|costs? nothing', 'not-worse', 'any'),
 	saying(
-		'(?:makes? )?no (?:real |measurable )?difference(?: that matters)?|the same(?= (?:speed|time|rate|as|either|with|under|in both|for both)|[.,;]|$)|no (?:different|change)|unchanged|indistinguishable|as (?:fast|quick|cool|quiet|loud|hot) as|just as (?:fast|quick|cool|quiet|loud|hot)|does not (?:change|move|differ)|equally (?:fast|quick|cool|quiet|loud|hot)|on a par|neither faster nor slower',
+		'no (?:real |measurable )?difference(?: that matters)?|the same(?= (?:speed|time|rate|as|either|with|under|in both|for both)|[.,;]|$)|no (?:different|change)|unchanged|indistinguishable|as (?:fast|quick|cool|quiet|loud|hot) as|just as (?:fast|quick|cool|quiet|loud|hot)|does not (?:change|move|differ)|equally (?:fast|quick|cool|quiet|loud|hot)|on a par|neither faster nor slower',
 		'same',
 		'any'
 	),
@@ -79,7 +79,7 @@ export function fitsAbout(
 		case 'temperature':
 			return isWarm;
 		case 'power':
-			return kind === 'power' || kind === 'energy';
+			return kind === 'power';
 		case 'energy':
 			return kind === 'energy' || kind === 'power' || /efficien|per watt/i.test(said);
 		case 'speed':

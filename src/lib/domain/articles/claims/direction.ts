@@ -6,7 +6,7 @@ import type { CampaignData } from '../data';
 import { front, type BenchFacts, type Datum } from './bench-facts';
 import { fitsAbout, sayings, type Saying } from './direction-words';
 import { judged, type Judged } from './judged';
-import { linkOf, overOf, words, type Surroundings } from './scope';
+import { linkOf, namedIn, overOf, words, type Link, type Surroundings } from './scope';
 
 /** A claim of direction in a passage. */
 export interface Direction {
@@ -154,6 +154,24 @@ function negated(text: string, from: number, said: string): boolean {
 }
 const turned: Partial<Record<Saying['way'], Saying['way']>> = { better: 'not-better', worse: 'not-worse' };
 
+/** The workloads a saying is about: those named near it of which it can be said, else the only one there is. */
+function workloadsOf({ about }: Saying, s: Surroundings, facts: BenchFacts, profile: Link): string[] {
+	const link = linkOf('workload', s);
+	const sayable = (slugs: string[]) =>
+		slugs.filter((slug) =>
+			facts.data.campaigns.some((one) =>
+				one.workloads.some((workload) => workload.slug === slug && fitsAbout(workload, about))
+			)
+		);
+	const named = sayable(link.slugs);
+	if (named.length > 0 && (link.hold === 'clause' || link.hold === 'sentence')) return named;
+	const near = sayable(namedIn(s, 'workload'));
+	if (near.length === 1) return near;
+	const only = onlyFor(facts, about);
+	if (only.length > 0) return only;
+	return link.hold === 'context' && profile.hold === 'clause' ? named : [];
+}
+
 /** Judges one saying; null where nothing says of what it is said. */
 export function judgeDirection(
 	found: { from: number; to: number; saying: Saying },
@@ -177,16 +195,8 @@ export function judgeDirection(
 		found.saying.way !== 'same'
 	)
 		return null;
-	const link = linkOf('workload', s);
 	const profile = linkOf('profile', s);
-	const slugs =
-		link.hold === 'clause' || link.hold === 'sentence'
-			? link.slugs
-			: onlyFor(facts, found.saying.about).length > 0
-				? onlyFor(facts, found.saying.about)
-				: link.hold === 'context' && profile.hold === 'clause'
-					? link.slugs
-					: [];
+	const slugs = workloadsOf(found.saying, s, facts, profile);
 	if (slugs.length === 0) return null;
 	const over = overOf(s);
 	const is = negated(text, from, text.slice(from, to));
@@ -196,7 +206,10 @@ export function judgeDirection(
 			.flatMap((workload) => {
 				const base =
 					over.find((slug) => campaign.profiles.some((one) => one.slug === slug)) ?? campaign.baseline;
-				const named = profile.slugs.filter((slug) => slug !== base);
+				const named =
+					[profile.slugs, namedIn(s, 'profile')]
+						.map((some) => some.filter((slug) => slug !== base))
+						.find((some) => some.length > 0) ?? [];
 				const profiles =
 					named.length > 0
 						? named

@@ -82,11 +82,15 @@ const at = (pattern: RegExp, text: string, index: number): RegExpExecArray | nul
 const valueOf = (text: string, power = 0): Decimal[] =>
 	/^\d/.test(text) ? readingsOf(text, power) : [decimalOf(String(spelledValue(text)), power)];
 
+/** Halves of things that nobody measures. */
+const figurative =
+	/^ (?:of )?(?:the|our|a) (?:story|battle|team|staff|fun|truth|trick|people|world|job|room|table|day|night|week|month|year|evening|way|answer|point|lab)\b/i;
+
 /** What says that a word such as “half” is a part of something measured, and not of an hour or of a pair. */
 const partOf =
 	/^ ?(?:of|as|the|their|its|that|this|what|less|more|faster|slower|quicker|shorter|longer|lower|higher|cooler|quieter|louder|hotter|again|better|worse)(?![\p{L}])/iu;
 const timesOf =
-	/^ (?:as|the|that|what|its|their|faster|slower|quicker|more|less|better|longer|higher|over)(?![\p{L}])/iu;
+	/^ (?:as|the|that(?= (?:of|which|under|with))|what|its|their|faster|slower|quicker|more|less|better|longer|higher|over)(?![\p{L}])/iu;
 
 /** Whether a ratio in a word is one of its own kind; “twice” alone says how often, “half an hour” how long. */
 function isRatioWord(word: WordRatio, said: string, before: string, after: string): boolean {
@@ -94,13 +98,15 @@ function isRatioWord(word: WordRatio, said: string, before: string, after: strin
 	if (/\b(?:by|a factor of|than)$/i.test(before) && !/^ (?:a|an)\b/i.test(after)) return true;
 	if (/^(?:double|triple)$/i.test(said)) return /^ (?:the|that|its|their|what)(?![\p{L}])/iu.test(after);
 	if (word.kind === 'times') return timesOf.test(after) && !/^ as (?:many )?(?:soon|often)/i.test(after);
+	if (/\b(?:cut|cuts|cutting|slash|slashes)\b[^.,;]*\bin$/i.test(before)) return true;
+	if (figurative.test(after)) return false;
 	if (/\b(?:first|second|other|top|lower|upper|each|every|another)$/i.test(before)) return false;
-	return partOf.test(after) && !/^ the (?:time|day|night|team|lab|staff)(?= we)/i.test(after);
+	return partOf.test(after);
 }
 
 function wordFigure(text: string, from: number, said: string): Figure | null {
 	const word = wordRatio(said);
-	const before = text.slice(Math.max(0, from - 30), from).trimEnd();
+	const before = text.slice(Math.max(0, from - 60), from).trimEnd();
 	const after = text.slice(from + said.length, from + said.length + 40);
 	if (!word || !isRatioWord(word, said, before, after)) return null;
 	const to = from + said.length;
@@ -143,6 +149,10 @@ const notCounted = new Set(
 	)
 );
 
+/** A verb of change before “from 61 to 70”, which makes two values of it and no range. */
+const changes =
+	/\b(?:climb|rise|rose|fall|fell|drop|go|went|grow|grew|increase|decrease|improve|sink|shrink|cut|come|came|move|take|took|slow|speed|bring|brought|lower|raise|reduce)\w*\b[^.;]{0,60}$/i;
+
 function digitFigure(text: string, start: number, said: string, units: UnitReader): Figure {
 	const isSpelled = !/^\d/.test(said);
 	const signed = /(?:^|[\s(\u00a0~≈])([+\u2212±-])$/.exec(text.slice(Math.max(0, start - 2), start))?.[1];
@@ -156,8 +166,9 @@ function digitFigure(text: string, start: number, said: string, units: UnitReade
 	let { quantity, to } = units.read(text, end);
 	let high: Decimal | null = null;
 	let margin: Decimal | null = null;
-	const ranged = at(rangeMark, text, to);
 	const before = text.slice(Math.max(0, from - 30), from).trimEnd();
+	const ranged = at(rangeMark, text, to);
+	const moves = /\bfrom$/i.test(before) && changes.test(text.slice(0, from));
 	const joined = /\band\b/i.test(ranged?.[0] ?? '')
 		? /\bbetween$/i.test(before)
 		: !/\bfrom$/i.test(before) || quantity.kind === 'bare';
@@ -166,7 +177,8 @@ function digitFigure(text: string, start: number, said: string, units: UnitReade
 		const secondEnd = to + ranged[0].length;
 		const next = units.read(text, secondEnd);
 		const same = quantity.kind === 'bare' || JSON.stringify(quantity) === JSON.stringify(next.quantity);
-		if (same && next.quantity.kind !== 'bare') {
+		if (moves && quantity.kind === 'bare') quantity = next.quantity;
+		else if (same && next.quantity.kind !== 'bare') {
 			high = valueOf(second)[0] ?? null;
 			quantity = next.quantity;
 			to = next.to;

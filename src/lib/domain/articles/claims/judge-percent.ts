@@ -1,6 +1,6 @@
 import { agrees, roundsTo, sizeRoundsTo, type Decimal } from './decimal';
 import type { Datum, Held } from './bench-facts';
-import { clearlyMeant, judged, nearestTo, tiers, type Case, type Judged } from './judged';
+import { clearlyMeant, gaining, judged, nearestTo, tiers, type Case, type Judged } from './judged';
 import { words } from './scope';
 import { senseOf, type Sense } from './sense';
 import { printedGain } from '../../shared/quantity';
@@ -86,7 +86,7 @@ function plainShares({ figure, facts, s, profile, workload, settings }: Case): D
 	const [printed] = figure.readings;
 	if (!printed) return null;
 	const clause = words(s.passage.text.slice(s.clause.from, s.clause.to));
-	const spread = /\b(?:spread|scatter|variation|deviation|varies|varied|repeat(?:s|ability)?)\b/i.test(
+	const spread = /\b(?:spread|scatter|variation|deviation|vary|varies|varied|repeat(?:s|ability)?)\b/i.test(
 		clause
 	);
 	const share = (one: Datum) => one.unit === '%' && roundsTo(one.value, printed);
@@ -104,8 +104,20 @@ function plainShares({ figure, facts, s, profile, workload, settings }: Case): D
 		: (known.find((one) => profile.slugs.includes(one.profile ?? '')) ?? null);
 }
 
+/** A gain of one of the sentence's profiles over another, where the sentence does not say which over which. */
+function betweenNamed(of: Case, sense: Sense): Held | null {
+	const { facts, near, workload } = of;
+	const pool = near.profiles
+		.flatMap((over) => facts.gains(over))
+		.filter(
+			(one) => near.profiles.includes(one.profile ?? '') && workload.slugs.includes(one.workload ?? '')
+		);
+	return find(pool, of, sense)?.datum ?? null;
+}
+
 /** A percentage held against gains, overall gains, and what else is in percent. */
-export function judgePercent(of: Case): Judged {
+export function judgePercent(given: Case): Judged {
+	const of = gaining(given);
 	const { figure, s, facts, over } = of;
 	const [printed] = figure.readings;
 	if (!printed) return judged('not-backed');
@@ -116,7 +128,7 @@ export function judgePercent(of: Case): Judged {
 		overallWords.test(of.workload.hold === 'clause' ? clause : sentence) &&
 		!(of.workload.hold === 'clause' && !overallWords.test(clause));
 	const other = plainShares(of);
-	if (other && of.workload.hold !== 'clause') return judged('agrees', other);
+	if (other && (other.kind === 'spread' || of.workload.hold !== 'clause')) return judged('agrees', other);
 	const all = isOverall
 		? over.flatMap((one) => facts.overalls(one))
 		: over.flatMap((one) => facts.gains(one));
@@ -137,6 +149,8 @@ export function judgePercent(of: Case): Judged {
 		}
 	}
 	if (other) return judged('agrees', other);
+	const between = found.length > 0 && of.near.profiles.length > 1 ? betweenNamed(of, sense) : null;
+	if (between) return judged('agrees', between);
 	const nearest = nearestTo(meant, Math.abs(printed.value), (one) => rising(one, sense));
 	const clear = isOverall ? of.profile.hold !== 'none' && meant.length === 1 : clearlyMeant(of, meant);
 	return judged(clear && nearest ? 'contradicts' : 'not-backed', nearest);

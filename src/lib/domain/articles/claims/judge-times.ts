@@ -1,7 +1,7 @@
 import { printedRatio } from '../../shared/quantity';
 import type { Held } from './bench-facts';
 import { agrees, roundsTo, type Decimal, type Hedge } from './decimal';
-import { clearlyMeant, judged, nearestTo, tiers, type Case, type Judged } from './judged';
+import { clearlyMeant, gaining, judged, nearestTo, tiers, type Case, type Judged } from './judged';
 import { words } from './scope';
 
 /** What a multiple is a multiple of. */
@@ -66,7 +66,8 @@ function fasterWhy(printed: Decimal): string {
 }
 
 /** A multiple held against the ratios of gains. */
-export function judgeTimes(of: Case): Judged {
+export function judgeTimes(given: Case): Judged {
+	const of = gaining(given);
 	const { figure, facts, over } = of;
 	const [said] = figure.readings;
 	if (!said) return judged('not-backed');

@@ -48,6 +48,17 @@ export interface Case {
 	near: { workloads: string[]; profiles: string[] };
 }
 
+/**
+ * The profile of a gain: the baseline cannot gain over itself, so where it is the one named, another of the sentence
+ * is meant.
+ */
+export function gaining(of: Case): Case {
+	const bases = of.over.flatMap((slug) => slug ?? of.facts.data.campaigns.map((one) => one.baseline));
+	if (of.profile.slugs.length === 0 || !of.profile.slugs.every((slug) => bases.includes(slug))) return of;
+	const slugs = of.near.profiles.filter((slug) => !bases.includes(slug));
+	return { ...of, profile: slugs.length > 0 ? { slugs, hold: 'sentence' } : { slugs: [], hold: 'none' } };
+}
+
 /** A claim with all that its surroundings name. */
 export function caseOf(figure: Figure, s: Surroundings, facts: BenchFacts): Case {
 	const over = overOf(s);

@@ -86,6 +86,7 @@ class Builder {
 		const key = words.join(' ');
 		const known = this.aliases.get(key);
 		// A name that several things have stands for all of them.
+		if (known && !after) delete known.after;
 		if (known && known.named.kind === named.kind && 'slugs' in known.named && 'slugs' in named) {
 			known.named.slugs = [...new Set([...known.named.slugs, ...named.slugs])];
 			return;
@@ -109,6 +110,7 @@ class Builder {
 				this.add([`${head.replace(/e$/, '')}ing`], named(), false);
 		}
 		const first = words[0];
+		if (first && quantity === 'power' && words.length > 1) this.add([first], named(), false, new Set(['at']));
 		if (first && words.length > 1 && words.length < 4 && first.length > 3 && head)
 			this.add([first, 'test'], named(), false);
 		if (!generic.has(quantity)) {

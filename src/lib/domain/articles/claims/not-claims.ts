@@ -60,7 +60,7 @@ const patterns: [NotClaim, RegExp][] = [
 	[
 		'reference',
 		new RegExp(
-			`(?<![\\p{L}])(?:figures?|figs?\\.|tables?|steps?|sections?|parts?|chapters?|pages?|pp?\\.|notes?|lines?|issues?|levels?|ranks?|numbers?|nos?\\.|cores?|slots?|channels?|banks?|stages?|phases?|groups?|editions?|days?|weeks?|gen(?:eration)?|class|tier|plates?|rows?|columns?|samples?|appendix|type|socket|port|pci[- ]?e?(?:xpress)?|ddr|usb|layer|lane|room|bench|attempt|run|test|sitting) #?\\d+(?:(?:,| and| to|–|-) ?\\d+)*${alone}`,
+			`(?<![\\p{L}])(?:figures?|figs?\\.|tables?|steps?|sections?|parts?|chapters?|pages?|pp?\\.|notes?|lines?|issues?|levels?|ranks?|numbers?|nos?\\.|cores?|slots?|channels?|banks?|stages?|phases?|groups?|editions?|days?|weeks?|gen(?:eration)?|class|tier|plates?|rows?|columns?|samples?|appendix|type|socket|port|pci[- ]?e?(?:xpress)?|ddr|usb|layer|lane|room|bench|attempt|run|test|sitting) #?\\d+(?:\\.\\d+)*(?:(?:,| and| to|–|-) ?\\d+)*${alone}`,
 			'giu'
 		)
 	],

@@ -11,7 +11,7 @@ export type Quantity =
 
 /** Units that benches write beside those that have a kind of their own (common practice, no source). */
 const more =
-	'MT/s GT/s K/W °C/W dB sone sones rpm RPM events/s km m cm mm kg g MB GB TB kB KB KiB MiB GiB TiB Gbit/s Mbit/s mΩ Ω ° ml us µs'.split(
+	'MT/s GT/s K/W °C/W dB sone sones rpm RPM events/s km m cm mm kg g MB GB TB kB KB KiB MiB GiB TiB Gbit/s Mbit/s mΩ Ω ° ml l us µs'.split(
 		' '
 	);
 

@@ -43,7 +43,7 @@ export interface Link {
 }
 
 const over =
-	/(?:\bthan|\bover|\bagainst|\babove|\bbelow|\bversus|\bvs\.?|\bcompared (?:with|to)|\brelative to|\bbehind|\bahead of|\bbeyond|\bas \p{L}+ as)(?: (?:the|at|with|what|under|that|our|of|it|its|on|does|they come|it comes|comes|under))*\s*$/iu;
+	/(?:\bthan|\bover|\bagainst|\babove|\bbelow|\bversus|\bvs\.?|\bcompared (?:with|to)|\brelative to|\bbehind|\bahead of|\bbeyond|\bas \p{L}+ as|\b(?:times|twice|half|double|triple|thirds?|quarters?)(?: of)? the \p{L}+ of|\bthat of)(?: (?:the|at|with|what|under|that|our|of|it|its|on|does|they come|it comes|comes|under))*\s*$/iu;
 
 /** Whether a name stands for what something is held against, as in “than stock”. */
 export const isOver = (text: string, mention: Stretch): boolean =>

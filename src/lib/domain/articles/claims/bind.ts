@@ -1,7 +1,7 @@
 import type { ArticleData } from '../data';
 import type { DirectiveToken } from '../directive-syntax';
 import { runDirective } from '../run-directive';
-import type { Datum } from './bench-facts';
+import type { Datum } from './datum';
 import type { Figure } from './figures';
 
 /** A directive that can stand in the place of a claim's text. */
@@ -98,18 +98,36 @@ function shortest(
 	return null;
 }
 
+type Printing = Omit<Binding, 'same'>;
+const printings = new WeakMap<ArticleData, Map<string, Printing[]>>();
+
+/** What the directives of a datum print, each once, kept as long as the data. */
+function printingsOf(datum: Datum, figure: Figure | null, data: ArticleData): Printing[] {
+	const known = printings.get(data) ?? new Map<string, Printing[]>();
+	printings.set(data, known);
+	const { kind, campaign, workload, profile, over } = datum;
+	const key = [kind, campaign, workload, profile, over, figure?.quantity.kind, figure?.high !== null].join(
+		'/'
+	);
+	const before = known.get(key);
+	if (before) return before;
+	const found = new Map<string, Printing>();
+	for (const [name, attributes] of candidates(datum, figure)) {
+		const one = shortest(name, attributes, datum, data);
+		if (one && !found.has(one.prints)) found.set(one.prints, one);
+	}
+	known.set(key, [...found.values()]);
+	return [...found.values()];
+}
+
 /**
  * What can be written in the place of a claim, each with what it prints: first what prints the same, then the rest as
  * a choice.
  * @param text what stands there now
  * @param figure null for a claim of direction
  */
-export function bindingsOf(datum: Datum, text: string, figure: Figure | null, data: ArticleData): Binding[] {
-	const found = new Map<string, Binding>();
-	for (const [name, attributes] of candidates(datum, figure)) {
-		const one = shortest(name, attributes, datum, data);
-		if (one && !found.has(one.prints))
-			found.set(one.prints, { ...one, same: plain(one.prints) === plain(text) });
-	}
-	return [...found.values()].sort((a, b) => Number(b.same) - Number(a.same)).slice(0, 3);
-}
+export const bindingsOf = (datum: Datum, text: string, figure: Figure | null, data: ArticleData): Binding[] =>
+	printingsOf(datum, figure, data)
+		.map((one) => ({ ...one, same: plain(one.prints) === plain(text) }))
+		.sort((a, b) => Number(b.same) - Number(a.same))
+		.slice(0, 3);

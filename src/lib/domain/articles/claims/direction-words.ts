@@ -10,10 +10,19 @@ export interface Saying {
 	about: 'speed' | 'temperature' | 'sound' | 'power' | 'energy' | 'any';
 }
 
+/** What may stand before the word and belongs to it. */
 const degree =
-	'(?:(?:a (?:little|bit|touch|shade|hair)|slightly|much|far|clearly|noticeably|considerably|even|a lot|no|not|not any|any|never) )?';
+	/(?:a (?:little|bit|touch|shade|hair)|slightly|much|far|clearly|noticeably|considerably|even|a lot|not any|not|no|any|never) $/i;
+
+/** Where a saying begins, the words of degree before it included. */
+export function withDegree(text: string, from: number): number {
+	const before = degree.exec(text.slice(Math.max(0, from - 16), from));
+	const start = before ? from - before[0].length : from;
+	return before && /\p{L}/u.test(text.charAt(start - 1)) ? from : start;
+}
+
 const saying = (words: string, way: Saying['way'], about: Saying['about']): Saying => ({
-	pattern: new RegExp(`(?<![\\p{L}-])${degree}(?:${words})(?![\\p{L}-])`, 'giu'),
+	pattern: new RegExp(`(?<![\\w-])(?:${words})(?![\\w-])`, 'gi'),
 	way,
 	about
 });
@@ -46,12 +55,12 @@ export const sayings: readonly Saying[] = [
 	saying('better', 'better', 'any'),
 	saying('worse', 'worse', 'any'),
 	saying(
-		'(?<=\\b(?:is|are|was|were|gets?|falls?|comes?|stays?|sits?) (?:\\p{L}+ )?)(?:lower|shorter)',
+		'(?<=\\b(?:is|are|was|were|gets?|falls?|comes?|stays?|sits?) (?:\\w+ )?)(?:lower|shorter)',
 		'lower',
 		'any'
 	),
 	saying(
-		'(?<=\\b(?:is|are|was|were|gets?|rises?|comes?|stays?|sits?) (?:\\p{L}+ )?)(?:higher|longer)',
+		'(?<=\\b(?:is|are|was|were|gets?|rises?|comes?|stays?|sits?) (?:\\w+ )?)(?:higher|longer)',
 		'higher',
 		'any'
 	),

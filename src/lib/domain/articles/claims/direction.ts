@@ -3,8 +3,9 @@ import { verdictWords } from '../../bench/figures';
 import { printedGain, printedGainRange, printed, withUnit } from '../../shared/quantity';
 import { comparisonOver } from '../against';
 import type { CampaignData } from '../data';
-import { front, type BenchFacts, type Datum } from './bench-facts';
-import { fitsAbout, sayings, type Saying } from './direction-words';
+import type { BenchFacts } from './bench-facts';
+import { front, type Datum } from './datum';
+import { fitsAbout, sayings, withDegree, type Saying } from './direction-words';
 import { judged, type Judged } from './judged';
 import { linkOf, namedIn, overOf, words, type Link, type Surroundings } from './scope';
 
@@ -15,12 +16,17 @@ export interface Direction {
 	judged: Judged;
 }
 
+/** Looked for first, since most passages say nothing of the kind. */
+const likely =
+	/gain|benefit|advantage|improve|speed|win|bring|buy|lose|loss|lost|penalty|cost|differ|same|change|as (?:fast|quick|cool|quiet|loud|hot)|equal|on a par|neither|er\b|more|less|worse|draws|uses|suffer/i;
+
 /** Every place where a passage says a direction; longer words win over those inside them. */
 export function sayingsIn(text: string): { from: number; to: number; saying: Saying }[] {
 	const found: { from: number; to: number; saying: Saying }[] = [];
+	if (!likely.test(text)) return found;
 	for (const saying of sayings)
 		for (const match of text.matchAll(saying.pattern)) {
-			const [from, to] = [match.index, match.index + match[0].length];
+			const [from, to] = [withDegree(text, match.index), match.index + match[0].length];
 			if (!found.some((one) => one.from < to && one.to > from)) found.push({ from, to, saying });
 		}
 	return found.sort((a, b) => a.from - b.from);

@@ -1,5 +1,5 @@
 import { agrees, roundsTo, sizeRoundsTo, type Decimal } from './decimal';
-import type { Datum, Held } from './bench-facts';
+import type { Datum, Held } from './datum';
 import { clearlyMeant, gaining, judged, nearestTo, tiers, type Case, type Judged } from './judged';
 import { words } from './scope';
 import { senseOf, type Sense } from './sense';
@@ -121,7 +121,9 @@ export function judgePercent(given: Case): Judged {
 	const { figure, s, facts, over } = of;
 	const [printed] = figure.readings;
 	if (!printed) return judged('not-backed');
-	const sense = senseOf(words(s.passage.text), figure, s.clause);
+	const said = senseOf(words(s.passage.text), figure, s.clause);
+	// A number with a sign of its own and no word beside it may be either.
+	const sense: Sense = figure.sign !== null && said.sign === null ? { of: null, sign: null } : said;
 	const sentence = s.passage.text.slice(s.sentence.from, s.sentence.to);
 	const clause = s.passage.text.slice(s.clause.from, s.clause.to);
 	const isOverall =

@@ -1,5 +1,5 @@
 import { printedRatio } from '../../shared/quantity';
-import type { Held } from './bench-facts';
+import type { Held } from './datum';
 import { agrees, roundsTo, type Decimal, type Hedge } from './decimal';
 import { clearlyMeant, gaining, judged, nearestTo, tiers, type Case, type Judged } from './judged';
 import { words } from './scope';

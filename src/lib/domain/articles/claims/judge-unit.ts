@@ -1,42 +1,9 @@
-import { plainUnit, unitOf } from '../../shared/units';
-import { printed as inPrint, withUnit } from '../../shared/quantity';
-import type { Datum } from './bench-facts';
+import { unitOf } from '../../shared/units';
+import type { Datum } from './datum';
 import { agrees, lastPlace, roundsTo, sizeRoundsTo, type Decimal } from './decimal';
 import { clearlyMeant, judged, nearestTo, tiers, type Case, type Judged } from './judged';
 import { words, type Link } from './scope';
-
-const sameName: Record<string, string> = {
-	sones: 'sone',
-	us: 'μs',
-	RPM: 'rpm',
-	dB: 'dB(A)',
-	'°': '°C',
-	KB: 'kB',
-	clocks: ''
-};
-const plain = (unit: string): string => sameName[plainUnit(unit)] ?? plainUnit(unit);
-
-/** A value of one unit in another; null where they are not of one kind. A difference of 1 °C is one of 1 K. */
-export function converted(value: number, from: string, to: string): number | null {
-	const [ours, theirs] = [plain(from), plain(to)];
-	if (ours === theirs) return value;
-	const [a, b] = [unitOf(ours), unitOf(theirs)];
-	if (!a || !b || a.kind !== b.kind) return null;
-	// Multiplied in whole powers where it can be, so that 4950 MHz is 4.95 GHz to the digit.
-	return Number((value * (a.factor / b.factor)).toPrecision(12));
-}
-
-interface Turned {
-	datum: Datum;
-	/** Its value in the unit that was printed. */
-	value: number;
-}
-
-const inUnit = (data: readonly Datum[], unit: string): Turned[] =>
-	data.flatMap((datum) => {
-		const value = converted(datum.value, datum.unit, unit);
-		return value === null ? [] : [{ datum, value }];
-	});
+import { inUnit, plainName as plain, type Turned } from './unit-change';
 
 const comparative =
 	/^(?:[\s\u00a0-]*(?:of a )?)(?:cooler|hotter|warmer|quieter|louder|faster|slower|quicker|shorter|longer|less|more|lower|higher|fewer|sooner|later|earlier|saved|above stock|over stock|below stock|better|worse|ahead|behind)\b/i;
@@ -51,32 +18,6 @@ export const isDifference = ({ figure, s }: Case): boolean => {
 		changed.test(text.slice(Math.max(s.clause.from, figure.from - 28), figure.from))
 	);
 };
-
-/** Readings less those of what they are held against, in their own unit. */
-function differences({ facts, over }: Case): Datum[] {
-	return over.flatMap((base) =>
-		facts.readings.flatMap((one): Datum[] => {
-			if (one.kind !== 'reading') return [];
-			const campaign = facts.data.campaigns.find((known) => known.slug === one.campaign);
-			const other = facts.readings.find(
-				(known) =>
-					known.kind === 'reading' &&
-					known.campaign === one.campaign &&
-					known.workload === one.workload &&
-					known.profile === (base ?? campaign?.baseline)
-			);
-			if (!other || other.profile === one.profile) return [];
-			const value = Number((one.value - other.value).toPrecision(12));
-			const text = withUnit(
-				inPrint(value, { halfWidth: one.interval ? (one.interval[1] - one.interval[0]) / 2 : null }),
-				one.unit
-			);
-			return [
-				{ ...one, kind: 'difference', value, interval: null, range: null, over: other.profile, printed: text }
-			];
-		})
-	);
-}
 
 function fits({ value, datum }: Turned, of: Case, bySize: boolean): boolean {
 	const { readings, high, margin, hedge, sign } = of.figure;
@@ -165,8 +106,9 @@ export function judgeUnit(of: Case, unit: string): Judged {
 	const apart = isDifference(of);
 	const profile = profileOf(of);
 	const ours: Case = { ...of, profile };
-	const data = apart ? differences(of) : facts.readings.filter((one) => one.kind === 'reading');
-	const pool = inUnit(data, unit);
+	const pool = apart
+		? of.over.flatMap((base) => inUnit(facts.differences(base), unit))
+		: inUnit(facts.averages, unit);
 	const found = tiers(
 		pool.map(({ datum }) => datum),
 		ours
@@ -254,10 +196,7 @@ export function judgeBare(of: Case): Judged | null {
 	if (of.settings.hold === 'clause' && named.some((one) => one.unit === ''))
 		return judged('contradicts', named[0] ?? null);
 	if (printed.places <= 0) return null;
-	const readings = tiers(
-		of.facts.readings.filter((one) => one.kind === 'reading'),
-		of
-	);
+	const readings = tiers(of.facts.averages, of);
 	const match = of.workload.hold === 'none' ? null : readings[0]?.find((one) => roundsTo(one.value, printed));
 	return judged(match ? 'agrees' : 'not-backed', match ?? null);
 }

@@ -1,4 +1,4 @@
-import type { Datum } from './bench-facts';
+import type { Datum } from './datum';
 import type { Figure } from './figures';
 import type { BenchFacts } from './bench-facts';
 import { linkOf, namedIn, overOf, settingsIn, type Link, type Surroundings } from './scope';

@@ -25,33 +25,27 @@ const month =
 	'(?:January|February|March|April|May|June|July|August|September|October|November|December|Jan\\.?|Feb\\.?|Mar\\.?|Apr\\.?|Jun\\.?|Jul\\.?|Aug\\.?|Sept?\\.?|Oct\\.?|Nov\\.?|Dec\\.?)';
 /** Behind a number that stands alone: no further digits, no unit glued or apart. */
 const alone =
-	'(?![\\p{L}\\d]|[.,]\\d|[ \\u00a0\\u2009\\u202f]?(?:%|°|per ?cent|[mkMGTn]?(?:W|V|A|Hz|s|J)(?![\\p{L}])|MT/s|K(?![\\p{L}])|frames|fps|GB|MB|times|×|min(?![\\p{L}])))';
+	'(?![A-Za-z\\d]|[.,]\\d|[ \\u00a0\\u2009\\u202f]?(?:%|°|per ?cent|[mkMGTn]?(?:W|V|A|Hz|s|J)(?![A-Za-z])|MT/s|K(?![A-Za-z])|frames|fps|GB|MB|times|×|min(?![A-Za-z])))';
 
 const patterns: [NotClaim, RegExp][] = [
 	['date', /(?<!\d)\d{4}-\d{2}-\d{2}(?!\d)/gu],
-	[
-		'date',
-		new RegExp(`(?<!\\d)\\d{1,2}(?:st|nd|rd|th)?(?: of)? ${month}(?:,? \\d{4})?(?![\\p{L}\\d])`, 'gu')
-	],
-	[
-		'date',
-		new RegExp(`(?<![\\p{L}])${month} (?:\\d{4}|\\d{1,2}(?:st|nd|rd|th)?(?:, \\d{4})?)${alone}`, 'gu')
-	],
+	['date', new RegExp(`(?<!\\d)\\d{1,2}(?:st|nd|rd|th)?(?: of)? ${month}(?:,? \\d{4})?(?![A-Za-z\\d])`, 'g')],
+	['date', new RegExp(`\\b${month} (?:\\d{4}|\\d{1,2}(?:st|nd|rd|th)?(?:, \\d{4})?)${alone}`, 'g')],
 	['date', /(?<![\d.])\d{1,2}[./]\d{1,2}[./](?:\d{4}|\d{2})(?![\d.])/gu],
 	['time', /(?<![\d:])\d{1,2}:\d{2}(?::\d{2})?(?![\d:])/gu],
-	['time', /(?<![\d.,])\d{1,2}(?:[.:]\d{2})?[ \u00a0]?(?:a\.m\.|p\.m\.|am|pm|o[’']clock)(?![\p{L}])/giu],
-	['time', /(?<![\d.,])\d{1,2}\.\d{2} (?:CET|CEST|UTC|GMT)(?![\p{L}])/gu],
+	['time', /(?<![\d.,])\d{1,2}(?:[.:]\d{2})?[ \u00a0]?(?:a\.m\.|p\.m\.|am|pm|o[’']clock)\b/gi],
+	['time', /(?<![\d.,])\d{1,2}\.\d{2} (?:CET|CEST|UTC|GMT)\b/g],
 	['dimension', /(?<![\d:])\d+:\d+(?::\d+)*(?![\d:])/gu],
 	[
 		'dimension',
 		/(?<![\p{L}\d.,])\d+(?:\.\d+)?[ \u00a0]?[×x][ \u00a0]?\d+(?:[ \u00a0]?(?:[kMGT]i?B|mm|cm))?/gu
 	],
-	['version', /(?<![\p{L}\d])v\d+(?:\.\d+)*/giu],
+	['version', /\bv\d+(?:\.\d+)*/gi],
 	[
 		'version',
 		new RegExp(
-			`(?<![\\p{L}])(?:version|versions|firmware|driver|release|kernel|bios|revision|rev\\.?|agesa|patch|os) \\d+(?:\\.\\d+)*${alone}(?: (?:and|or|to) \\d+(?:\\.\\d+)+)?`,
-			'giu'
+			`\\b(?:version|versions|firmware|driver|release|kernel|bios|revision|rev\\.?|agesa|patch|os) \\d+(?:\\.\\d+)*${alone}(?: (?:and|or|to) \\d+(?:\\.\\d+)+)?`,
+			'gi'
 		)
 	],
 	['version', /(?<![\d.,])(?!\d{1,3}(?:\.\d{3})+(?![\d.]))\d+\.\d+\.\d+(?:\.\d+)*/gu],
@@ -60,8 +54,8 @@ const patterns: [NotClaim, RegExp][] = [
 	[
 		'reference',
 		new RegExp(
-			`(?<![\\p{L}])(?:figures?|figs?\\.|tables?|steps?|sections?|parts?|chapters?|pages?|pp?\\.|notes?|lines?|issues?|levels?|ranks?|numbers?|nos?\\.|cores?|slots?|channels?|banks?|stages?|phases?|groups?|editions?|days?|weeks?|gen(?:eration)?|class|tier|plates?|rows?|columns?|samples?|appendix|type|socket|port|pci[- ]?e?(?:xpress)?|ddr|usb|layer|lane|room|bench|attempt|run|test|sitting) #?\\d+(?:\\.\\d+)*(?:(?:,| and| to|–|-) ?\\d+)*${alone}`,
-			'giu'
+			`\\b(?:figures?|figs?\\.|tables?|steps?|sections?|parts?|chapters?|pages?|pp?\\.|notes?|lines?|issues?|levels?|ranks?|numbers?|nos?\\.|cores?|slots?|channels?|banks?|stages?|phases?|groups?|editions?|days?|weeks?|gen(?:eration)?|class|tier|plates?|rows?|columns?|samples?|appendix|type|socket|port|pci[- ]?e?(?:xpress)?|ddr|usb|layer|lane|room|bench|attempt|run|test|sitting) #?\\d+(?:\\.\\d+)*(?:(?:,| and| to|–|-) ?\\d+)*${alone}`,
+			'gi'
 		)
 	],
 	['reference', /#\d+/gu],

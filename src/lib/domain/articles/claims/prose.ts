@@ -67,20 +67,28 @@ class Reader {
 	private leaf(raw: string): void {
 		raw.split('\n').forEach((line, index) => {
 			if (index > 0) this.add(' ', this.cursor, this.cursor);
-			const piece = index > 0 ? line.trimStart() : line;
-			const at = piece === '' ? this.cursor : this.source.indexOf(piece, this.cursor);
-			if (at < 0) return;
-			let done = 0;
-			for (const match of piece.matchAll(entity)) {
-				const sign = named[match[1] ?? ''];
-				if (sign === undefined) continue;
-				this.copy(piece.slice(done, match.index), at + done);
-				done = match.index + match[0].length;
-				this.add(sign, at + match.index, at + done);
-			}
-			this.copy(piece.slice(done), at + done);
-			this.cursor = at + piece.length;
+			// A bar in a table is escaped in the source, and no longer in the cell.
+			(index > 0 ? line.trimStart() : line).split('|').forEach((piece, part) => {
+				if (part > 0) this.add('|', this.cursor, this.cursor);
+				this.piece(piece);
+			});
 		});
+	}
+
+	/** A piece of one line, its entities read. */
+	private piece(text: string): void {
+		const at = text === '' ? this.cursor : this.source.indexOf(text, this.cursor);
+		if (at < 0) return;
+		let done = 0;
+		for (const match of text.matchAll(entity)) {
+			const sign = named[match[1] ?? ''];
+			if (sign === undefined) continue;
+			this.copy(text.slice(done, match.index), at + done);
+			done = match.index + match[0].length;
+			this.add(sign, at + match.index, at + done);
+		}
+		this.copy(text.slice(done), at + done);
+		this.cursor = at + text.length;
 	}
 
 	private copy(text: string, at: number): void {

@@ -26,10 +26,12 @@ export function sentencesOf(text: string): Stretch[] {
 const breaks =
 	/[;:()]|,(?!\d)|\s[–—]\s|\s(?=(?:and|but|while|whereas|where|which|instead of|rather than|against|versus|compared (?:with|to)|down from|up from|from)\s)|(?<=\bfrom\s[^,;]{1,24}?)\s(?=to\s)/gu;
 
-/** Clauses of a sentence: what stands between its joints. */
-export function clausesOf(text: string, { from, to }: Stretch): Stretch[] {
+/** Clauses of a sentence: what stands between its joints. A comma inside a name is none. */
+export function clausesOf(text: string, { from, to }: Stretch, names: readonly Stretch[]): Stretch[] {
 	const sentence = text.slice(from, to);
-	const joints = [...sentence.matchAll(breaks)].map((match) => from + match.index);
+	const joints = [...sentence.matchAll(breaks)]
+		.map((match) => from + match.index)
+		.filter((joint) => !names.some((name) => name.from < joint && name.to > joint));
 	const edges = [from, ...joints, to];
 	return edges.slice(1).map((edge, index) => ({ from: edges[index] ?? from, to: edge }));
 }

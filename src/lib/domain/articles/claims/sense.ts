@@ -73,7 +73,7 @@ export function senseOf(text: string, at: Stretch, clause: Stretch): Sense {
 		sign
 	});
 	const close = behind.find(([pattern]) => pattern.test(after));
-	if (close) return settled(close[1], close[2]);
+	if (close?.[1]) return settled(close[1], close[2]);
 	let last: { at: number; row: Row } | null = null;
 	for (const row of ahead)
 		for (const match of before.matchAll(row[0]))
@@ -82,5 +82,6 @@ export function senseOf(text: string, at: Stretch, clause: Stretch): Sense {
 		const negated = /\b(?:not|never|no|n[’']t)\s*$/i.test(before.slice(0, last.at));
 		return negated ? { of: null, sign: null } : settled(last.row[1], last.row[2]);
 	}
+	if (close) return settled(null, close[2]);
 	return { of: noun ? 'quantity' : null, sign: null };
 }

@@ -1,7 +1,7 @@
 import { parseReading } from '../../bench/numbers';
 import { printed, withUnit } from '../../shared/quantity';
 import type { ArticleData } from '../data';
-import { front, type Datum } from './bench-facts';
+import { front, type Datum } from './datum';
 import { figuresOf } from './figures';
 import type { UnitReader } from './prose-units';
 

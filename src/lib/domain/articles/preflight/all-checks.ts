@@ -1,4 +1,5 @@
 import { caution } from './caution';
+import { contradictions, overstatements, unbackedNumbers } from './claims';
 import { comments } from './comments';
 import { directives } from './directives';
 import { disclosure } from './disclosure';
@@ -14,6 +15,7 @@ import { wideIntervals } from './wide-intervals';
 /** Every check, in the order an editor reads what they find. Add one here. */
 export const allChecks: readonly Check[] = [
 	directives,
+	contradictions,
 	signOff,
 	embargo,
 	disclosure,
@@ -22,6 +24,8 @@ export const allChecks: readonly Check[] = [
 	comments,
 	readingsNeeded,
 	wideIntervals,
+	overstatements,
+	unbackedNumbers,
 	standfirst,
 	titleLength
 ];

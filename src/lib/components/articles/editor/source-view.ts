@@ -4,6 +4,7 @@ import { EditorState, Transaction } from '@codemirror/state';
 import { EditorView, keymap } from '@codemirror/view';
 import { basicSetup } from 'codemirror';
 import type { ArticleData } from '../../../domain/articles/data';
+import { claimMarks, claimsView, type ClaimsView } from './claim-marks';
 import { directiveCompletion } from './directive-completion';
 import { editorLook } from './editor-look';
 
@@ -15,6 +16,8 @@ export interface SourceViewOptions {
 	onsave: () => void;
 	/** The line the cursor went to, from 1. */
 	online: (line: number) => void;
+	/** What stands where has changed: notes beside the text move. */
+	onlayout: () => void;
 	label: string;
 }
 
@@ -26,6 +29,7 @@ export interface SourceView {
 	replace: (source: string) => void;
 	goToLine: (line: number) => void;
 	setWrongLines: (lines: ReadonlySet<number>) => void;
+	claims: ClaimsView;
 	focus: () => void;
 	destroy: () => void;
 }
@@ -70,6 +74,7 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 					tabindex: '0'
 				}),
 				editorLook(() => wrong),
+				claimMarks(() => options.onlayout()),
 				EditorView.updateListener.of((update) => {
 					if (update.docChanged) options.onchange(update.state.doc.toString());
 					if (!update.selectionSet && !update.docChanged) return;
@@ -109,6 +114,7 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 			wrong = lines;
 			view.dispatch({ annotations: Transaction.userEvent.of('calipress.marks') });
 		},
+		claims: claimsView(view),
 		focus: () => view.focus(),
 		destroy: () => view.destroy()
 	};

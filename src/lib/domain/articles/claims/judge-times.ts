@@ -107,7 +107,9 @@ export function judgeTimes(given: Case): Judged {
 	}
 	const measured = meant.filter((one) => one.kind === 'gain');
 	const nearest = nearestTo(measured, printed.value, (one) => valuesOf(one, multiple)[0] ?? 0);
-	const clear = nearest && (multiple.of !== null || !isWord) && clearlyMeant(of, measured);
+	// A word such as “twice” is as often a manner of speaking: only what the sentence itself names can be wrong.
+	const spoken = isWord && !['clause', 'sentence'].includes(of.profile.hold);
+	const clear = nearest && !spoken && (multiple.of !== null || !isWord) && clearlyMeant(of, measured);
 	const stored = nearest ? `That is ${printedRatio(valuesOf(nearest, multiple)[0] ?? 1)} times.` : '';
 	return judged(clear ? 'contradicts' : 'not-backed', nearest, [stored, why].filter(Boolean).join(' '), trap);
 }

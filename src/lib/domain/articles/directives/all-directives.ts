@@ -7,6 +7,7 @@ import { plate } from './plate';
 import { reading } from './reading';
 import { results } from './results';
 import type { AnyDirective } from './shape';
+import { source } from './source';
 import { steps } from './steps';
 
 /** Every directive, in the order the insert panel shows them. */
@@ -19,5 +20,6 @@ export const allDirectives: readonly AnyDirective[] = [
 	kit,
 	steps,
 	caution,
-	disclosure
+	disclosure,
+	source
 ];

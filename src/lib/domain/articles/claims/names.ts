@@ -15,6 +15,8 @@ export interface Mention {
 	named: Named;
 	/** A whole name, so that a number in it is no claim. */
 	whole: boolean;
+	/** Named by a directive and not by the words: it is about that directive's number first. */
+	ofDirective?: true;
 }
 
 interface Alias {

@@ -65,7 +65,7 @@ function judge(figure: Figure, s: Surroundings, facts: BenchFacts): Judged | nul
 
 /** The names a directive stands for. */
 function asMentions({ at, attributes }: Passage['directives'][number]): Mention[] {
-	const place = { from: at, to: at + 1, whole: false };
+	const place = { from: at, to: at + 1, whole: false, ofDirective: true as const };
 	const { workload, profile } = attributes;
 	return [
 		...(workload ? [{ ...place, named: { kind: 'workload' as const, slugs: [workload] } }] : []),

@@ -82,20 +82,25 @@ export interface Surroundings {
 	before: Mention[];
 }
 
+/** Whether a directive stands right beside a claim, as in “:gain{…} faster”. */
+const beside = (mention: Stretch, at: Stretch): boolean =>
+	Math.abs(at.from - mention.to) < 3 || Math.abs(mention.from - at.to) < 3;
+
 /** The workload or profile a claim is about, and how surely. */
 export function linkOf(kind: 'workload' | 'profile', s: Surroundings): Link {
 	const { passage, at, clause, sentence } = s;
 	const { text } = passage;
-	const ofKind = s.mentions.filter(
+	const all = s.mentions.filter(
 		(one) => one.named.kind === kind && (kind === 'workload' || !isOver(text, one))
 	);
+	const ofKind = all.filter((one) => !one.ofDirective || beside(one, at));
 	const here = ofKind.filter((one) => inside(one, clause));
 	const chosen = nearest(text, at, here, s.nextNumber);
 	if (chosen) return { slugs: slugsOf(chosen), hold: 'clause' };
 	const near = ofKind.filter((one) => inside(one, sentence));
 	const mine = near.filter((one) => one.to <= at.from).at(-1) ?? near[0];
 	if (mine) return { slugs: slugsOf(mine), hold: 'sentence' };
-	const last = ofKind.filter((one) => one.to <= at.from).at(-1);
+	const last = all.filter((one) => one.to <= at.from).at(-1);
 	if (last) return { slugs: slugsOf(last), hold: 'context' };
 	const earlier = s.before.filter((one) => one.named.kind === kind).at(-1);
 	return earlier ? { slugs: slugsOf(earlier), hold: 'heading' } : { slugs: [], hold: 'none' };

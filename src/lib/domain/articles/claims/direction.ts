@@ -178,6 +178,10 @@ function workloadsOf({ about }: Saying, s: Surroundings, facts: BenchFacts, prof
 	return link.hold === 'context' && profile.hold === 'clause' ? named : [];
 }
 
+/** What stands before “cooler” where it compares. */
+const saidOf =
+	/\b(?:is|are|was|were|be|gets?|got|runs?|ran|stays?|stayed|sits?|keeps?|kept|comes?|it|core|degrees|K|°C|rig|card|and|but)(?: (?:now|then|also|still|all|in fact))*\s*$/i;
+
 /** Judges one saying; null where nothing says of what it is said. */
 export function judgeDirection(
 	found: { from: number; to: number; saying: Saying },
@@ -201,6 +205,10 @@ export function judgeDirection(
 		found.saying.way !== 'same'
 	)
 		return null;
+	const before = text.slice(s.sentence.from, from);
+	// A cooler is a part as often as it is a comparison; and “a machine that …” is no machine of ours.
+	if (/cooler$/i.test(text.slice(from, to)) && !saidOf.test(before)) return null;
+	if (/^\s*(?:An?|Any|Whoever|Whatever)\s+\p{Ll}+\s+(?:that|which|who|with)\b/u.test(before)) return null;
 	const profile = linkOf('profile', s);
 	const slugs = workloadsOf(found.saying, s, facts, profile);
 	if (slugs.length === 0) return null;
@@ -212,6 +220,9 @@ export function judgeDirection(
 			.flatMap((workload) => {
 				const base =
 					over.find((slug) => campaign.profiles.some((one) => one.slug === slug)) ?? campaign.baseline;
+				// What stock does by itself is held against nothing.
+				const onlyBase = profile.slugs.length > 0 && profile.slugs.every((slug) => slug === base);
+				if (onlyBase && found.saying.way !== 'same') return [];
 				const named =
 					[profile.slugs, namedIn(s, 'profile')]
 						.map((some) => some.filter((slug) => slug !== base))

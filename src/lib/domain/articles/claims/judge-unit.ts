@@ -15,7 +15,8 @@ export const isDifference = ({ figure, s }: Case): boolean => {
 	const text = words(s.passage.text);
 	return (
 		comparative.test(text.slice(figure.to, figure.to + 24)) ||
-		changed.test(text.slice(Math.max(s.clause.from, figure.from - 28), figure.from))
+		changed.test(text.slice(Math.max(s.clause.from, figure.from - 28), figure.from)) ||
+		/\bdifference\b[^,;.]*\b(?:is|was|comes to|of)\s*$/i.test(text.slice(s.sentence.from, figure.from))
 	);
 };
 
@@ -44,7 +45,13 @@ function fits({ value, datum }: Turned, of: Case, bySize: boolean): boolean {
 /** A round number such as 4700 where the bench has 4687: right to its noughts, and not to its ones. */
 const isRounded = (value: number, printed: Decimal): boolean => {
 	const place = lastPlace(printed);
-	return place > 0 && printed.places === 0 && sizeRoundsTo(value, { ...printed, places: -place });
+	const digits = printed.text.replace(/\D/g, '').length;
+	return (
+		place > 0 &&
+		printed.places === 0 &&
+		digits - place > 1 &&
+		sizeRoundsTo(value, { ...printed, places: -place })
+	);
 };
 
 const introduced =

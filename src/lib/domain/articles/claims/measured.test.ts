@@ -106,7 +106,12 @@ function measure(lines: ReturnType<typeof sentencesIn>) {
 	return { scores, wrong };
 }
 
-describe.each(['claims.txt', 'claims-unseen.txt'])('claims, measured on the sentences of %s', (name) => {
+// Those of the first two have shaped the finder; the third tells what to expect of prose it has not seen.
+describe.each([
+	['claims.txt', 150, 0.97],
+	['claims-unseen.txt', 100, 0.97],
+	['claims-unseen-2.txt', 60, 0.93]
+])('claims, measured on the sentences of %s', (name, enough, floor) => {
 	const lines = sentencesIn(name);
 	const { scores, wrong } = measure(lines);
 	const report = [
@@ -117,14 +122,14 @@ describe.each(['claims.txt', 'claims-unseen.txt'])('claims, measured on the sent
 	process.stdout.write(`${report}\n`);
 	it('finds and judges them', () => {
 		for (const [what, score] of Object.entries(scores)) {
-			expect(score.precision, `${what}\n${report}`).toBeGreaterThanOrEqual(0.97);
-			expect(score.recall, `${what}\n${report}`).toBeGreaterThanOrEqual(0.97);
+			expect(score.precision, `${what}\n${report}`).toBeGreaterThanOrEqual(floor);
+			expect(score.recall, `${what}\n${report}`).toBeGreaterThanOrEqual(floor);
 		}
 	});
 	it('has every state among them, and sentences with no claim at all', () => {
-		expect(lines.length).toBeGreaterThanOrEqual(100);
+		expect(lines.length).toBeGreaterThanOrEqual(enough);
 		const states = new Set(lines.flatMap(({ labels }) => labels.map((label) => label.state)));
 		expect(states).toEqual(new Set(['agrees', 'contradicts', 'more-than-data', 'not-backed']));
-		expect(lines.filter(({ labels }) => labels.length === 0).length).toBeGreaterThanOrEqual(15);
+		expect(lines.filter(({ labels }) => labels.length === 0).length).toBeGreaterThanOrEqual(10);
 	});
 });

@@ -88,7 +88,8 @@ export function judgeTimes(given: Case): Judged {
 		...facts.gains(one),
 		...(of.workload.hold === 'clause' ? [] : facts.overalls(one))
 	]);
-	const found = tiers(all, of);
+	const placeless = isWord && (of.workload.hold === 'none' || of.workload.hold === 'heading');
+	const found = placeless ? [[]] : tiers(all, of);
 	const [meant = []] = found;
 	for (const pool of found) {
 		const match = pool.find((one) =>

@@ -7,7 +7,7 @@ export interface Saying {
 	/** The way it says things go for the quantity: better or worse, its number up or down, or no difference. */
 	way: 'better' | 'worse' | 'lower' | 'higher' | 'same' | 'not-better' | 'not-worse';
 	/** Which workloads it can be about. */
-	about: 'speed' | 'temperature' | 'sound' | 'power' | 'energy' | 'any';
+	about: 'speed' | 'temperature' | 'sound' | 'power' | 'energy' | 'price' | 'any';
 }
 
 /** What may stand before the word and belongs to it. */
@@ -15,7 +15,7 @@ const degree =
 	/(?:a (?:little|bit|touch|shade|hair)|slightly|much|far|clearly|noticeably|considerably|even|a lot|not any|not|no|any|never) $/i;
 
 /** Where a saying begins, the words of degree before it included. */
-export function withDegree(text: string, from: number): number {
+function withDegree(text: string, from: number): number {
 	const before = degree.exec(text.slice(Math.max(0, from - 16), from));
 	const start = before ? from - before[0].length : from;
 	return before && /\p{L}/u.test(text.charAt(start - 1)) ? from : start;
@@ -28,7 +28,7 @@ const saying = (words: string, way: Saying['way'], about: Saying['about']): Sayi
 });
 
 /** Words that say which way something goes, without a number. */
-export const sayings: readonly Saying[] = [
+const sayings: readonly Saying[] = [
 	saying(
 		'no (?:gain|benefit|advantage|improvement|speed-?up)(?: (?:worth naming|to speak of|at all|whatever))?|gains? nothing|gained nothing|wins? nothing|brings nothing|buys nothing',
 		'not-better',
@@ -52,6 +52,8 @@ export const sayings: readonly Saying[] = [
 	saying('draws? more(?: power)?|uses? more power|more power', 'higher', 'power'),
 	saying('uses? less energy|less energy', 'lower', 'energy'),
 	saying('uses? more energy|more energy', 'higher', 'energy'),
+	saying('cheaper', 'lower', 'price'),
+	saying('dearer|more expensive', 'higher', 'price'),
 	saying('better', 'better', 'any'),
 	saying('worse', 'worse', 'any'),
 	saying(
@@ -83,6 +85,8 @@ export function fitsAbout(
 	switch (about) {
 		case 'any':
 			return true;
+		case 'price':
+			return false;
 		case 'sound':
 			return isSound;
 		case 'temperature':
@@ -101,4 +105,20 @@ export function fitsAbout(
 				kind !== 'current'
 			);
 	}
+}
+
+/** Looked for first, since most passages say nothing of the kind. */
+const likely =
+	/gain|benefit|advantage|improve|speed|win|bring|buy|lose|loss|lost|penalty|cost|differ|same|change|as (?:fast|quick|cool|quiet|loud|hot)|equal|on a par|neither|er\b|more|less|worse|draws|uses|suffer/i;
+
+/** Every place where a passage says a direction; longer words win over those inside them. */
+export function sayingsIn(text: string): { from: number; to: number; saying: Saying }[] {
+	const found: { from: number; to: number; saying: Saying }[] = [];
+	if (!likely.test(text)) return found;
+	for (const saying of sayings)
+		for (const match of text.matchAll(saying.pattern)) {
+			const [from, to] = [withDegree(text, match.index), match.index + match[0].length];
+			if (!found.some((one) => one.from < to && one.to > from)) found.push({ from, to, saying });
+		}
+	return found.sort((a, b) => a.from - b.from);
 }

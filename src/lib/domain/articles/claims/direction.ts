@@ -5,7 +5,8 @@ import { comparisonOver } from '../against';
 import type { CampaignData } from '../data';
 import type { BenchFacts } from './bench-facts';
 import { front, type Datum } from './datum';
-import { fitsAbout, sayings, withDegree, type Saying } from './direction-words';
+import { judgeCheaper, judgeOverall } from './direction-others';
+import { fitsAbout, type Saying } from './direction-words';
 import { judged, type Judged } from './judged';
 import { linkOf, namedIn, overOf, words, type Link, type Surroundings } from './scope';
 
@@ -14,22 +15,6 @@ export interface Direction {
 	from: number;
 	to: number;
 	judged: Judged;
-}
-
-/** Looked for first, since most passages say nothing of the kind. */
-const likely =
-	/gain|benefit|advantage|improve|speed|win|bring|buy|lose|loss|lost|penalty|cost|differ|same|change|as (?:fast|quick|cool|quiet|loud|hot)|equal|on a par|neither|er\b|more|less|worse|draws|uses|suffer/i;
-
-/** Every place where a passage says a direction; longer words win over those inside them. */
-export function sayingsIn(text: string): { from: number; to: number; saying: Saying }[] {
-	const found: { from: number; to: number; saying: Saying }[] = [];
-	if (!likely.test(text)) return found;
-	for (const saying of sayings)
-		for (const match of text.matchAll(saying.pattern)) {
-			const [from, to] = [withDegree(text, match.index), match.index + match[0].length];
-			if (!found.some((one) => one.from < to && one.to > from)) found.push({ from, to, saying });
-		}
-	return found.sort((a, b) => a.from - b.from);
 }
 
 const hedged =
@@ -110,27 +95,28 @@ const opposite: Record<string, string> = { better: 'worse', worse: 'better' };
 
 /** A direction held against a verdict. */
 function held(said: ReturnType<typeof expected>, verdict: Verdict, datum: Datum): Judged {
-	const stands = `${verdictWords[verdict]}.`;
+	const name = verdictWords[verdict];
+	const stands = `${name.charAt(0).toUpperCase()}${name.slice(1)}.`;
 	if (said === 'better' || said === 'worse') {
 		if (verdict === said) return judged('agrees', datum, stands);
-		if (verdict === opposite[said]) return judged('contradicts', datum, `It goes the other way: ${stands}`);
+		if (verdict === opposite[said]) return judged('contradicts', datum, `It goes the other way: ${name}.`);
 		return judged('more-than-data', datum, stands);
 	}
 	if (said === 'not-better') {
-		if (verdict === 'better') return judged('contradicts', datum, `There is a gain: ${stands}`);
+		if (verdict === 'better') return judged('contradicts', datum, `There is a gain: ${name}.`);
 		return verdict === 'not-enough'
 			? judged('more-than-data', datum, stands)
 			: judged('agrees', datum, stands);
 	}
 	if (said === 'not-worse') {
-		if (verdict === 'worse') return judged('contradicts', datum, `There is a loss: ${stands}`);
+		if (verdict === 'worse') return judged('contradicts', datum, `There is a loss: ${name}.`);
 		return verdict === 'not-enough'
 			? judged('more-than-data', datum, stands)
 			: judged('agrees', datum, stands);
 	}
 	if (verdict === 'no-difference') return judged('agrees', datum, stands);
 	if (verdict === 'not-enough') return judged('more-than-data', datum, stands);
-	return judged('contradicts', datum, `There is a difference: ${stands}`);
+	return judged('contradicts', datum, `There is a difference: ${name}.`);
 }
 
 const rank = { contradicts: 0, 'more-than-data': 1, agrees: 2, 'not-backed': 3, bound: 4 } as const;
@@ -209,11 +195,12 @@ export function judgeDirection(
 	// A cooler is a part as often as it is a comparison; and “a machine that …” is no machine of ours.
 	if (/cooler$/i.test(text.slice(from, to)) && !saidOf.test(before)) return null;
 	if (/^\s*(?:An?|Any|Whoever|Whatever)\s+\p{Ll}+\s+(?:that|which|who|with)\b/u.test(before)) return null;
+	if (found.saying.about === 'price') return judgeCheaper(found.saying, s, facts);
 	const profile = linkOf('profile', s);
 	const slugs = workloadsOf(found.saying, s, facts, profile);
-	if (slugs.length === 0) return null;
-	const over = overOf(s);
 	const is = negated(text, from, text.slice(from, to));
+	if (slugs.length === 0) return is ? null : judgeOverall(found.saying, s, facts);
+	const over = overOf(s);
 	const verdicts = facts.data.campaigns.flatMap((campaign) =>
 		campaign.workloads
 			.filter((workload) => slugs.includes(workload.slug) && fitsAbout(workload, found.saying.about))

@@ -5,7 +5,8 @@ import { words } from './scope';
 import { senseOf, type Sense } from './sense';
 import { printedGain } from '../../shared/quantity';
 
-const overallWords =
+/** Says that all workloads together are meant. */
+export const overallWords =
 	/\b(?:overall|on average|geometric mean|over everything|across (?:all|everything|the board)|all workloads|taken together|taken over|in all|every workload|over all)\b/i;
 
 const changeOf = (one: Held): number => (one.quotient - 1) * 100;

@@ -2,7 +2,8 @@ import type { ArticleData } from '../data';
 import { benchFacts, type BenchFacts } from './bench-facts';
 import { bindingsOf, type Binding } from './bind';
 import type { Datum } from './datum';
-import { judgeDirection, sayingsIn } from './direction';
+import { judgeDirection } from './direction';
+import { sayingsIn } from './direction-words';
 import { figuresOf, type Figure } from './figures';
 import { judgePercent, judgePoints } from './judge-percent';
 import { judgeTimes } from './judge-times';
@@ -147,14 +148,18 @@ function findIn(
 		const result = textTrap(figure, measured, s) ?? judge(figure, s, facts);
 		if (result) keep(figure, 'number', ofOthers(result, s), figure);
 	});
-	const holes = passage.directives.filter((directive) => bound.has(directive.name));
-	for (const { at } of holes) keep({ from: at, to: at + 1 }, 'number', judged('bound'), null);
+	for (const { at, name } of passage.directives)
+		if (bound.has(name)) keep({ from: at, to: at + 1 }, 'number', judged('bound'), null);
 	for (const saying of sayingsIn(text)) {
 		if (besideNumber(text, saying, measured)) continue;
+		const beside = passage.directives.find(
+			({ at }) => Math.abs(at + 1 - saying.from) < 3 || Math.abs(at - saying.to) < 3
+		);
+		// What is from elsewhere is not ours to judge.
+		if (beside?.name === 'source') continue;
 		const result = judgeDirection(saying, around(saying, text.length), facts);
 		// Beside a directive it says what the directive says, unless it is the other way.
-		const said = holes.some(({ at }) => Math.abs(at + 1 - saying.from) < 3 || Math.abs(at - saying.to) < 3);
-		if (result && !(said && result.state === 'agrees')) keep(saying, 'direction', result, null);
+		if (result && !(beside && result.state === 'agrees')) keep(saying, 'direction', result, null);
 	}
 	return { found, mentions };
 }

@@ -218,7 +218,7 @@ describe('preflight', () => {
 		expect(checks({ cells, source })).toEqual([]);
 		const advice = found({ cells, source });
 		expect(advice.map((one) => one.check)).toEqual(['overstatements', 'unbacked-numbers']);
-		expect(advice[0]?.message).toContain('no difference that matters');
+		expect(advice[0]?.message).toContain('No difference that matters');
 		expect(advice[1]?.message).toContain(
 			'2 numbers are not backed by the data: “4 W” (line 3), “9 W” (line 3).'
 		);

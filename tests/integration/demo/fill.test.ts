@@ -72,6 +72,7 @@ describe('the demo', () => {
 			const findings = preflight({
 				title: one.title,
 				standfirst: one.standfirst,
+				source: one.source,
 				page: renderArticle(one.source, data, () => ''),
 				data,
 				blockingComments: [],

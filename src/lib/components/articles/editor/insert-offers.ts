@@ -32,7 +32,8 @@ const names: Record<string, string> = {
 	note: 'Side note',
 	pull: 'Pull quote',
 	compare: 'Comparison',
-	gallery: 'Gallery'
+	gallery: 'Gallery',
+	source: 'From elsewhere'
 };
 
 const sentence = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1).replace(/-/g, ' ');

@@ -7,6 +7,7 @@ import { EditorView, keymap } from '@codemirror/view';
 import { basicSetup } from 'codemirror';
 import type { ArticleData } from '../../../domain/articles/data';
 import type { Fault } from '../../../domain/articles/mends';
+import { claimMarks, claimsView, type ClaimsView } from './claim-marks';
 import { directiveCompletion } from './directive-completion';
 import { faultMarks, withFaults } from './directive-faults';
 import { directiveHover, directiveNear } from './directive-hover';
@@ -27,10 +28,10 @@ export interface SourceViewOptions extends PastingOptions {
 	/** Where the cursor went: the line, from 1, and the directive it is in. */
 	onplace: (line: number, directive: string | null) => void;
 	onscroll: () => void;
+	/** What stands where has changed: notes beside the text move. */
+	onlayout: () => void;
 	/** What a directive would print. */
 	peek: (source: string) => Peek | null;
-	/** Extensions of others, such as marks in the text. */
-	extensions: Extension;
 	label: string;
 }
 
@@ -45,6 +46,7 @@ export interface SourceView {
 	setFaults: (faults: readonly Fault[]) => void;
 	setKeys: (changed: ChangedKeys) => void;
 	run: (id: string) => boolean;
+	claims: ClaimsView;
 	focus: () => void;
 	/** What scrolls, and how far down in it a line begins. */
 	scroller: HTMLElement;
@@ -70,7 +72,6 @@ const keymapOf = (desk: Desk, changed: ChangedKeys): Extension =>
 export function sourceView(host: HTMLElement, options: SourceViewOptions): SourceView {
 	const root = host.shadowRoot ?? host.attachShadow({ mode: 'open', delegatesFocus: true });
 	const keys = new Compartment();
-	const others = new Compartment();
 	let line = 0;
 	let inside: string | null = null;
 	const view = new EditorView({
@@ -96,7 +97,7 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 					tabindex: '0'
 				}),
 				editorLook,
-				others.of(options.extensions),
+				claimMarks(() => options.onlayout()),
 				EditorView.updateListener.of((update) => {
 					if (update.docChanged) options.onchange(update.state.doc.toString());
 					if (!update.selectionSet && !update.docChanged) return;
@@ -138,6 +139,7 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 		setFaults: (faults) => view.dispatch(withFaults(view.state, faults)),
 		setKeys: (changed) => view.dispatch({ effects: keys.reconfigure(keymapOf(options.desk, changed)) }),
 		run: (id) => editorCommands.find((command) => command.id === id)?.run(options.desk, view) ?? false,
+		claims: claimsView(view),
 		focus: () => view.focus(),
 		scroller: view.scrollDOM,
 		topOf: (number) => view.lineBlockAt(lineAt(number).from).top + view.documentPadding.top,

@@ -12,6 +12,7 @@ import { pull } from './pull';
 import { reading } from './reading';
 import { results } from './results';
 import type { AnyDirective } from './shape';
+import { source } from './source';
 import { step } from './step';
 import { steps } from './steps';
 import { term } from './term';
@@ -40,5 +41,6 @@ export const allDirectives: readonly AnyDirective[] = [
 	pull,
 	compare,
 	side,
-	gallery
+	gallery,
+	source
 ];

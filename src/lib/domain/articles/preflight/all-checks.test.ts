@@ -108,7 +108,7 @@ function found({
 }: Asked = {}) {
 	const data = dataWith(change);
 	const page = renderArticle(source, data, () => '');
-	return preflight({ title, standfirst, page, data, blockingComments: comments, printAt, now });
+	return preflight({ title, standfirst, source, page, data, blockingComments: comments, printAt, now });
 }
 const checks = (asked: Asked, severity: 'blocking' | 'advice' = 'blocking') =>
 	found(asked)
@@ -192,6 +192,38 @@ describe('preflight', () => {
 		expect(checks({ source: '![The rig, lid off](/media/rig.jpg)' })).toEqual([]);
 	});
 
+	it('stops a number that contradicts the data, at its line, with what the bench has', () => {
+		const source = `${reading}\n\nThe tile render takes 33.4 s with fixed 4.95.`;
+		const [finding] = found({ source });
+		expect(finding).toMatchObject({
+			check: 'contradictions',
+			severity: 'blocking',
+			place: { kind: 'line', line: 3 }
+		});
+		expect(finding?.message).toContain('“33.4 s” contradicts the bench. Tile render, Fixed 4.95: 31.200');
+		expect(finding?.mend).toContain(':reading{workload=tile-render profile=fixed}');
+		expect(checks({ source: `${reading}\n\nThe tile render takes 31.2 s with fixed 4.95.` })).toEqual([]);
+	});
+
+	it('only advises on numbers that nothing backs, and on words that say more than the verdicts', () => {
+		const comparison = {
+			ratio: 1.002,
+			ci95: [0.999, 1.005] as [number, number],
+			gainPercent: 0.2,
+			gainCi95: [-0.1, 0.5] as [number, number],
+			verdict: 'no-difference' as const
+		};
+		const cells = [cell('stock'), cell('fixed', { comparison })];
+		const source = `${reading}\n\nThe tile render is faster with fixed 4.95. The pump draws 4 W, the lamp 9 W.`;
+		expect(checks({ cells, source })).toEqual([]);
+		const advice = found({ cells, source });
+		expect(advice.map((one) => one.check)).toEqual(['overstatements', 'unbacked-numbers']);
+		expect(advice[0]?.message).toContain('No difference that matters');
+		expect(advice[1]?.message).toContain(
+			'2 numbers are not backed by the data: “4 W” (line 3), “9 W” (line 3).'
+		);
+	});
+
 	it('stops at a blocking comment, and leads to it', () => {
 		const comments = [{ id: 7, quote: 'renders in', body: 'At what temperature?', authorName: 'Marit Oake' }];
 		expect(found({ comments })).toMatchObject([{ check: 'comments', place: { kind: 'comment', id: 7 } }]);
@@ -217,7 +249,16 @@ describe('preflight', () => {
 		expect(printChecks.every((check) => allChecks.includes(check))).toBe(true);
 		const data = dataWith({ cells: [cell('stock'), cell('fixed', { signedBy: null })] });
 		const page = renderArticle(reading, data, () => '');
-		const input = { title: '', standfirst: '', page, data, blockingComments: [], printAt: now, now };
+		const input = {
+			title: '',
+			standfirst: '',
+			source: 'It renders in 99 s with fixed 4.95.',
+			page,
+			data,
+			blockingComments: [],
+			printAt: now,
+			now
+		};
 		expect(preflight(input, printChecks)).toEqual([]);
 	});
 });

@@ -1,4 +1,5 @@
 import { caution } from './caution';
+import { contradictions, overstatements, unbackedNumbers } from './claims';
 import { comments } from './comments';
 import { directives } from './directives';
 import { disclosure } from './disclosure';
@@ -15,6 +16,7 @@ import { wideIntervals } from './wide-intervals';
 /** Every check, in the order an editor reads what they find. Add one here. */
 export const allChecks: readonly Check[] = [
 	directives,
+	contradictions,
 	signOff,
 	embargo,
 	disclosure,
@@ -24,6 +26,8 @@ export const allChecks: readonly Check[] = [
 	readingsNeeded,
 	labLimits,
 	wideIntervals,
+	overstatements,
+	unbackedNumbers,
 	standfirst,
 	titleLength
 ];

@@ -37,6 +37,8 @@ export interface OpenComment {
 export interface PreflightInput {
 	title: string;
 	standfirst: string;
+	/** The text as it was written. */
+	source: string;
 	page: PageFacts;
 	data: ArticleData;
 	blockingComments: OpenComment[];

@@ -28,6 +28,7 @@ export async function checkText(
 	ctx: Pick<SystemContext, 'now'>,
 	db: Db,
 	row: ArticleRow,
+	source: string,
 	page: PageFacts,
 	data: ArticleData,
 	printAt: Date | null
@@ -35,6 +36,7 @@ export async function checkText(
 	return preflight({
 		title: row.title,
 		standfirst: row.standfirst,
+		source,
 		page,
 		data,
 		blockingComments: await comments.blockingOf(db, row.id),
@@ -64,6 +66,7 @@ export async function checkEdition(
 		{
 			title: frozen.title,
 			standfirst: frozen.standfirst,
+			source: frozen.source,
 			page,
 			data: { ...then, duties },
 			blockingComments: await comments.blockingOf(db, row.id),

@@ -52,7 +52,7 @@ async function asItStands(ctx: Context, row: ArticleRow): Promise<Shown> {
 	if (!head) throw new Error(`Article ${row.id} has no revision ${row.head}.`);
 	const data = await withPictures(ctx.db, await currentData(ctx, ctx.db, row.id), head.source);
 	const { rendered, html } = renderNow(row.slug, head.source, data);
-	const findings = await checkText(ctx, ctx.db, row, rendered, data, row.slotAt);
+	const findings = await checkText(ctx, ctx.db, row, head.source, rendered, data, row.slotAt);
 	const { title, standfirst } = head;
 	return { title, standfirst, html, edition: null, findings, benchMoved: false };
 }

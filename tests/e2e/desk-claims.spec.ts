@@ -40,10 +40,16 @@ test('a writer sees a number that contradicts the bench, binds it, and the page 
 	await expect(preview).toContainText(`Under stock the prime sieve takes ${prints}, and the lamp`);
 	await expect(page.getByRole('button', { name: /contradicts/ })).toHaveCount(0);
 
+	// A number of somebody else's gets its source, and is no claim of ours any more.
+	await margin.getByRole('button', { name: 'Name the source of 7 W' }).click();
+	await page.keyboard.insertText('its maker');
+	await expect(preview).toContainText('the lamp draws 7 W (its maker).');
+	await expect(margin.getByRole('listitem').filter({ hasText: '7 W' })).toHaveCount(0);
+
 	// On a narrow screen the same notes are a list.
 	await page.setViewportSize({ width: 390, height: 844 });
 	await expect(margin).toBeHidden();
 	await page.getByText(/^Claims: /).click();
-	await expect(page.getByText('7 W', { exact: true })).toBeVisible();
+	await expect(page.locator('details').getByText('4.95 GHz')).toBeVisible();
 	await page.context().close();
 });

@@ -177,7 +177,7 @@ export function judgeDirection(
 	const { from, to } = found;
 	const text = words(s.passage.text);
 	if (text.slice(s.sentence.from, s.sentence.to).trimEnd().endsWith('?')) return null;
-	if (hedged.test(text.slice(s.clause.from, from))) return null;
+	if (hedged.test(text.slice(Math.max(s.clause.from, from - 160), from))) return null;
 	if (
 		found.saying.way !== 'same' &&
 		!/nothing|^no /i.test(text.slice(from, to)) &&
@@ -191,7 +191,7 @@ export function judgeDirection(
 		found.saying.way !== 'same'
 	)
 		return null;
-	const before = text.slice(s.sentence.from, from);
+	const before = text.slice(Math.max(s.sentence.from, from - 300), from);
 	// A cooler is a part as often as it is a comparison; and “a machine that …” is no machine of ours.
 	if (/cooler$/i.test(text.slice(from, to)) && !saidOf.test(before)) return null;
 	if (/^\s*(?:An?|Any|Whoever|Whatever)\s+\p{Ll}+\s+(?:that|which|who|with)\b/u.test(before)) return null;

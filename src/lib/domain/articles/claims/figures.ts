@@ -139,7 +139,9 @@ function kindOfBare(text: string, from: number, to: number, spelledOut: boolean)
 	}
 	const before = /(\p{L}+)[ \u00a0]$/u.exec(text.slice(Math.max(0, from - 24), from));
 	const capital =
-		before && /^\p{Lu}/u.test(before[1] ?? '') && !/[.!?] ?$/.test(text.slice(0, from - before[0].length));
+		before &&
+		/^\p{Lu}/u.test(before[1] ?? '') &&
+		!/[.!?] ?$/.test(text.slice(Math.max(0, from - before[0].length - 2), from - before[0].length));
 	return capital && from - before[0].length > 0 ? 'name' : null;
 }
 /** Words behind a number that are not what it counts. */
@@ -168,7 +170,7 @@ function digitFigure(text: string, start: number, said: string, units: UnitReade
 	let margin: Decimal | null = null;
 	const before = text.slice(Math.max(0, from - 30), from).trimEnd();
 	const ranged = at(rangeMark, text, to);
-	const moves = /\bfrom$/i.test(before) && changes.test(text.slice(0, from));
+	const moves = /\bfrom$/i.test(before) && changes.test(text.slice(Math.max(0, from - 90), from));
 	const joined = /\band\b/i.test(ranged?.[0] ?? '')
 		? /\bbetween$/i.test(before)
 		: !/\bfrom$/i.test(before) || quantity.kind === 'bare';

@@ -74,6 +74,9 @@ function asMentions({ at, attributes }: Passage['directives'][number]): Mention[
 	];
 }
 
+/** How far back in a passage a name is still spoken of, in characters. */
+const farthest = 1500;
+
 /** Where things stand in a passage: its sentences, their clauses, and its names. */
 function surroundings(passage: Passage, mentions: Mention[], before: Mention[]) {
 	const { text } = passage;
@@ -85,15 +88,9 @@ function surroundings(passage: Passage, mentions: Mention[], before: Mention[]) 
 		const holds = (one: Stretch) => one.from <= at.from && one.to > at.from;
 		const found = sentences.find((one) => holds(one.sentence));
 		const sentence = found?.sentence ?? { from: 0, to: text.length };
-		return {
-			passage,
-			at,
-			clause: found?.clauses.find(holds) ?? sentence,
-			sentence,
-			mentions,
-			nextNumber,
-			before
-		};
+		const clause = found?.clauses.find(holds) ?? sentence;
+		const near = mentions.filter((one) => one.to > sentence.from - farthest && one.from < sentence.to);
+		return { passage, at, clause, sentence, mentions: near, nextNumber, before };
 	};
 }
 

@@ -9,17 +9,24 @@ export interface Stretch {
 
 const shortened = /(?:\b(?:e\.g|i\.e|vs|ca|c|approx|no|fig|figs|cf|etc|dr|st|a\.m|p\.m))\.$/i;
 
+/** What goes on longer without a full stop is no sentence: it is taken in pieces, so that work stays even. */
+const longestSentence = 800;
+
 /** Sentences of a text, as indices. */
 export function sentencesOf(text: string): Stretch[] {
 	const found: Stretch[] = [];
 	let from = 0;
+	const upTo = (to: number) => {
+		for (; to - from > longestSentence; from += longestSentence)
+			found.push({ from, to: from + longestSentence });
+		if (to > from) found.push({ from, to });
+		from = to;
+	};
 	for (const match of text.matchAll(/[.!?…]+["”’')\]]*(?=\s+["“‘'(]*[\p{Lu}\p{N}\ufffc]|\s*$)/gu)) {
 		const to = match.index + match[0].length;
-		if (shortened.test(text.slice(Math.max(0, to - 8), to))) continue;
-		found.push({ from, to });
-		from = to;
+		if (!shortened.test(text.slice(Math.max(0, to - 8), to))) upTo(to);
 	}
-	if (from < text.length) found.push({ from, to: text.length });
+	upTo(text.length);
 	return found;
 }
 

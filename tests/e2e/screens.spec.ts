@@ -13,6 +13,7 @@ const screens: Record<'visitor' | Role, string[]> = {
 		'/',
 		'/articles/aldermoor-1650-four-ways-to-spend-sixteen-cores',
 		'/articles/what-idle-costs',
+		'/articles/pennon-6000-tested-one-line-in-a-menu',
 		'/parts',
 		'/parts/aldermoor-1650',
 		'/methods',
@@ -45,11 +46,19 @@ const screens: Record<'visitor' | Role, string[]> = {
 	writer: [
 		'/desk',
 		'/desk/new',
+		'/desk/glossary',
+		'/desk/glossary/new',
+		'/desk/glossary/sone/edit',
 		'/desk/articles/automatic-boost-and-nothing-else',
 		'/desk/articles/automatic-boost-and-nothing-else/revisions'
 	],
 	editor: [
 		'/desk',
+		'/desk/templates',
+		'/desk/templates/new',
+		'/desk/templates/tuning-guide',
+		'/desk/templates/tuning-guide/edit',
+		'/desk/articles/marlow-g70-at-three-power-limits/review',
 		'/desk/articles/memory-by-hand-what-an-evening-brings/review',
 		'/desk/articles/aldermoor-1650-four-ways-to-spend-sixteen-cores/review'
 	],

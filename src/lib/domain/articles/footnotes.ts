@@ -105,7 +105,7 @@ export class Footnotes {
 			return element(
 				'li',
 				{ id: `fn-${number}`, 'data-line': text.line },
-				`${printMarkdown(text.tokens ?? [])}${back}`
+				`${printMarkdown(text.tokens ?? [])} ${back}`
 			);
 		});
 		return items.length === 0

@@ -7,7 +7,8 @@ import { parseMarkdown } from './markdown';
 import { emptyPage, type DirectiveError, type Rendered } from './rendered';
 import { Setting } from './setting';
 
-export type { DirectiveError, Heading, Rendered } from './rendered';
+export type { Heading } from './directives/shape';
+export type { DirectiveError, Rendered } from './rendered';
 
 export interface RenderOptions {
 	/** Where the plates' files are, with a slash at its end. */

@@ -1,4 +1,4 @@
-import type { BoundFigure, CautionTopic, UsedCell } from './directives/shape';
+import type { BoundFigure, CautionTopic, Heading, UsedCell } from './directives/shape';
 import type { PlateSpec } from './plates/spec';
 
 /** What cannot be printed, where, and what would be near. */
@@ -9,13 +9,6 @@ export interface DirectiveError {
 	directive: string;
 	message: string;
 	nearest: string[];
-}
-
-export interface Heading {
-	level: number;
-	text: string;
-	id: string;
-	line: number;
 }
 
 /** An article as set: its page, not yet sanitised, and all that stands on it. */

@@ -83,6 +83,8 @@ export const sanitiseConfig = {
 		],
 		...['font-size', 'font-weight', 'text-anchor', 'paint-order', 'opacity', 'rx', 'ry']
 	],
+	// Words, not an address: “Caution: heat” would else be taken for one with a scheme of its own, and dropped.
+	ADD_URI_SAFE_ATTR: ['aria-label'],
 	ALLOW_DATA_ATTR: false,
 	ALLOW_ARIA_ATTR: false,
 	FORBID_TAGS: ['script', 'style', 'noscript', 'iframe', 'textarea', 'xmp', 'form', 'template', 'math'],

@@ -12,6 +12,7 @@ import {
 	withUnit
 } from '../shared/quantity';
 import { cellsOver, overallOver } from './against';
+import { capital } from './directives/containers';
 import type { CampaignData } from './data';
 import type { UsedCell } from './directives/shape';
 
@@ -28,8 +29,6 @@ export const weighedAgainst = (campaign: CampaignData, over: string): ProfileTra
 	tradeOffs({ ...campaign, cells: cellsOver(campaign, over), baseline: over }).filter(
 		({ profile }) => profile !== over
 	);
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 const ofFigure = (figure: Overall | null): Pick<WeighedRow, 'printed' | 'interval'> => ({
 	printed: figure ? printedGain(figure.gainPercent, figure.gainCi95) : '',

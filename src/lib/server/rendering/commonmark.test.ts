@@ -32,7 +32,7 @@ function dom(html: string): string {
 	const box = document.createElement('div');
 	box.innerHTML = html;
 	const breaks = (node: Node | null | undefined): boolean =>
-		node instanceof document.defaultView!.Element && (blocks.has(node.localName) || node.localName === 'br');
+		node?.nodeType === 1 && (blocks.has((node as Element).localName) || (node as Element).localName === 'br');
 	const walk = (node: Element, pre: boolean): string =>
 		[...node.childNodes]
 			.map((child) => {

@@ -82,7 +82,13 @@ function dangers(html: string): string[] {
 }
 
 const everything =
-	'::kit\n\n::steps{profile=huge-pages}\n\n::results\n\n::plate{kind=gains}\n\n::plate{kind=scores workload=source-build}\n\n::disclosure\n\n:reading{workload=source-build profile=stock} :gain{workload=source-build profile=huge-pages} :overall{profile=huge-pages}';
+	'::kit\n\n::steps{profile=huge-pages}\n\n::results\n\n::plate{kind=gains}\n\n::plate{kind=scores workload=source-build}\n\n::disclosure\n\n::tested\n\n::tradeoffs\n\n::contents\n\n## Head\n\n:::verdict{profile=huge-pages for=a not=b}\nSo.\n:::\n\n:::step{title=Do}\nIt[^1].\n\n::caution{topic=power}\n:::\n\n:::compare\n:::side{title=a}\nb\n:::\n:::side{title=c}\nd\n:::\n:::\n\n:::pull{by=Ada}\nYes.\n:::\n\n:::gallery\n![A rig](/pictures/a.webp "Its fans")\n:::\n\n:term{name=boost}\n\n[^1]: Twice.\n\n:reading{workload=source-build profile=stock} :gain{workload=source-build profile=huge-pages} :overall{profile=huge-pages}';
+
+/** The fixture's data with a term to name. */
+const withTerms = (): ArticleData => ({
+	...measuredArticle(),
+	glossary: [{ slug: 'boost', term: 'boost', explanation: 'A clock above the rated one.' }]
+});
 
 const written = new Set([
 	...[
@@ -97,7 +103,19 @@ const written = new Set([
 		'value',
 		'note'
 	],
-	...['parentValue', 'stockValue', 'partName', 'firmware', 'driver', 'os', 'disclosure', 'how', 'signedBy']
+	...[
+		'parentValue',
+		'stockValue',
+		'partName',
+		'firmware',
+		'driver',
+		'os',
+		'disclosure',
+		'how',
+		'signedBy',
+		'term',
+		'explanation'
+	]
 ]);
 
 /** The data with an attack in every text that a person can type, another one in each, beginning with the `turn`th. */
@@ -120,7 +138,7 @@ describe('the sanitiser', () => {
 		expect(sanitisePage(clean)).toBe(clean);
 	});
 	it('keeps a page of ours as it is', () => {
-		const { html } = renderArticle(everything, measuredArticle(), drawPlate);
+		const { html } = renderArticle(everything, withTerms(), drawPlate);
 		const clean = sanitisePage(html);
 		expect(dangers(clean)).toEqual([]);
 		const text = (page: string) => {
@@ -158,11 +176,11 @@ describe('what people type', () => {
 	});
 	it.each(attacks)('is text in the attributes of directives: %s', (attack) => {
 		const bare = attack.replace(/[{}"]/g, '');
-		const source = `::plate{kind=gains title="${bare}"}\n\n:reading{workload="${bare}" profile=${bare.replace(/\s/g, '')}}\n\n:::note{title="${bare}"}\nText.\n:::`;
+		const source = `::plate{kind=gains title="${bare}"}\n\n:reading{workload="${bare}" profile=${bare.replace(/\s/g, '')}}\n\n:::note{title="${bare}"}\nText.\n:::\n\n:::verdict{profile=huge-pages title="${bare}" for="${bare}" not="${bare}"}\nText.\n:::\n\n:::step{title="${bare}"}\nText.\n:::\n\n:::pull{by="${bare}"}\nText.\n:::\n\n:term{name="${bare}"}`;
 		expect(dangers(sanitisePage(renderArticle(source, measuredArticle(), () => '').html))).toEqual([]);
 	});
 	it.each([0, 9, 18, 27])('is text in every field of the data, from attack %i on', (turn) => {
-		const data = poisoned(measuredArticle(), turn);
+		const data = poisoned(withTerms(), turn);
 		const { page, plates, facts } = freezeEdition({
 			slug: 'a',
 			title: 'A',

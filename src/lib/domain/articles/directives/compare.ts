@@ -2,7 +2,7 @@ import type { Token } from 'marked';
 import { isDirective } from '../directive-syntax';
 import { element, escapeHtml } from '../html';
 import { attribute } from './lookup';
-import { blocksOf, emptyInside } from './containers';
+import { asSentence, blocksOf, emptyInside } from './containers';
 import { directive, found, missing, type Inside } from './shape';
 
 const mostSides = 4;
@@ -27,7 +27,7 @@ export const side = directive<Inside>({
 				element('p', { class: 'compare-side-title' }, escapeHtml(title)) + html
 			),
 			plain: `${title}\n\n${plain}`,
-			spoken: `${title}.\n\n${spoken}`
+			spoken: `${asSentence(title)}\n\n${spoken}`
 		};
 	}
 });
@@ -60,7 +60,7 @@ export const compare = directive<Inside & { count: number }>({
 				(title ? element('h3', {}, escapeHtml(title)) : '') + element('div', { class: 'compare-sides' }, html)
 			),
 			plain: title ? `${title}\n\n${plain}` : plain,
-			spoken: title ? `${title}.\n\n${spoken}` : spoken
+			spoken: title ? `${asSentence(title)}\n\n${spoken}` : spoken
 		};
 	}
 });

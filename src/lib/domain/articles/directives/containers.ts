@@ -11,3 +11,6 @@ export const blocksOf = (tokens: readonly Token[]): Token[] =>
 
 /** A sentence's first letter raised. @example capital('games') === 'Games' */
 export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** A heading as a sentence. @example asSentence('Which?') === 'Which?' */
+export const asSentence = (text: string): string => (/[.!?…]$/.test(text) ? text : `${text}.`);

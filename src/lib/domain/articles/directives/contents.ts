@@ -1,7 +1,6 @@
 import { element, escapeHtml } from '../html';
-import type { Heading } from '../rendered';
 import { attribute } from './lookup';
-import { directive, found, missing } from './shape';
+import { directive, found, missing, type Heading } from './shape';
 
 const depths = ['2', '3'] as const;
 
@@ -42,9 +41,10 @@ export const contents = directive<Heading[]>({
 			: missing('There are no headings to list. A heading begins with ## and a space.');
 	},
 	render: (headings, { call }) => ({
+		// Tailwind has a class 'contents' of its own.
 		html: element(
 			'nav',
-			{ class: 'contents', 'aria-label': 'Contents', 'data-line': call.line },
+			{ class: 'contents-list', 'aria-label': 'Contents', 'data-line': call.line },
 			`<p class="contents-title">Contents</p>${listOf(headings)}`
 		),
 		plain: '',

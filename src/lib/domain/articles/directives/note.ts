@@ -17,7 +17,7 @@ export const note = directive<Inside>({
 		return {
 			html: element(
 				'aside',
-				{ class: 'margin-note', 'data-line': call.line },
+				{ class: 'margin-note', role: 'note', 'data-line': call.line },
 				(title ? element('p', { class: 'margin-note-title' }, escapeHtml(title)) : '') + html
 			),
 			plain: title ? `${title}\n\n${plain}` : plain,

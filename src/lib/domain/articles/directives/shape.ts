@@ -1,7 +1,6 @@
 import type { Token } from 'marked';
 import type { ArticleData } from '../data';
 import type { PlateSpec } from '../plates/spec';
-import type { Heading } from '../rendered';
 
 /** What a directive could not do, in words for its writer, with the names that exist. */
 export interface Problem {
@@ -92,6 +91,14 @@ export interface Attribute {
 	words: string;
 	/** What may stand there, given what else was chosen. */
 	values: (data: ArticleData, attributes: Record<string, string>) => Values;
+}
+
+/** A heading of the page. */
+export interface Heading {
+	level: number;
+	text: string;
+	id: string;
+	line: number;
 }
 
 /** Draws a plate: SVG markup for its specification. */

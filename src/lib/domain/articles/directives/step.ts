@@ -1,6 +1,6 @@
 import { element, escapeHtml } from '../html';
 import { attribute } from './lookup';
-import { emptyInside } from './containers';
+import { asSentence, emptyInside } from './containers';
 import { directive, found, type Inside } from './shape';
 
 /** `:::step{title=}`: one thing to do, numbered since the last heading, with its caution beside it and a box to tick on paper. */
@@ -25,7 +25,7 @@ export const step = directive<Inside>({
 				element('p', { class: 'step-card-head' }, head) + element('div', { class: 'step-card-body' }, html)
 			),
 			plain: `${number}. ${title}\n\n${plain}`,
-			spoken: `Step ${number}. ${title}.\n\n${spoken}`
+			spoken: `Step ${number}. ${asSentence(title)}\n\n${spoken}`
 		};
 	}
 });

@@ -61,7 +61,7 @@ export const tradeoffs = directive<TradeOffTable>({
 			'div',
 			{ class: 'results tradeoffs', 'data-line': call.line },
 			table(
-				`What each gains and costs against ${over.name}. Above nought is better, but costs are as they differ.`,
+				`What each gains and costs against ${over.name}. Of work, above nought is better; of costs, it is how much more, in their unit.`,
 				[
 					{ head: 'Profile' },
 					{ head: 'Difference', figures: true },

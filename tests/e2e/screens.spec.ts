@@ -42,6 +42,8 @@ const screens: Record<'visitor' | Role, string[]> = {
 	writer: [
 		'/desk',
 		'/desk/new',
+		'/desk/new/import',
+		'/desk/articles/automatic-boost-and-nothing-else/import',
 		'/desk/articles/automatic-boost-and-nothing-else',
 		'/desk/articles/automatic-boost-and-nothing-else/revisions'
 	],

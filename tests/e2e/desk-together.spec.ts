@@ -167,7 +167,7 @@ test('a minute without a connection loses nothing and doubles nothing, also when
 	await Promise.all([away.context().close(), again.context().close()]);
 });
 
-test('without scripts an article is exported, and a file that cannot be read is refused with its line', async ({
+test('without scripts an article is exported, two texts are put together, and a file that cannot be read is refused with its line', async ({
 	browser
 }) => {
 	const path = await articleOf(writer, 'Out and in again');
@@ -187,6 +187,16 @@ test('without scripts an article is exported, and a file that cannot be read is 
 	});
 	await plain.getByRole('button', { name: 'Import it as the next revision' }).click();
 	await expect(plain.getByText('nothing had to be saved')).toBeVisible();
+
+	// Somebody saves while the form is open: both texts can be taken with one press.
+	await plain.goto(path);
+	await write(writer, 'Alpha', ' With scripts.');
+	await saved(writer, 2);
+	const source = plain.getByLabel('Source');
+	await source.fill(`${await source.inputValue()}\nWithout scripts.\n`);
+	await plain.getByRole('button', { name: 'Save as a revision' }).click();
+	await plain.getByRole('button', { name: 'Take both together' }).click();
+	await expect(plain.getByLabel('Source')).toHaveValue(/With scripts\.[\s\S]*Without scripts\./);
 
 	await plain.goto('/desk/new/import');
 	await plain.locator('input[type=file]').setInputFiles({

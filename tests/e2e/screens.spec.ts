@@ -49,6 +49,11 @@ const screens: Record<'visitor' | Role, string[]> = {
 		'/desk/glossary',
 		'/desk/glossary/new',
 		'/desk/glossary/sone/edit',
+		'/desk/articles',
+		'/desk/articles/automatic-boost-and-nothing-else/narration',
+		'/desk/articles/automatic-boost-and-nothing-else/narration/prompter',
+		'/desk/new/import',
+		'/desk/articles/automatic-boost-and-nothing-else/import',
 		'/desk/articles/automatic-boost-and-nothing-else',
 		'/desk/articles/automatic-boost-and-nothing-else/revisions'
 	],

@@ -99,7 +99,7 @@ describe('news of a board', () => {
 		const [reading] = first.readings;
 		valueOf(await excludeReading(ctx, campaign, { reading: reading?.id ?? 0, reason: 'a window opened' }));
 		now = await follow(now);
-		valueOf(await voidRun(ctx, campaign, { run: second.id, version: 1, reason: 'wrong cell' }));
+		valueOf(await voidRun(ctx, campaign, { run: second.id, reason: 'wrong cell' }));
 		now = await follow(now);
 		const run = now.selected.runs.find((one) => one.id === first.id);
 		valueOf(

@@ -21,7 +21,7 @@ beforeAll(async () => {
 });
 afterAll(() => database.close());
 
-const ask = (handler: typeof scriptFile, file: string, query = '') =>
+const ask = (handler: (event: never) => Promise<Response>, file: string, query = '') =>
 	handler(
 		fakeEvent({
 			path: `/desk/articles/${slug}/x/${file}${query}`,

@@ -123,6 +123,7 @@ describe('a profile whose settings only the lab’s meanings explain', () => {
 		const findings = preflight({
 			title: 'Limits',
 			standfirst: '',
+			source,
 			page: renderArticle(source, data, () => ''),
 			data,
 			blockingComments: [],

@@ -12,6 +12,8 @@ export interface DirectiveToken extends Tokens.Generic {
 	/** Why it could not be read; null where it could. */
 	fault: string | null;
 	html?: string;
+	/** The plate it drew, once it is settled. */
+	plate?: { key: string; title: string };
 	/** The same in plain text, and as a narrator says it. */
 	plain?: string;
 	spoken?: string;

@@ -23,12 +23,20 @@ export interface RenderOptions {
  * Nothing throws for what a writer typed: it is an error in its place.
  * @param draw gives the SVG of a plate
  */
-export function renderArticle(
+export const renderArticle = (
+	source: string,
+	data: ArticleData,
+	draw: Draw,
+	options: RenderOptions = {}
+): Rendered => setArticle(source, data, draw, options).page;
+
+/** The same, with the token tree it was printed from: settled, each directive with what it says. */
+export function setArticle(
 	source: string,
 	data: ArticleData,
 	draw: Draw,
 	{ platesAt = 'plates/', read = parseMarkdown }: RenderOptions = {}
-): Rendered {
+): { tokens: Token[]; page: Rendered } {
 	const refusal = refusalOf(source);
 	if (refusal) return refused(refusal.message, refusal.line);
 	let tokens: Token[];
@@ -41,11 +49,11 @@ export function renderArticle(
 			1
 		);
 	}
-	return new Setting(data, draw, platesAt).set(tokens);
+	return { tokens, page: new Setting(data, draw, platesAt).set(tokens) };
 }
 
-function refused(message: string, line: number): Rendered {
+function refused(message: string, line: number): { tokens: Token[]; page: Rendered } {
 	const error: DirectiveError = { line, directive: 'source', message, nearest: [] };
 	const html = errorHtml(error, 'block');
-	return { ...emptyPage(), errors: [error], html, blocks: [{ line, html }] };
+	return { tokens: [], page: { ...emptyPage(), errors: [error], html, blocks: [{ line, html }] } };
 }

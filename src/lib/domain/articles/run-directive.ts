@@ -64,6 +64,14 @@ function placeProblem(one: AnyDirective, around: DirectiveToken | null): ReturnT
 	return missing(`“${one.name}” cannot stand in “${around.name}”.${may}`, []);
 }
 
+/** What surrounds a directive that stands on no page, such as one printed to see how it reads. */
+export const alone = {
+	inside: null,
+	headings: [],
+	termsSoFar: new Set(),
+	step: 0
+} as const satisfies Partial<Press>;
+
 /**
  * Finds the directive a token names and prints it; else says why not, with the nearest names.
  * @param press everything it is printed from, the call included

@@ -124,8 +124,9 @@ export class Setting {
 		const press = this.pressFor(token);
 		const result = runDirective(token, press, around);
 		if (result.ok) {
-			const { html, plain, spoken } = result.value;
+			const { html, plain, spoken, plate } = result.value;
 			Object.assign(token, { html, plain, spoken: spoken ?? plain });
+			if (plate) token.plate = { key: plateKey(plate), title: plate.title };
 			this.keep(result.value);
 			return;
 		}

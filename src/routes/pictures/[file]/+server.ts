@@ -16,7 +16,8 @@ export const GET = open(async ({ params, url, request }: RequestEvent, ctx) => {
 		'content-security-policy': "default-src 'none'; sandbox"
 	};
 	if (request.headers.get('if-none-match') === etag) return new Response(null, { status: 304, headers });
-	const body = Readable.toWeb(stream()) as ReadableStream;
+	// Asked for the head alone, the file is not opened: nobody would close it.
+	const body = request.method === 'HEAD' ? null : (Readable.toWeb(stream()) as ReadableStream);
 	return new Response(body, {
 		headers: { ...headers, 'content-type': type, 'content-length': String(bytes) }
 	});

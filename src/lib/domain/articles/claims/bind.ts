@@ -1,6 +1,6 @@
 import type { ArticleData } from '../data';
 import type { DirectiveToken } from '../directive-syntax';
-import { runDirective } from '../run-directive';
+import { alone, runDirective } from '../run-directive';
 import type { Datum } from './datum';
 import type { Figure } from './figures';
 
@@ -39,7 +39,8 @@ function print(name: string, attributes: Record<string, string>, data: ArticleDa
 		data,
 		draw: () => '',
 		call: { name, attributes, line: 1 },
-		platesAt: ''
+		platesAt: '',
+		...alone
 	});
 	return result.ok ? result.value.plain : null;
 }

@@ -50,8 +50,10 @@ function stepHtml(step: Step): string {
 
 /** One step as it is spoken, its caution right after it. */
 function stepSpoken(step: Step): string[] {
-	if (step.kind === 'leave') return [`Step ${step.number}: leave ${step.menu}.`];
-	if (step.kind === 'open-menu') return [`Step ${step.number}: open ${step.path.join(', then ')}.`];
+	if (step.kind !== 'set') {
+		const act = step.kind === 'leave' ? `leave ${step.menu}` : `open ${step.path.join(', then ')}`;
+		return [`Step ${step.number}: ${act}.`];
+	}
 	const to = `Step ${step.number}: set ${step.setting} to ${valued(step.value, step.unit)}.`;
 	return step.caution ? [to, `Caution: ${stepCautions[step.caution.topic]}`] : [to];
 }

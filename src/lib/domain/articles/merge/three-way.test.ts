@@ -76,6 +76,11 @@ describe('two people', () => {
 	});
 });
 
+it('who only moved empty lines about loses nobody their words', () => {
+	const { conflicts } = mergeTexts(text(''), text('\n'), text('fan'));
+	expect(conflicts.map((one) => one.suggested)).toEqual(['theirs']);
+});
+
 const words = fc.array(fc.constantFrom('fan', 'loud', '', 'two words', '- item', '| a | b |'), {
 	maxLength: 12
 });
@@ -100,7 +105,7 @@ it('keeps every word of both where all is taken together or one after the other'
 				Object.fromEntries(
 					merge.conflicts.map((one) => [
 						one.id,
-						one.suggested ?? (one.options.both ? 'both' : one.mine ? 'mine' : 'theirs')
+						one.suggested ?? (one.options.both ? 'both' : one.mine.trim() === '' ? 'theirs' : 'mine')
 					])
 				)
 			);

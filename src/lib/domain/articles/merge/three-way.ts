@@ -67,6 +67,12 @@ function after(place: Place, theirs: string[], mine: string[]): string[] {
 	return parted ? [...theirs, ...mine] : [...theirs, '', ...mine];
 }
 
+/** Where one of them wrote and the other only moved empty lines about, what was written stands. */
+function wordsOf(base: string[], mine: string[], theirs: string[]): Choice | null {
+	if (!blank(base) || blank(mine) === blank(theirs)) return null;
+	return blank(mine) ? 'theirs' : 'mine';
+}
+
 function conflictOf(place: Place, base: string[], mine: string[], theirs: string[]): Conflict {
 	const [was, ours, others] = [base, mine, theirs].map((lines) => lines.join('\n')) as [
 		string,
@@ -90,7 +96,7 @@ function conflictOf(place: Place, base: string[], mine: string[], theirs: string
 			mine,
 			...(either ? { both: after(place, theirs, mine) } : {})
 		},
-		suggested: together !== null ? 'together' : inserted ? 'both' : null
+		suggested: together !== null ? 'together' : inserted ? 'both' : wordsOf(base, mine, theirs)
 	};
 }
 

@@ -1,11 +1,9 @@
 import type { Token, Tokens } from 'marked';
 import type { ArticleData } from '../data';
 import { isDirective, type DirectiveToken } from '../directive-syntax';
-import { refusalOf } from '../limits';
-import { parseMarkdown, type Placed } from '../markdown';
+import type { Placed } from '../markdown';
 import { countWords, plainText } from '../plain-text';
-import { plateKey } from '../plates/spec';
-import { runDirective } from '../run-directive';
+import { setArticle } from '../render-article';
 import { say } from './say';
 
 /** What a line of a script is: words to say, a step to say on its own, a cue for the picture, words beside the main text. */
@@ -56,13 +54,18 @@ const namesOf = ({ campaigns }: ArticleData): string[] => [
 	)
 ];
 
-/** Reads one article's token tree into lines. */
+/** What a settled directive or footnote left to be said. */
+const spokenOf = (token: Token): string => {
+	const { spoken, plain } = token as { spoken?: unknown; plain?: unknown };
+	return typeof spoken === 'string' ? spoken : typeof plain === 'string' ? plain : '';
+};
+
+/** Reads one article's settled token tree into lines. */
 class Reader {
 	readonly sections: ScriptSection[] = [];
-	readonly gaps: Script['gaps'] = [];
 	private readonly names: string[];
 
-	constructor(private readonly data: ArticleData) {
+	constructor(data: ArticleData) {
 		this.names = namesOf(data);
 	}
 
@@ -78,53 +81,29 @@ class Reader {
 			?.lines.push({ kind, text: words, plate, line, words: kind === 'cue' ? 0 : countWords(words) });
 	}
 
-	/** Settles what directives within a sentence say, so that its text can be read. */
-	private sentence(tokens: Token[]): string {
-		for (const token of tokens) {
-			if (isDirective(token)) token.plain = this.print(token)?.plain ?? '';
-			else if ('tokens' in token && token.tokens) this.sentence(token.tokens);
+	/** Each line a cue, a step or words, as it is written. */
+	private lines(text: string, line: number, kind: LineKind, plate: string | null): void {
+		for (const one of text.split('\n')) {
+			const cue = /^\[.*\]$/.test(one);
+			const step = /^Step \d+: /.test(one);
+			this.add(cue ? 'cue' : step ? 'step' : kind, one, line, cue ? plate : null);
 		}
-		return plainText(tokens);
-	}
-
-	private print(token: DirectiveToken) {
-		const call = { name: token.name, attributes: token.attributes, line: Number(token.line ?? 1) };
-		const result = runDirective(token, { data: this.data, draw: () => '', call, platesAt: '' });
-		if (result.ok) return result.value;
-		this.gaps.push({ line: call.line, message: result.problem.message });
-		return null;
 	}
 
 	private directive(token: DirectiveToken, line: number, kind: LineKind): void {
-		const printed = this.print(token);
-		if (!printed) return;
-		if (printed.plate) {
-			this.add(
-				'cue',
-				`[Plate: ${printed.plate.title}]`,
-				line,
-				token.name === 'plate' ? plateKey(printed.plate) : null
-			);
-			return;
-		}
-		for (const text of (printed.spoken ?? printed.plain).split('\n')) {
-			const cue = /^\[.*\]$/.test(text);
-			const step = /^Step \d+: /.test(text);
-			this.add(cue ? 'cue' : step ? 'step' : kind, text, line);
-		}
+		const plate = token.plate?.key ?? null;
+		if (plate !== null && token.name === 'plate')
+			this.add('cue', `[Plate: ${token.plate?.title ?? ''}]`, line, plate);
+		else this.lines(spokenOf(token), line, token.level === 'container' ? 'aside' : kind, plate);
 	}
 
 	private list(token: Tokens.List, kind: LineKind): void {
 		for (const [at, item] of token.items.entries()) {
 			const line = (item as Placed).line ?? 1;
 			const [first, ...rest] = item.tokens;
-			const number = token.ordered ? `${Number(token.start || 1) + at}. ` : '';
-			const words = first ? this.sentence([first]) : '';
-			this.add(
-				token.ordered ? 'step' : kind,
-				number === '' ? words : `Step ${number.replace('. ', ': ')}${words}`,
-				line
-			);
+			const words = first ? plainText([first], 'spoken') : '';
+			if (token.ordered) this.add('step', `Step ${Number(token.start || 1) + at}: ${words}`, line);
+			else this.add(kind, words, line);
 			this.blocks(rest, kind);
 		}
 	}
@@ -132,12 +111,10 @@ class Reader {
 	blocks(tokens: Token[], kind: LineKind = 'say'): void {
 		for (const token of tokens) {
 			const line = (token as Placed).line ?? 1;
-			if (isDirective(token)) {
-				if (token.level === 'container') this.blocks(token.tokens ?? [], 'aside');
-				else this.directive(token, line, kind);
-			} else if (token.type === 'heading') {
-				if (kind === 'say') this.open(this.sentence([token]), line);
-				else this.add(kind, `${this.sentence([token])}.`, line);
+			if (isDirective(token)) this.directive(token, line, kind);
+			else if (token.type === 'heading') {
+				if (kind === 'say') this.open(plainText([token], 'spoken'), line);
+				else this.add(kind, `${plainText([token], 'spoken')}.`, line);
 			} else if (token.type === 'list') this.list(token as Tokens.List, kind);
 			else if (token.type === 'blockquote') {
 				this.add('cue', '[Quote]', line);
@@ -148,7 +125,7 @@ class Reader {
 				for (const image of (token as Tokens.Paragraph).tokens.filter((one) => one.type === 'image'))
 					this.add('cue', `[Picture: ${(image as Tokens.Image).text}]`, line);
 			else if (token.type === 'paragraph' || token.type === 'text')
-				this.add(kind, this.sentence([token]), line);
+				this.add(kind, plainText([token], 'spoken'), line);
 		}
 	}
 }
@@ -166,17 +143,11 @@ export function scriptOf({ title, standfirst, source }: Spoken, data: ArticleDat
 	reader.open('Opening', 1);
 	reader.add('say', /[.?!]$/.test(title) ? title : `${title}.`, 1);
 	reader.add('say', standfirst, 1);
-	const refusal = refusalOf(source);
-	if (refusal) return { title, sections: reader.sections, gaps: [refusal] };
-	try {
-		reader.blocks(parseMarkdown(source));
-	} catch (error) {
-		if (!(error instanceof RangeError)) throw error;
-		reader.gaps.push({ line: 1, message: 'This text is nested too deep to be read.' });
-	}
+	const { tokens, page } = setArticle(source, data, () => '');
+	reader.blocks(tokens);
 	return {
 		title,
 		sections: reader.sections.filter((section) => section.lines.length > 0),
-		gaps: reader.gaps
+		gaps: page.errors.map(({ line, message }) => ({ line, message }))
 	};
 }

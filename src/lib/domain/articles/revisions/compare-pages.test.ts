@@ -115,6 +115,15 @@ describe('two pages', () => {
 		]);
 	});
 
+	it('name the rows that a plate lost or gained, rather than each of their figures', () => {
+		const all = '::plate{kind=scores workload=source-build}';
+		const [plate] = changes(compared(all, '::plate{kind=scores workload=source-build profiles=single-core}'));
+		if (!plate) throw new Error('no change');
+		const { body, removed } = inside(plate);
+		expect(removed.join(' ')).toContain('Stock');
+		expect(body.querySelector('[aria-label="Figures that moved"]')).toBeNull();
+	});
+
 	it('compare pictures by their hash, and say what became of their text', () => {
 		const known = (hash: string) => ({ sha256: hash, width: 100, height: 80, fallback: 'jpg' as const });
 		const [a, b] = ['a'.repeat(64), 'b'.repeat(64)];

@@ -113,28 +113,43 @@ function figuresOf(table: PageElement | undefined): Figure[] {
 		});
 }
 
-/** Which figures of a table moved from what to what, as a table; empty where none did. */
+const named = (names: string[]): string =>
+	names.length > 8 ? `${names.slice(0, 8).join('; ')}; and ${names.length - 8} more` : names.join('; ');
+
+/** Rows that are in one of the two tables alone, in a sentence. */
+function rowsAlone(words: string, rows: string[], mark: 'ins' | 'del'): string {
+	return rows.length === 0 ? '' : element('p', {}, `${words} ${element(mark, {}, escapeHtml(named(rows)))}.`);
+}
+
+/** Which figures of a table moved from what to what, as a table, and which rows came and went; empty where none did. */
 export function movedFigures(before: PageElement | undefined, after: PageElement | undefined): string {
+	const [was, is] = [figuresOf(before), figuresOf(after)];
+	const rowsOf = (figures: Figure[]) => [...new Set(figures.map(({ row }) => row))];
+	const [oldRows, newRows] = [rowsOf(was), rowsOf(is)];
+	const gone = oldRows.filter((row) => !newRows.includes(row));
+	const come = newRows.filter((row) => !oldRows.includes(row));
 	const id = ({ row, column }: Figure) => `${row}\n${column}`;
-	const was = new Map(figuresOf(before).map((one) => [id(one), one]));
-	const is = new Map(figuresOf(after).map((one) => [id(one), one]));
-	const moved = [...new Set([...was.keys(), ...is.keys()])].flatMap((key) => {
-		const [a, b] = [was.get(key), is.get(key)];
-		return a?.value === b?.value ? [] : [{ name: (a ?? b) as Figure, a: a?.value, b: b?.value }];
-	});
-	if (moved.length === 0) return '';
+	const [old, now] = [was, is].map((figures) => new Map(figures.map((one) => [id(one), one])));
+	const moved = [...new Map([...(old ?? []), ...(now ?? [])]).values()]
+		.filter(({ row }) => oldRows.includes(row) && newRows.includes(row))
+		.map((one) => ({ ...one, from: old?.get(id(one))?.value, to: now?.get(id(one))?.value }))
+		.filter(({ from, to }) => from !== to);
 	const cell = (value: string | undefined, mark: 'ins' | 'del') =>
 		element('td', { class: 'num' }, value === undefined ? 'none' : element(mark, {}, escapeHtml(value)));
 	const rows = moved.map(
-		({ name, a, b }) =>
-			`<tr>${element('th', { scope: 'row' }, escapeHtml(name.row))}${element('td', {}, escapeHtml(name.column))}${cell(a, 'del')}${cell(b, 'ins')}</tr>`
+		({ row, column, from, to }) =>
+			`<tr>${element('th', { scope: 'row' }, escapeHtml(row))}${element('td', {}, escapeHtml(column))}${cell(from, 'del')}${cell(to, 'ins')}</tr>`
 	);
 	const head = ['Figure', 'Of it', 'From', 'To']
-		.map((text) => element('th', { scope: 'col' }, text))
+		.map((text, index) => element('th', { scope: 'col', class: index > 1 ? 'num' : undefined }, text))
 		.join('');
-	return element(
-		'div',
-		{ class: 'table-box', tabindex: 0, role: 'group', 'aria-label': 'Figures that moved' },
-		`<table><caption>Figures that moved</caption><thead><tr>${head}</tr></thead><tbody>${rows.join('')}</tbody></table>`
-	);
+	const list =
+		rows.length === 0
+			? ''
+			: element(
+					'div',
+					{ class: 'table-box', tabindex: 0, role: 'group', 'aria-label': 'Figures that moved' },
+					`<table><caption>Figures that moved</caption><thead><tr>${head}</tr></thead><tbody>${rows.join('')}</tbody></table>`
+				);
+	return rowsAlone('No longer in it:', gone, 'del') + rowsAlone('New in it:', come, 'ins') + list;
 }

@@ -7,11 +7,11 @@ import type { Context } from '../../context';
 import { inTransaction, isDuplicate } from '../../db/client';
 import * as articles from '../../db/queries/article';
 import * as campaigns from '../../db/queries/campaign-choice';
-import { articleTemplates, templateOf } from '../../rendering/templates';
 import { createArticle } from './create-article';
 import { readImport, type SentArticle } from './read-import';
 import { saveRevisionIn } from './save-revision';
 import { enterPictures } from './take-in-picture';
+import { templatesInUse } from './templates-in-use';
 
 export interface SentNewArticle extends SentArticle {
 	/** In place of the file's; empty for that. */
@@ -43,9 +43,10 @@ async function campaignIds(ctx: Context, names: string[]): Promise<Outcome<numbe
 	return fault('campaigns', `${words.join(' ')} Choose those it is to use.`);
 }
 
-function templateFault(name: string | undefined): string | null {
-	if (name === undefined || templateOf(name)) return null;
-	const all = articleTemplates.map((one) => one.kind);
+async function templateFault(ctx: Context, name: string | undefined): Promise<string | null> {
+	if (name === undefined) return null;
+	const all = (await templatesInUse(ctx.db)).filter(({ retired }) => !retired).map(({ kind }) => kind);
+	if (all.includes(name)) return null;
 	const near = nearest(name, all);
 	return `There is no template “${name}”. ${near.length > 0 ? `Near: ${near.join(', ')}.` : `There are ${all.join(', ')}.`}`;
 }
@@ -73,7 +74,7 @@ export async function importArticle(
 	const text = readText(title, head.standfirst ?? '', source);
 	if (!text.ok) return text;
 	const template = head.template ?? 'short-note';
-	const wrong = templateFault(head.template);
+	const wrong = await templateFault(ctx, head.template);
 	if (wrong) return fault('file', wrong);
 	const slug = slugOf(text.value.title);
 	if (slug === '' || isReserved(slug))

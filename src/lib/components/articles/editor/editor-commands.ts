@@ -11,6 +11,8 @@ import type { Keyed } from './keys';
 export interface Desk {
 	save: () => void;
 	insert: () => void;
+	/** Asks for pictures to put in. */
+	picture: () => void;
 	outline: () => void;
 	/** Leaves everything but one side away; or brings it back. */
 	alone: (side: 'source' | 'page') => void;
@@ -77,6 +79,13 @@ export const editorCommands: readonly EditorCommand[] = [
 		keys: 'Mod-j',
 		everywhere: true,
 		run: (desk) => done(desk.insert)
+	},
+	{
+		id: 'picture',
+		words: 'Add pictures',
+		keys: 'Mod-Shift-e',
+		everywhere: true,
+		run: (desk) => done(desk.picture)
 	},
 	{
 		id: 'complete',

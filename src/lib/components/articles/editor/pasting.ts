@@ -78,12 +78,7 @@ function placeOf(view: EditorView, id: number): number | null {
 let count = 0;
 
 /** Hands files over, shows in their place that they are on their way, and puts in what comes of them. */
-export async function take(
-	view: EditorView,
-	files: File[],
-	at: number,
-	takeFiles: TakeFiles
-): Promise<void> {
+export async function take(view: EditorView, files: File[], at: number, takeFiles: TakeFiles): Promise<void> {
 	const id = (count += 1);
 	const words =
 		files.length === 1 ? `Adding ${files[0]?.name ?? 'a picture'} …` : `Adding ${files.length} pictures …`;

@@ -25,7 +25,9 @@ describe('a body', () => {
 
 	it('of a form must state its length: it would be read whole before anybody counted', async () => {
 		expect(await answered('/(staff)/stores', { 'content-type': form })).toBe(411);
-		expect(await answered('/(staff)/stores', { 'content-type': 'multipart/form-data; boundary=x' })).toBe(411);
+		expect(await answered('/(staff)/stores', { 'content-type': 'multipart/form-data; boundary=x' })).toBe(
+			411
+		);
 		// JSON is counted as it is read.
 		expect(await answered('/(staff)/stores', { 'content-type': 'application/json' })).toBe(200);
 	});

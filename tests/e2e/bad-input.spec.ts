@@ -75,8 +75,8 @@ test('two people who save at once lose nothing: the second is shown the differen
 	await write(two, 'Second words.');
 	await expect(two.getByText(/newer revision/).first()).toBeVisible();
 	const conflict = two.getByRole('region', { name: 'Two of you changed this text' });
-	await expect(conflict.locator('ins').filter({ hasText: 'First' })).toBeVisible();
-	await expect(conflict.locator('ins').filter({ hasText: 'Second' })).toBeVisible();
+	await expect(conflict.locator('ins').filter({ hasText: 'First' }).first()).toBeVisible();
+	await expect(conflict.locator('ins').filter({ hasText: 'Second' }).first()).toBeVisible();
 	await expect(two.locator('.cm-content')).toContainText('Second words.');
 	await Promise.all([one.context().close(), two.context().close()]);
 });

@@ -105,6 +105,9 @@ describe('two texts', () => {
 		expect(onPage.changes).toBeGreaterThan(0);
 		const changed = onPage.blocks?.flatMap((block) => ('html' in block ? [block.html] : [])).join('') ?? '';
 		expect(changed).toMatch(/<del>[\s\S]*<ins>/);
+		// What is shown is drawn; a plate in the middle of what is left out is not.
+		const whole = wanted(await readRevisions(as('writer'), slug, asked('all=true'))).blocks ?? [];
+		expect(whole.map((block) => ('html' in block ? block.html : '')).join('')).toContain('<svg');
 		expect(wanted(await readRevisions(as('writer'), slug, asked('view=source'))).blocks).toBeNull();
 	});
 

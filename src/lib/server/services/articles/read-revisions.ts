@@ -1,4 +1,3 @@
-import { aroundChanges, type ShownBlock } from '../../../domain/articles/revisions/compare-pages';
 import { may } from '../../../domain/people/policy';
 import { done, refuse } from '../../../domain/shared/outcome';
 import type { RevisionsQuery, Side } from '../../../schemas/article';
@@ -34,8 +33,8 @@ export async function readRevisions(ctx: Context, slug: string, wanted: Revision
 	if (!texts.ok) return texts;
 	const { before, after } = texts.value;
 	const sameText = before.kind === after.kind && before.number === after.number;
-	const onPage = wanted.view === 'page' && !sameText ? await compareOnPage(ctx, article, texts.value) : null;
-	const blocks: ShownBlock[] | null = onPage && (wanted.all ? onPage : aroundChanges(onPage));
+	const onPage =
+		wanted.view === 'page' && !sameText ? await compareOnPage(ctx, article, texts.value, wanted.all) : null;
 	return done({
 		article,
 		list,
@@ -45,8 +44,8 @@ export async function readRevisions(ctx: Context, slug: string, wanted: Revision
 		before: { ...before, page: undefined },
 		after: { ...after, page: undefined },
 		sameText,
-		blocks,
-		changes: onPage?.filter(({ state }) => state !== 'same').length ?? null,
+		blocks: onPage?.blocks ?? null,
+		changes: onPage?.changes ?? null,
 		mayEdit: may(ctx.actor, 'article.edit', { authorId: article.authorId })
 	});
 }

@@ -54,7 +54,7 @@ export const blankTemplate = (): z.input<typeof templateInput> => ({
 	checklist: 'data: Every cell the article shows is signed off.'
 });
 
-/** Which campaign a template is shown with; none for the newest with signed cells. */
+/** Which campaign a template is shown with; none for that of the article printed last. */
 export const previewChoice = z.object({ campaign: z.string().max(80).catch('').default('') });
 
 /** One item of a checklist, ticked or taken back. */

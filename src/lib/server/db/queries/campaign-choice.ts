@@ -1,6 +1,6 @@
-import { and, desc, eq, exists, inArray, isNotNull, isNull } from 'drizzle-orm';
+import { and, desc, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
 import type { Db } from '../client';
-import { campaign, cellSignature, rig, rigRevision } from '../schema';
+import { article, articleCampaign, campaign, rig, rigRevision } from '../schema';
 
 /** Campaigns an article can be bound to, the newest first. */
 export const open = (db: Db, limit = 500) =>
@@ -13,24 +13,16 @@ export const open = (db: Db, limit = 500) =>
 		.orderBy(desc(campaign.createdAt), desc(campaign.id))
 		.limit(limit);
 
-/** The newest open campaign with a cell that is signed off; undefined where there is none. */
-export const newestSigned = async (db: Db) =>
+/** The campaign of the article that was printed last: one whose data are all there; undefined where none was. */
+export const lastPrinted = async (db: Db) =>
 	(
 		await db
 			.select({ slug: campaign.slug })
 			.from(campaign)
-			.where(
-				and(
-					isNull(campaign.archivedAt),
-					exists(
-						db
-							.select({ id: cellSignature.id })
-							.from(cellSignature)
-							.where(and(eq(cellSignature.campaignId, campaign.id), isNotNull(cellSignature.standing)))
-					)
-				)
-			)
-			.orderBy(desc(campaign.createdAt), desc(campaign.id))
+			.innerJoin(articleCampaign, eq(articleCampaign.campaignId, campaign.id))
+			.innerJoin(article, eq(article.id, articleCampaign.articleId))
+			.where(and(isNull(campaign.archivedAt), isNotNull(article.liveEditionId), isNull(article.withdrawnAt)))
+			.orderBy(desc(article.firstPublishedAt), articleCampaign.position)
 			.limit(1)
 	)[0]?.slug;
 

@@ -32,17 +32,17 @@ export async function showTemplate(ctx: Context, kind: string) {
 	return done({ template, saves, ships: shippedTemplate(kind) !== undefined });
 }
 
-/** A template as an article would begin from it with a campaign: the newest that is signed off where none is named. */
+/** A template as an article would begin from it with a campaign: that of the article printed last where none is named. */
 export async function previewTemplate(ctx: Context, kind: string, campaign: string) {
 	if (!may(ctx.actor, 'article.read')) return notForYou();
-	const [template, choices, signed] = await Promise.all([
+	const [template, choices, printed] = await Promise.all([
 		templateInUse(ctx.db, kind),
 		campaigns.open(ctx.db),
-		campaigns.newestSigned(ctx.db)
+		campaigns.lastPrinted(ctx.db)
 	]);
 	if (!template) return none(kind);
 	const named = (name: string | undefined) => choices.find(({ slug }) => slug === name);
-	const chosen = named(campaign) ?? named(signed) ?? choices[0];
+	const chosen = named(campaign) ?? named(printed) ?? choices[0];
 	const ids = chosen ? (await campaigns.idsOf(ctx.db, [chosen.slug])).map(({ id }) => id) : [];
 	const data = await articleData(ctx, ids);
 	const source = fillTemplate(template.body, data);

@@ -1,4 +1,5 @@
 import type { ArticleData } from '../data';
+import { onceFor } from '../once-for';
 import type { PlateSpec } from '../plates/spec';
 
 /** What a directive could not do, in words for its writer, with the names that exist. */
@@ -100,6 +101,8 @@ export interface Directive<T> {
 	/** What it prints, in a sentence for the insert panel. */
 	words: string;
 	attributes: Attribute[];
+	/** What it finds rests on its attributes and the data alone, so that it is found once. */
+	lasting?: true;
 	resolve: (call: Call, data: ArticleData) => Lookup<T>;
 	render: (value: T, press: Press) => Printed;
 }
@@ -116,7 +119,9 @@ export const directive = <T>(it: Directive<T>): AnyDirective => ({
 	words: it.words,
 	attributes: it.attributes,
 	print: (press) => {
-		const result = it.resolve(press.call, press.data);
+		const { call, data } = press;
+		const find = () => it.resolve(call, data);
+		const result = it.lasting ? onceFor(data, `${it.name} ${JSON.stringify(call.attributes)}`, find) : find();
 		return result.ok ? found(it.render(result.value, press)) : result;
 	}
 });

@@ -3,7 +3,9 @@
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { measureArticle } from './parts/bench/article.mjs';
 import { measureCoverage } from './parts/bench/coverage.mjs';
+import { measureEditor } from './parts/bench/editor.mjs';
 import { lineOf } from './parts/bench/figure.mjs';
 import { measureJobs } from './parts/bench/jobs.mjs';
 import { measureLive } from './parts/bench/live.mjs';
@@ -43,6 +45,8 @@ try {
 	await measureStatistics(print);
 	await measureTable(print);
 	await measureCoverage(print);
+	await measureArticle(print);
+	await measureEditor(server, mail, folder, print);
 	await measurePages(server, mail, folder, print);
 	await measureLive(server, mail, folder, print);
 	await measureJobs(server, mail, folder, print);

@@ -6,9 +6,9 @@ import { freePort } from '../mariadb.mjs';
 
 /**
  * Starts the built application over a database, without jobs of its own unless asked for.
- * @param {{ database: string, smtp: string, folder: string, jobs?: 'on' | 'off' }} options
+ * @param {{ database: string, smtp: string, folder: string, jobs?: 'on' | 'off', demo?: 'on' | 'off' }} options
  */
-export async function startApp({ database, smtp, folder, jobs = 'off' }) {
+export async function startApp({ database, smtp, folder, jobs = 'off', demo = 'off' }) {
 	const port = await freePort();
 	const origin = `http://localhost:${port}`;
 	const child = spawn(process.execPath, ['scripts/serve.mjs'], {
@@ -24,7 +24,7 @@ export async function startApp({ database, smtp, folder, jobs = 'off' }) {
 			AUTH_SECRET: randomBytes(32).toString('hex'),
 			LOG_LEVEL: 'error',
 			JOBS: jobs,
-			DEMO: 'off'
+			DEMO: demo
 		}
 	});
 	const exited = new Promise((done) => child.once('exit', done));

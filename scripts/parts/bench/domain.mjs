@@ -1,7 +1,8 @@
 import { createServer } from 'vite';
 
 /**
- * Loads modules of the domain as the application has them, for measuring without a build.
+ * Loads modules of the domain as the application has them, for measuring without a build: those of the bench by their
+ * name, others by their path from the root.
  * @template T @param {(load: (path: string) => Promise<Record<string, any>>) => Promise<T>} work
  */
 export async function withDomain(work) {
@@ -12,7 +13,9 @@ export async function withDomain(work) {
 		optimizeDeps: { noDiscovery: true, include: [] }
 	});
 	try {
-		return await work((path) => vite.ssrLoadModule(`/src/lib/domain/bench/${path}`));
+		return await work((path) =>
+			vite.ssrLoadModule(path.startsWith('/') ? path : `/src/lib/domain/bench/${path}`)
+		);
 	} finally {
 		await vite.close();
 	}

@@ -208,7 +208,7 @@ describe('a plan that begins with something', () => {
 					workload: 'archive-pack',
 					slug: 'wattle-5',
 					name: 'Wattle 5',
-					lapsed: 'calibration overdue since 2026-11-10'
+					lapsed: 'calibration overdue since 10 November 2026'
 				}
 			]);
 			const copy = await must(planCampaign(ctx, campaignInput.parse(typed)));

@@ -1,6 +1,6 @@
 const kept = new WeakMap<object, Map<string, unknown>>();
 /** More than any article names; what is over it begins anew, so that typing a name letter by letter keeps nothing. */
-const mostKept = 500;
+const mostKept = 2000;
 
 /**
  * What is made from data and a name, made once as long as the data is the same object: an article's data is read

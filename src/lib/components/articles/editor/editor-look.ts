@@ -118,6 +118,7 @@ const look = EditorView.theme({
 		border: '1px solid var(--color-edge)',
 		borderRadius: '3px',
 		color: 'var(--color-ink)',
+		fontFamily: 'inherit',
 		fontSize: 'inherit',
 		padding: '2px 6px'
 	},
@@ -126,6 +127,7 @@ const look = EditorView.theme({
 		border: '1px solid var(--color-blue)',
 		borderRadius: '3px',
 		color: 'var(--color-blue)',
+		fontFamily: 'inherit',
 		fontSize: 'inherit',
 		padding: '1px 8px'
 	},

@@ -38,7 +38,7 @@ describe('the page beside the source', () => {
 					expect(host.innerHTML).toBe(stage.join(''));
 				}
 			}),
-			{ numRuns: 60 }
+			{ numRuns: 25 }
 		);
 	});
 

@@ -1,7 +1,7 @@
 import { StateEffect, StateField, type EditorState, type Extension } from '@codemirror/state';
 import { Decoration, EditorView, WidgetType, type DecorationSet } from '@codemirror/view';
 import { tableOfBlock } from '../../../domain/articles/pasted-table';
-import { pastedHtml } from './pasted-html';
+import type { pastedHtml as PastedHtml } from './pasted-html';
 
 /** Takes files in and gives the Markdown to put where they were dropped; null where nothing came of it. */
 export type TakeFiles = (files: File[]) => Promise<string | null>;
@@ -105,9 +105,13 @@ function put(view: EditorView, markdown: string, block: boolean): void {
 }
 
 /** What the clipboard holds, as Markdown; null where its text is to be taken as it is. */
-function markdownOf(clipboard: DataTransfer, onnote: (words: string) => void): string | null {
+function markdownOf(
+	clipboard: DataTransfer,
+	pastedHtml: typeof PastedHtml | null,
+	onnote: (words: string) => void
+): string | null {
 	const html = clipboard.getData('text/html');
-	const pasted = html === '' ? null : pastedHtml(html);
+	const pasted = html === '' ? null : pastedHtml?.(html);
 	if (!pasted) return tableOfBlock(clipboard.getData('text/plain'));
 	if (pasted.pictures > 0)
 		onnote(
@@ -122,6 +126,9 @@ function markdownOf(clipboard: DataTransfer, onnote: (words: string) => void): s
  */
 export function pasting({ onfiles, onnote }: PastingOptions): Extension {
 	let plain = false;
+	// Fetched beside the page, and never on a server, which has no clipboard. Until it is here a paste is plain.
+	let pastedHtml: typeof PastedHtml | null = null;
+	void import('./pasted-html').then((loaded) => (pastedHtml = loaded.pastedHtml));
 	return [
 		awaited,
 		EditorView.domEventHandlers({
@@ -139,7 +146,7 @@ export function pasting({ onfiles, onnote }: PastingOptions): Extension {
 					void take(view, pictures, view.state.selection.main.from, takeFiles);
 					return true;
 				}
-				const markdown = markdownOf(clipboard, onnote);
+				const markdown = markdownOf(clipboard, pastedHtml, onnote);
 				if (markdown === null || markdown === '') return false;
 				put(view, markdown, /\n|^(?:#|- |\d+\. |\|)/.test(markdown));
 				return true;

@@ -48,6 +48,7 @@ export const gain = directive<Gain>({
 		attribute.campaign(),
 		attribute.oneOf('show', 'with its sign (as it is if left out), its size alone, in words …', shows)
 	],
+	lasting: true,
 	resolve(call, data) {
 		const cell = findCell(call, data);
 		if (!cell.ok) return cell;

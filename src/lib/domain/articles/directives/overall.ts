@@ -38,6 +38,7 @@ export const overallGain = directive<OverallGain>({
 		attribute.campaign(),
 		attribute.oneOf('show', 'with its sign (as it is if left out), its size alone, in words …', shows)
 	],
+	lasting: true,
 	resolve(call, data) {
 		const place = findProfile(call, data);
 		if (!place.ok) return place;

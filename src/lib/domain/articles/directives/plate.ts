@@ -5,7 +5,6 @@ import { scoresSpec } from '../plates/scores-spec';
 import { plateKinds, type PlateSpec } from '../plates/spec';
 import { unknownName } from '../names-near';
 import type { ArticleData } from '../data';
-import { onceFor } from '../once-for';
 import { attribute, findBaseline, findCampaign, findWorkload } from './lookup';
 import { ladderPlate, sweepPlate } from './plate-of-bench';
 import { chosen, driftPlate, overallPlate, tradeOffPlate, valuePlate } from './plate-of-comparison';
@@ -146,10 +145,10 @@ export const plate = directive<PlateSpec>({
 		},
 		{ name: 'title', required: false, words: 'a title of your own, in quotes', values: () => null }
 	],
+	lasting: true,
 	resolve: (call, data) => {
 		const { kind = 'scores' } = call.attributes;
-		if (!isKind(kind)) return missing(`There is no plate of the kind “${kind}”.`);
-		return onceFor(data, JSON.stringify(call.attributes), () => byKind[kind](call, data));
+		return isKind(kind) ? byKind[kind](call, data) : missing(`There is no plate of the kind “${kind}”.`);
 	},
 	render: (spec, { draw, call, platesAt }) => ({
 		html: plateFigure(spec, draw(spec), call.line, platesAt),

@@ -17,6 +17,7 @@ export const reading = directive<Cell & { show: Show; text: string }>({
 		attribute.campaign(),
 		attribute.oneOf('show', 'which figure; the one the workload prints if left out', shows)
 	],
+	lasting: true,
 	resolve(call, data) {
 		const cell = findCell(call, data);
 		if (!cell.ok) return cell;

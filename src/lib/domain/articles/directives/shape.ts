@@ -1,5 +1,6 @@
 import type { Token } from 'marked';
 import type { ArticleData } from '../data';
+import { onceFor } from '../once-for';
 import type { PlateSpec } from '../plates/spec';
 
 /** What a directive could not do, in words for its writer, with the names that exist. */
@@ -137,6 +138,8 @@ export interface Directive<T> {
 	sample?: string;
 	/** Printed when the rest of the page is known. */
 	late?: true;
+	/** What it finds rests on its attributes and the data alone, so that it is found once. */
+	lasting?: true;
 	resolve: (call: Call, data: ArticleData, press: Press) => Lookup<T>;
 	render: (value: T, press: Press) => Printed;
 }
@@ -150,7 +153,9 @@ export interface AnyDirective extends Omit<Directive<unknown>, 'resolve' | 'rend
 export const directive = <T>({ resolve, render, ...it }: Directive<T>): AnyDirective => ({
 	...it,
 	print: (press) => {
-		const result = resolve(press.call, press.data, press);
+		const { call, data } = press;
+		const find = () => resolve(call, data, press);
+		const result = it.lasting ? onceFor(data, `${it.name} ${JSON.stringify(call.attributes)}`, find) : find();
 		return result.ok ? found(render(result.value, press)) : result;
 	}
 });

@@ -23,30 +23,32 @@ const p95 = (values) => [...values].sort((a, b) => a - b)[Math.ceil(values.lengt
 
 /** Notes in the page when each key was pressed, and when what it changed was painted in source and page. */
 function watch() {
-	/** @type {{ page: number[], source: number[] }} */
-	const took = { page: [], source: [] };
-	let pressed = 0;
-	const painted = /** @param {number[]} times */ (times) => {
-		const since = pressed;
-		requestAnimationFrame(() => {
-			const { port1, port2 } = new MessageChannel();
-			port1.onmessage = () => times.push(performance.now() - since);
-			port2.postMessage(null);
-		});
+	/** @param {Node} target @param {MutationObserverInit} changes */
+	const timesOf = (target, changes) => {
+		/** @type {number[]} */
+		const took = [];
+		/** Keys that are not seen yet; two may come to be seen together. @type {number[]} */
+		let pressed = [];
+		addEventListener('keydown', (event) => pressed.push(event.timeStamp), true);
+		new MutationObserver(() => {
+			const seen = pressed;
+			pressed = [];
+			if (seen.length === 0) return;
+			requestAnimationFrame(() => {
+				const { port1, port2 } = new MessageChannel();
+				port1.onmessage = () => took.push(...seen.map((since) => performance.now() - since));
+				port2.postMessage(null);
+			});
+		}).observe(target, changes);
+		return took;
 	};
 	const page = document.querySelector('.page-preview article');
 	const source = document.querySelector('.source-editor')?.shadowRoot?.querySelector('.cm-content');
 	if (!page || !source) throw new Error('There is no editor.');
-	const seen = { page: 0, source: 0 };
-	addEventListener('keydown', (event) => (pressed = event.timeStamp), true);
-	new MutationObserver(() => {
-		if (seen.page !== pressed) painted(took.page);
-		seen.page = pressed;
-	}).observe(page, { childList: true });
-	new MutationObserver(() => {
-		if (seen.source !== pressed) painted(took.source);
-		seen.source = pressed;
-	}).observe(source, { childList: true, subtree: true, characterData: true });
+	const took = {
+		page: timesOf(page, { childList: true }),
+		source: timesOf(source, { childList: true, subtree: true, characterData: true })
+	};
 	Object.assign(globalThis, { took });
 }
 
@@ -91,6 +93,7 @@ export async function measureEditor(server, mail, folder, print) {
 			await page.keyboard.press(n % 6 === 5 ? 'Space' : 'e');
 			await page.waitForTimeout(betweenMs);
 		}
+		await page.waitForTimeout(1000);
 		const took = await page.evaluate(
 			() =>
 				/** @type {{ took: { page: number[], source: number[] } }} */ (/** @type {unknown} */ (globalThis))

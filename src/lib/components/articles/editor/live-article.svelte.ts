@@ -46,10 +46,10 @@ export class LiveArticle {
 		this.next = source;
 		if (this.frame !== 0) return;
 		const draw = () => {
+			this.frame = 0;
 			const began = performance.now();
 			flushSync(() => this.show(this.next));
 			this.tookMs = performance.now() - began;
-			this.frame = 0;
 		};
 		if (this.tookMs <= quickMs) this.frame = requestAnimationFrame(draw);
 		else this.frame = window.setTimeout(draw, Math.min(this.tookMs * 1.5, 500));

@@ -1,7 +1,7 @@
 import { StateEffect, StateField, type EditorState, type Extension } from '@codemirror/state';
 import { Decoration, EditorView, WidgetType, type DecorationSet } from '@codemirror/view';
 import { tableOfBlock } from '../../../domain/articles/pasted-table';
-import type { pastedHtml as PastedHtml } from './pasted-html';
+import type { Pasted, pastedHtml as PastedHtml } from './pasted-html';
 
 /** Takes files in and gives the Markdown to put where they were dropped; null where nothing came of it. */
 export type TakeFiles = (files: File[]) => Promise<string | null>;
@@ -105,20 +105,16 @@ function put(view: EditorView, markdown: string, block: boolean): void {
 }
 
 /** What the clipboard holds, as Markdown; null where its text is to be taken as it is. */
-function markdownOf(
-	clipboard: DataTransfer,
-	pastedHtml: typeof PastedHtml | null,
-	onnote: (words: string) => void
-): string | null {
+function readClipboard(clipboard: DataTransfer, pastedHtml: typeof PastedHtml | null): Pasted | null {
 	const html = clipboard.getData('text/html');
 	const pasted = html === '' ? null : pastedHtml?.(html);
-	if (!pasted) return tableOfBlock(clipboard.getData('text/plain'));
-	if (pasted.pictures > 0)
-		onnote(
-			`${pasted.pictures === 1 ? 'A picture was' : `${pasted.pictures} pictures were`} left out of what was pasted. Drag the files in instead.`
-		);
-	return pasted.markdown;
+	if (pasted) return pasted;
+	const table = tableOfBlock(clipboard.getData('text/plain'));
+	return table === null ? null : { markdown: table, pictures: 0 };
 }
+
+const leftOut = (pictures: number): string =>
+	`${pictures === 1 ? 'A picture was' : `${pictures} pictures were`} left out of what was pasted. Drag the files in instead.`;
 
 /**
  * What is pasted becomes Markdown, pictures that are pasted or dropped are handed over. Pasting as plain text, with
@@ -136,9 +132,13 @@ export function pasting({ onfiles, onnote }: PastingOptions): Extension {
 				plain = event.shiftKey && (event.ctrlKey || event.metaKey) && event.key.toLowerCase() === 'v';
 				return false;
 			},
+			keyup() {
+				plain = false;
+				return false;
+			},
 			paste(event, view) {
 				const clipboard = event.clipboardData;
-				if (!clipboard || plain) return (plain = false);
+				if (!clipboard || plain) return false;
 				const takeFiles = onfiles();
 				const pictures = picturesOf(clipboard);
 				const hasText = clipboard.getData('text/plain') !== '';
@@ -146,9 +146,12 @@ export function pasting({ onfiles, onnote }: PastingOptions): Extension {
 					void take(view, pictures, view.state.selection.main.from, takeFiles);
 					return true;
 				}
-				const markdown = markdownOf(clipboard, pastedHtml, onnote);
-				if (markdown === null || markdown === '') return false;
+				const pasted = readClipboard(clipboard, pastedHtml);
+				if (!pasted || (pasted.markdown === '' && pasted.pictures === 0)) return false;
+				const { markdown, pictures: left } = pasted;
 				put(view, markdown, /\n|^(?:#|- |\d+\. |\|)/.test(markdown));
+				// Said once the text is there, because a change of the text clears what was said.
+				if (left > 0) onnote(leftOut(left));
 				return true;
 			},
 			dragover(event) {

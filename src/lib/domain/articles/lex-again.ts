@@ -16,7 +16,8 @@ const isOpen = (token: Token): boolean =>
 	isDirective(token) && token.type === 'directive-container' && token.fault !== null;
 
 /** Types whose last token takes in what follows, so that reading cannot begin behind them. */
-const isGreedy = (token: Token | undefined): boolean => token !== undefined && ['paragraph', 'text', 'footnote-text'].includes(token.type);
+const isGreedy = (token: Token | undefined): boolean =>
+	token !== undefined && ['paragraph', 'text', 'footnote-text'].includes(token.type);
 
 const lengthOf = (tokens: readonly Token[]): number =>
 	tokens.reduce((length, token) => length + token.raw.length, 0);

@@ -22,7 +22,7 @@ describe('the place where it was found', () => {
 		const parts = snippetOf(source, wantedOf('tile'));
 		expect(parts?.filter((part) => part.hit).map((part) => part.text)).toEqual(['tile']);
 		expect(parts?.map((part) => part.text).join('')).toBe(
-			'What a fixed clock costs Held at 4.95 GHz the tile render ends in reading, see the log.'
+			'What a fixed clock costs Held at 4.95 GHz the tile render ends in …, see the log.'
 		);
 	});
 

@@ -41,13 +41,13 @@ export interface SnippetPart {
 	hit: boolean;
 }
 
-/** Source without its marks, on one line: what stands between braces, links’ addresses and Markdown’s signs go. */
+/** Source without its marks, on one line: directives, links’ addresses and Markdown’s signs go. */
 const readable = (source: string): string =>
 	source
-		.replace(/\{[^{}\n]*\}/g, '')
+		.replace(/:{1,3}[a-z][\w-]*\{[^{}]*\}|^:{2,3}[a-z][\w-]*$/gim, '…')
 		.replace(/\]\([^()\n]*\)/g, ']')
 		.replace(/^\s*(?:#{1,6}|>|[-*+]|\d+[.)])\s+/gm, '')
-		.replace(/[*_`[\]|]+|:{1,3}(?=[a-z])/g, '')
+		.replace(/[*_`[\]|]+|^:::$/gm, '')
 		.replace(/\s+/g, ' ')
 		.trim();
 

@@ -74,6 +74,7 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 	const keys = new Compartment();
 	let line = 0;
 	let inside: string | null = null;
+	let marked = '[]';
 	const view = new EditorView({
 		root,
 		parent: root as unknown as Element,
@@ -136,7 +137,13 @@ export function sourceView(host: HTMLElement, options: SourceViewOptions): Sourc
 			});
 			view.focus();
 		},
-		setFaults: (faults) => view.dispatch(withFaults(view.state, faults)),
+		setFaults(faults) {
+			// Most keys mend nothing and break nothing.
+			const now = JSON.stringify(faults);
+			if (now === marked) return;
+			marked = now;
+			view.dispatch(withFaults(view.state, faults));
+		},
 		setKeys: (changed) => view.dispatch({ effects: keys.reconfigure(keymapOf(options.desk, changed)) }),
 		run: (id) => editorCommands.find((command) => command.id === id)?.run(options.desk, view) ?? false,
 		claims: claimsView(view),

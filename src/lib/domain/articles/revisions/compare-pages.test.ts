@@ -43,6 +43,16 @@ describe('two pages', () => {
 		);
 	});
 
+	it('keep what stands in one mark together where all of it is new', () => {
+		const { body } = inside(
+			changes(compared('Same.', 'Same.\n\n::steps{profile=huge-pages}')).at(-1) ??
+				({ html: '' } as ComparedBlock)
+		);
+		for (const item of body.querySelectorAll('.steps li'))
+			expect(item.querySelectorAll(':scope > .step-value').length).toBeLessThanOrEqual(1);
+		expect(body.textContent).toContain('stock 1.17\u00a0V1.24\u00a0V');
+	});
+
 	it('show a paragraph that moved out of the middle as taken away, and leave its neighbours alone', () => {
 		const blocks = compared('One stays.\n\nTwo goes away.\n\nThree stays.', 'One stays.\n\nThree stays.');
 		expect(blocks.map(({ state }) => state)).toEqual(['same', 'removed', 'same']);

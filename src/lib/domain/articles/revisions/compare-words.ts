@@ -113,30 +113,25 @@ function gathered(runs: Run[]): Run[] {
 
 const marks: Record<State, string | null> = { same: null, added: 'ins', removed: 'del' };
 
-/** Words with the marks they stand in around them, and the mark of a change innermost. */
-function printRun({ state, words }: Run): string {
-	const mark = marks[state];
+/** Words from a depth on: those of one element stand in it together, the mark of a change innermost. */
+function printFrom(words: Word[], depth: number, mark: string | null): string {
 	const out: string[] = [];
 	for (let at = 0; at < words.length;) {
-		const first = words[at];
-		if (!first) break;
-		let end = at;
-		while (
-			words[end] &&
-			words[end]?.path.every((one, depth) => one === first.path[depth]) &&
-			words[end]?.path.length === first.path.length
-		)
-			end += 1;
-		const text = words
-			.slice(at, end)
-			.map((word) => word.html)
-			.join('');
-		const marked = mark === null ? text : `<${mark}>${text}</${mark}>`;
-		out.push(first.path.reduceRight((inner, around) => wrap(around, inner), marked));
+		const around = words[at]?.path[depth];
+		let end = at + 1;
+		while (end < words.length && words[end]?.path[depth] === around) end += 1;
+		const group = words.slice(at, end);
+		if (around) out.push(wrap(around, printFrom(group, depth + 1, mark)));
+		else {
+			const text = group.map((word) => word.html).join('');
+			out.push(mark === null ? text : `<${mark}>${text}</${mark}>`);
+		}
 		at = end;
 	}
 	return out.join('');
 }
+
+const printRun = ({ state, words }: Run): string => printFrom(words, 0, marks[state]);
 
 /** What stands in a line of text, compared word by word: the markup with what was added and taken away marked in it. */
 export function compareWords(before: PageNode[], after: PageNode[]): string {

@@ -4,7 +4,6 @@ function caretAt(x: number, y: number): { node: Node; offset: number } | null {
 		const caret = document.caretPositionFromPoint(x, y);
 		return caret && { node: caret.offsetNode, offset: caret.offset };
 	}
-	// eslint-disable-next-line @typescript-eslint/no-deprecated (the one there is where the other is not)
 	const range = (document as Document).caretRangeFromPoint(x, y);
 	return range && { node: range.startContainer, offset: range.startOffset };
 }

@@ -78,7 +78,9 @@ export const approveArticle = (
 		const data = await currentData(ctx, tx, row.id);
 		const { title, standfirst } = row;
 		const frozen = freezeEdition({ slug, title, standfirst, source: head.source, data });
-		const stops: Finding[] = blocking(await checkText(ctx, tx, row, head.source, frozen.facts, data, row.slotAt));
+		const stops: Finding[] = blocking(
+			await checkText(ctx, tx, row, head.source, frozen.facts, data, row.slotAt)
+		);
 		if (stops.length > 0)
 			return refuse('invalid', stopWords('It cannot be approved yet.', stops), { detail: stops });
 		const edition = await write(ctx, tx, row, head.id, frozen, data, head.source);

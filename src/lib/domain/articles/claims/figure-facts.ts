@@ -65,7 +65,7 @@ export function gains(data: ArticleData, over: string | null): Held[] {
 		const { ratio, gainPercent, gainCi95 } = comparison;
 		const lowerIsBetter = workload.better === 'lower';
 		const against = campaign.profiles.find((one) => one.slug === base);
-		const over_ = base === campaign.baseline || !against ? '' : ` over ${front(against.name)}`;
+		const overWords = base === campaign.baseline || !against ? '' : ` over ${front(against.name)}`;
 		return [
 			{
 				kind: 'gain',
@@ -77,7 +77,7 @@ export function gains(data: ArticleData, over: string | null): Held[] {
 				profile: profile.slug,
 				over: base,
 				called: null,
-				name: `${workload.name}, ${front(profile.name)}${over_}`,
+				name: `${workload.name}, ${front(profile.name)}${overWords}`,
 				printed: printedGain(gainPercent, gainCi95),
 				range: gainCi95 && printedGainRange(gainCi95),
 				ratio,

@@ -20,6 +20,12 @@ export const isDifference = ({ figure, s }: Case): boolean => {
 	);
 };
 
+/** The digits a datum is printed with: where its interval is wide they end in noughts that say nothing. */
+const digitsOf = ({ printed, unit }: Datum): string =>
+	(unit !== '' && printed.endsWith(unit) ? printed.slice(0, -unit.length) : printed)
+		.replace(/[\s\u00a0+]/g, '')
+		.replace('\u2212', '-');
+
 function fits({ value, datum }: Turned, of: Case, bySize: boolean): boolean {
 	const { readings, high, margin, hedge, sign } = of.figure;
 	const halfWidth = datum.interval ? (datum.interval[1] - datum.interval[0]) / 2 : null;
@@ -27,6 +33,7 @@ function fits({ value, datum }: Turned, of: Case, bySize: boolean): boolean {
 	if (margin && !(halfWidth !== null && roundsTo(halfWidth * scale, margin))) return false;
 	if (readings.length === 0) return margin !== null;
 	return readings.some((printed) => {
+		if (scale === 1 && printed.text === digitsOf(datum)) return true;
 		if (high) {
 			const ends = datum.interval?.map((end) => end * scale) ?? [];
 			const asInterval = roundsTo(ends[0] ?? NaN, printed) && roundsTo(ends[1] ?? NaN, high);

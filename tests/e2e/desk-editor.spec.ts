@@ -213,3 +213,27 @@ test('the source stands alone until Escape, and what can be inserted is shown in
 	await dialog.getByRole('button', { name: 'Insert at the cursor' }).click();
 	await expect(shown().locator('.plate')).toHaveCount(2);
 });
+
+test('a picture that is chosen is asked what it shows, and stands on the page', async () => {
+	await atTheEnd();
+	const png = await page.evaluate(async () => {
+		const canvas = document.createElement('canvas');
+		[canvas.width, canvas.height] = [640, 400];
+		const pen = canvas.getContext('2d');
+		pen?.fillRect(40, 40, 300, 200);
+		return canvas.toDataURL('image/png').split(',')[1] ?? '';
+	});
+	await page
+		.getByLabel('Pictures for the article')
+		.setInputFiles({ name: 'rig.png', mimeType: 'image/png', buffer: Buffer.from(png, 'base64') });
+	const dialog = page.getByRole('dialog', { name: 'A picture for the article' });
+	await dialog.getByRole('button', { name: 'Insert the picture' }).click();
+	await expect(dialog, 'not without words for those who cannot see it').toBeVisible();
+	await dialog.getByLabel(/what it shows/i).fill('A dark field on a light one');
+	await dialog.getByRole('button', { name: 'Insert the picture' }).click();
+	await expect(dialog).toBeHidden();
+	const shownPicture = shown().getByRole('img', { name: 'A dark field on a light one' });
+	await expect(shownPicture).toBeVisible();
+	const width = (image: HTMLImageElement) => image.decode().then(() => image.naturalWidth);
+	expect(await shownPicture.evaluate(width), 'the store answers with a picture').toBeGreaterThan(0);
+});

@@ -136,7 +136,7 @@ let lane: Promise<unknown> = Promise.resolve();
 let waiting = 0;
 const mostWaiting = 40;
 
-/** One picture at a time: each may take half a gigabyte while it is decoded. */
+/** One picture at a time: each may take 500 MB while it is decoded. */
 async function inLane<T>(work: () => Promise<T>): Promise<T> {
 	waiting += 1;
 	const turn = lane.then(work);
